@@ -1,0 +1,25 @@
+import { fileURLToPath } from 'node:url';
+import { preact } from '@preact/preset-vite';
+import { defineConfig } from 'vite';
+import { buildVersion } from './web/build/buildVersion.ts';
+import { contentSecurityPolicy, contentSecurityPolicyTag } from './web/build/contentSecurityPolicy.ts';
+
+const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
+
+export default defineConfig({
+  root: `${root}/web`,
+  // Relative, so that the folder works below any path of any static host.
+  base: './',
+  publicDir: `${root}/public`,
+  cacheDir: `${root}/node_modules/.vite`,
+  define: { __DRIFTBOOK_VERSION__: JSON.stringify(buildVersion(root)) },
+  plugins: [preact(), contentSecurityPolicyTag()],
+  build: {
+    outDir: `${root}/dist`,
+    emptyOutDir: true,
+    target: 'es2022',
+    assetsInlineLimit: 0,
+    modulePreload: { polyfill: false },
+  },
+  preview: { headers: { 'Content-Security-Policy': contentSecurityPolicy } },
+});
