@@ -15,3 +15,22 @@ export {
 export { type Periods, periods } from './orbit/periods';
 export { type SecularRates, secularRates } from './orbit/secularRates';
 export { elementsFromState, stateFromElements } from './orbit/state';
+export { blankCandidate, fieldTexts } from './record/blankCandidate';
+export {
+  type BodyId,
+  bodyIds,
+  type Candidate,
+  candidateSchema,
+  type EntryForm,
+  entryForms,
+  type FieldId,
+  fieldIds,
+  type GravitySetId,
+  gravitySetIds,
+  type InputFrame,
+  inputFrames,
+  type NodeForm,
+  nodeForms,
+  type OrbitEntry,
+} from './record/candidate';
+export { type CandidateError, lengthCaps, type ParsedCandidate, parseCandidate } from './record/candidateSchema';
