@@ -1,8 +1,27 @@
 /** Table of contents of all that is public. */
+
+export { bodies } from './bodies/bodies';
 export type { Body } from './bodies/body';
-export { type KeplerianElements, type MeanElements, type OsculatingElements, type StateVector, type Theory } from './orbit/elements';
-export { eccentricFromMean, eccentricFromTrue, meanFromTrue, trueFromEccentric, trueFromMean } from './orbit/kepler';
+export { type CustomBodyInput, customBody } from './bodies/customBody';
+export { gravitySets } from './bodies/earth';
+export { isoFromJulianDate, type JulianDateResult, julianDateFromIso, seriesSpan } from './bodies/julianDate';
+export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from './bodies/precession';
+export { meanSiderealTimeRad } from './bodies/siderealTime';
+export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
+export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
+export type { KeplerianElements, MeanElements, OsculatingElements, StateVector, Theory } from './orbit/elements';
+export {
+  elementsFromMeanOfDate,
+  elementsToMeanOfDate,
+  type FrameAtEpoch,
+  type InertialFrame,
+  type StateFrame,
+  stateFromMeanOfDate,
+  stateToMeanOfDate,
+} from './orbit/frames';
 export { ellipsoidHeightKm, type HeightRange, heightsAlongOrbit } from './orbit/heights';
+export { eccentricFromMean, eccentricFromTrue, meanFromTrue, trueFromEccentric, trueFromMean } from './orbit/kepler';
+export { type LocalTimeOptions, localTimeDriftSPerS, localTimeOfNodeH, nodeFromLocalTimeRad } from './orbit/localTime';
 export {
   ConversionError,
   type ConversionProblem,

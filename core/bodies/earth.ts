@@ -6,14 +6,16 @@ import { rescaleZonals, zonalsFromNormalised } from './zonals';
  * all four, so that an altitude means the same whichever set is chosen.
  */
 
+/** Rotation of the Earth in inertial space, rad/s: NIMA TR 8350.2, 3rd edition, table 3.1. */
+export const earthRotationRadPerS = 7.292115e-5;
+
 const shape = {
   id: 'earth',
   name: 'Earth',
   // WGS 84 ellipsoid: a 6378.137 km, 1/f 298.257223563 (NIMA TR 8350.2, 3rd edition, table 3.1).
   equatorialRadiusKm: 6378.137,
   flattening: 1 / 298.257223563,
-  // Rotation in inertial space, 7292115e-11 rad/s (NIMA TR 8350.2, 3rd edition, table 3.1).
-  rotationRadPerS: 7.292115e-5,
+  rotationRadPerS: earthRotationRadPerS,
   // Mean tropical year near J2000, days of 86 400 s (Astronomical Almanac, section C).
   yearDays: 365.2422,
 } as const;

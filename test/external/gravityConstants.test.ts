@@ -1,6 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { bodies } from '../../core/bodies/bodies';
-import { gravitySets } from '../../core/bodies/earth';
+import { bodies, gravitySets } from '../../core/index';
 
 /**
  * Published constants, written out a second time, unnormalised. Tolerances are half a unit of the
