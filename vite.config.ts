@@ -3,6 +3,7 @@ import { preact } from '@preact/preset-vite';
 import { defineConfig } from 'vite';
 import { buildVersion } from './web/build/buildVersion.ts';
 import { contentSecurityPolicy, contentSecurityPolicyTag } from './web/build/contentSecurityPolicy.ts';
+import { offlineWorker } from './web/build/offlineWorker.ts';
 
 const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
 
@@ -13,7 +14,11 @@ export default defineConfig({
   publicDir: `${root}/public`,
   cacheDir: `${root}/node_modules/.vite`,
   define: { __DRIFTBOOK_VERSION__: JSON.stringify(buildVersion(root)) },
-  plugins: [preact(), contentSecurityPolicyTag()],
+  plugins: [
+    preact(),
+    contentSecurityPolicyTag(),
+    offlineWorker({ entry: `${root}/web/offline/serviceWorker.ts`, fileName: 'serviceWorker.js' }),
+  ],
   build: {
     outDir: `${root}/dist`,
     emptyOutDir: true,
