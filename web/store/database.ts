@@ -42,15 +42,17 @@ export async function openDatabase(events: DatabaseEvents, waitMs: number = open
   let blocked = false;
   let opened: Database | undefined;
   let late = false;
-  const opening = openDB<DriftbookSchema>(databaseName, databaseVersion, {
-    upgrade: createStores,
-    blocked: () => {
-      blocked = true;
-    },
-    blocking: () => opened && events.onBlocking(opened),
-    terminated: events.onTerminated,
-  });
-  const answer = opening.then(
+  // In an async function, since some browsers refuse by throwing before there is a request.
+  const open = async () =>
+    openDB<DriftbookSchema>(databaseName, databaseVersion, {
+      upgrade: createStores,
+      blocked: () => {
+        blocked = true;
+      },
+      blocking: () => opened && events.onBlocking(opened),
+      terminated: events.onTerminated,
+    });
+  const answer = open().then(
     (database): Opened => {
       opened = database;
       // The app already runs without storage: a connection left open would only block other tabs.
@@ -66,7 +68,7 @@ export async function openDatabase(events: DatabaseEvents, waitMs: number = open
   const waited = new Promise<Opened>((resolve) => {
     timer = setTimeout(() => {
       late = true;
-      resolve(failure(blocked ? 'blocked' : 'refused'));
+      resolve(failure(blocked ? 'blocked' : 'noAnswer'));
     }, waitMs);
   });
   const first = await Promise.race([answer, waited]);

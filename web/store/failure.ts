@@ -3,6 +3,8 @@
 export type FailureReason =
   /** No storage at all: a private window, or switched off by the user. */
   | 'refused'
+  /** The browser did not open its storage in reasonable time. */
+  | 'noAnswer'
   /** Another tab with an older version holds the storage. */
   | 'blocked'
   /** The stored book was written by a newer version. */
@@ -23,6 +25,8 @@ export interface StoreFailure {
 const messages: Readonly<Record<FailureReason, string>> = {
   refused:
     'This browser does not let Driftbook keep anything here, as in a private window. You can work, but what you type is gone when this tab closes.',
+  noAnswer:
+    'This browser did not open its storage in time. You can work, but what you type is gone when this tab closes; load the page again to try once more.',
   blocked:
     'Another tab with an older Driftbook holds the book. Close the other Driftbook tabs, then open this one again.',
   newer: 'The book on this device was written by a newer Driftbook. Load the newer version to open it.',

@@ -36,12 +36,15 @@ class LockedTabs implements Tabs {
   readonly #channel = typeof BroadcastChannel === 'undefined' ? null : new BroadcastChannel(channelName);
   /** Undefined where the browser has no locks, or refuses them to this page. */
   #locks: LocksPart | undefined;
+  readonly #answerWaitMs: number;
+  /** Lets go of the lock; null while this tab does not hold it. */
   #release: (() => void) | null = null;
   readonly #waiting = new AbortController();
   #onHandedOver: (() => void) | null = null;
 
   constructor(readonly parts: TabsParts) {
     this.#locks = parts.locks;
+    this.#answerWaitMs = parts.answerWaitMs ?? 1500;
     this.#channel?.addEventListener('message', ({ data }: MessageEvent<Message>) => void this.#hear(data));
   }
 
@@ -86,11 +89,19 @@ class LockedTabs implements Tabs {
   async #hear(message: Message): Promise<void> {
     if (message === 'bookChanged') this.parts.onBookChanged();
     if (message === 'handedOver') this.#onHandedOver?.();
-    if (message === 'handOver' && this.#release) {
-      await this.parts.beforeHandOver();
-      this.#elsewhere.value = true;
-      this.#channel?.postMessage('handedOver');
-    }
+    if (message === 'handOver') await this.#handOver();
+  }
+
+  async #handOver(): Promise<void> {
+    const held = this.#release;
+    if (!held) return;
+    await this.parts.beforeHandOver();
+    this.#elsewhere.value = true;
+    this.#channel?.postMessage('handedOver');
+    // The tab that asked may be gone, or may have asked the holder before this one: then nobody takes the lock.
+    setTimeout(() => {
+      if (this.#release === held) this.#elsewhere.value = false;
+    }, this.#answerWaitMs);
   }
 
   async takeOver(): Promise<void> {
@@ -106,7 +117,7 @@ class LockedTabs implements Tabs {
   #askToHandOver(): Promise<void> {
     if (!this.#channel) return Promise.resolve();
     return new Promise((resolve) => {
-      const timer = setTimeout(resolve, this.parts.answerWaitMs ?? 1500);
+      const timer = setTimeout(resolve, this.#answerWaitMs);
       this.#onHandedOver = () => {
         clearTimeout(timer);
         resolve();
