@@ -29,7 +29,7 @@ const tolerances = {
   textbookDegPerDay: 0.01,
   /** Quoted to 0.01 deg/day for an orbit given to 1 km and 0.1°: 1 km is 0.0026, 0.05° is 0.006. */
   postedDegPerDay: 0.02,
-  /** Quoted to 1 deg/yr from memory, elements to 1 km and 0.01°; the Moon and Sun, left out, move them by most of 1 %. */
+  /** Quoted to 1 deg/yr, which is 0.8 % of the smaller rate, and from memory. */
   lageosShare: 0.015,
   /** Exact in first order: what is left is the rounding of cos² i, 1e-16 of the rate's coefficient. */
   stationaryPerigeeShare: 1e-15,
