@@ -29,6 +29,8 @@ function rowsOf(transaction: WriteTransaction): WritableRows {
     putDraft: async (key, row) => void (await store('drafts').put(row, key)),
     dropDraft: (key) => store('drafts').delete(key),
     putSetting: async (key, value) => void (await store('settings').put(value, key)),
+    // Some older browsers lack `commit`; there the transaction ends by itself.
+    commit: () => transaction.commit?.(),
   };
 }
 

@@ -84,7 +84,11 @@ class KeptDraft implements DraftKeeper {
   }
 
   #put({ draft, typedAtIso }: { readonly draft: Draft; readonly typedAtIso: string }): Promise<Outcome<void>> {
-    return this.parts.shelf.change((rows) => rows.putDraft('current', { ...draft, typedAtIso }));
+    return this.parts.shelf.change((rows) => {
+      const put = rows.putDraft('current', { ...draft, typedAtIso });
+      rows.commit();
+      return put;
+    });
   }
 
   async flush(): Promise<DraftStatus> {

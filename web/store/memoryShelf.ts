@@ -24,6 +24,7 @@ function memoryRows(): WritableRows {
     putDraft: async (key, row) => keep(drafts, key, row),
     dropDraft: async (key) => void drafts.delete(key),
     putSetting: async (key, value) => keep(settings, key, value),
+    commit: () => undefined,
   };
 }
 

@@ -60,6 +60,11 @@ export interface WritableRows extends Rows {
   putDraft(key: DraftKey, row: DraftRow): Promise<void>;
   dropDraft(key: DraftKey): Promise<void>;
   putSetting(key: string, value: unknown): Promise<void>;
+  /**
+   * No more requests follow. Hands the transaction over at once instead of after its last answer, which a page
+   * that is going away does not live to see.
+   */
+  commit(): void;
 }
 
 export type Outcome<Value> = { readonly ok: true; readonly value: Value } | StoreFailure;

@@ -122,6 +122,16 @@ describe('the draft on the device', () => {
     expect(loaded).toMatchObject({ kind: 'readable', baseRevision: 3, candidate: { entry: { texts } } });
   });
 
+  it('is handed over within the call, since a page that is going away gets no further turn', async () => {
+    const draft = createDraftKeeper({ shelf: await openShelf(), clock });
+    const commit = vi.spyOn(IDBTransaction.prototype, 'commit');
+    draft.note(typed('Coast'));
+    const flushed = draft.flush();
+    expect(commit).toHaveBeenCalledTimes(1);
+    expect(await flushed).toBe('kept');
+    commit.mockRestore();
+  });
+
   it('is null where nothing was kept, and after it was discarded', async () => {
     const draft = createDraftKeeper({ shelf: await openShelf(), clock });
     expect(valueIn(await draft.load())).toBeNull();
