@@ -3,8 +3,8 @@ import { type DBSchema, type IDBPDatabase, openDB } from 'idb';
 import { failure, failureFrom, type StoreFailure } from './failure';
 import type { CandidateRow, DraftKey, DraftRow, RevisionRow } from './rows';
 
-export const databaseName = 'driftbook';
-export const databaseVersion = 1;
+const databaseName = 'driftbook';
+const databaseVersion = 1;
 
 export interface DriftbookSchema extends DBSchema {
   candidates: { key: string; value: CandidateRow; indexes: { savedAt: string; name: string } };
@@ -25,7 +25,7 @@ export interface DatabaseEvents {
 export type Opened = { readonly ok: true; readonly database: Database } | StoreFailure;
 
 /** Longest wait for the browser to open the database; some never answer, and the app must start all the same. */
-export const openWaitMs = 4000;
+const openWaitMs = 4000;
 
 function createStores(database: Database): void {
   const candidates = database.createObjectStore('candidates', { keyPath: 'id' });

@@ -8,7 +8,7 @@ import type { Candidate } from '../../core/index';
 import { writeRevision } from './bookChanges';
 import type { Outcome, Shelf } from './rows';
 
-export const demoSetting = 'demoBook';
+const demoSetting = 'demoBook';
 
 /** Answers whether the candidates were put in by this call. */
 export function seedDemoBook(

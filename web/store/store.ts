@@ -48,7 +48,8 @@ const millisecondsPerDay = 86_400_000;
 async function prepareBook(shelf: Shelf, book: Book, clock: Clock): Promise<void> {
   const now = clock();
   await seedDemoBook(shelf, { candidates: skerryBook, savedAtIso: now.toISOString() });
-  await book.purgeRemoved(new Date(now.getTime() - removedKeptDays * millisecondsPerDay));
+  // Not awaited, so that the start does not wait; whatever reads the book next queues behind it.
+  void book.purgeRemoved(new Date(now.getTime() - removedKeptDays * millisecondsPerDay));
 }
 
 /** Opens the store. Always resolves: without storage it works in memory. */
