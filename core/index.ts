@@ -53,3 +53,7 @@ export {
   type OrbitEntry,
 } from './record/candidate';
 export { type CandidateError, lengthCaps, type ParsedCandidate, parseCandidate } from './record/candidateSchema';
+export { readStateText, type StateTextResult } from './record/formats/stateText';
+export { parseTle, type TwoLineElements, type TwoLineResult } from './record/formats/twoLine';
+export type { TwoLineError } from './record/formats/twoLineFields';
+export { type NumberReading, type NumberResult, readNumber } from './record/numberText';
