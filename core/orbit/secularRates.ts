@@ -26,14 +26,14 @@ export function secularRates(body: Body, mean: MeanElements, theory: Theory): Se
   if (mean.kind !== undefined && mean.kind !== 'mean') {
     throw new Error(`secular rates need mean elements, got ${String(mean.kind)}`);
   }
-  const a = mean.semiMajorAxisKm;
-  const e = mean.eccentricity;
+  const { semiMajorAxisKm: a, eccentricity: e } = mean;
   if (!(a > 0 && e >= 0 && e < 1)) throw new Error(`secular rates need a > 0 and 0 ≤ e < 1, got a ${a}, e ${e}`);
-  return theory === 'first' ? firstOrder(body, a, e, mean.inclinationRad) : secondOrder(body, a, e, mean.inclinationRad);
+  return theory === 'first' ? firstOrder(body, mean) : secondOrder(body, mean);
 }
 
-function firstOrder(body: Body, a: number, e: number, inclinationRad: number): SecularRates {
-  const theta = Math.cos(inclinationRad);
+function firstOrder(body: Body, mean: MeanElements): SecularRates {
+  const { semiMajorAxisKm: a, eccentricity: e } = mean;
+  const theta = Math.cos(mean.inclinationRad);
   const theta2 = theta * theta;
   const eta2 = 1 - e * e;
   const n = Math.sqrt(body.muKm3PerS2 / a) / a;
@@ -46,15 +46,17 @@ function firstOrder(body: Body, a: number, e: number, inclinationRad: number): S
   };
 }
 
-function secondOrder(body: Body, a: number, e: number, inclinationRad: number): SecularRates {
-  const theta = Math.cos(inclinationRad);
+function secondOrder(body: Body, mean: MeanElements): SecularRates {
+  const { semiMajorAxisKm: a, eccentricity: e } = mean;
+  const theta = Math.cos(mean.inclinationRad);
   const theta2 = theta * theta;
   const theta4 = theta2 * theta2;
   const e2 = e * e;
   const eta2 = 1 - e2;
   const eta = Math.sqrt(eta2);
   const n = Math.sqrt(body.muKm3PerS2 / a) / a;
-  const ratio2 = (body.radiusKm / (a * eta2)) ** 2;
+  const ratio = body.radiusKm / (a * eta2);
+  const ratio2 = ratio * ratio;
   const gamma2 = 0.5 * (body.zonals[2] ?? 0) * ratio2;
   const gamma4 = -0.375 * (body.zonals[4] ?? 0) * ratio2 * ratio2;
   const square = gamma2 * gamma2;
