@@ -1,0 +1,94 @@
+/**
+ * Reads the texts of an entry, one field at a time, and collects a message at each field that is
+ * in the way. Each reader returns null where it could not read, so that every field is looked at
+ * and all messages appear together.
+ */
+import type { FieldId } from './candidate';
+import { type NumberResult, readNumber } from './numberText';
+import type { FieldError, FieldErrors, Notice } from './resolved';
+
+/** A field by its name on screen and what it expects, as an end to "type …". */
+export interface FieldWords {
+  readonly field: FieldId;
+  readonly label: string;
+  readonly expected: string;
+  /** Which values can be meant here: where only one reading of "97,679" can, it is taken. */
+  readonly meant?: (value: number) => boolean;
+}
+
+export interface FieldReader {
+  readonly errors: FieldErrors;
+  readonly notices: Notice[];
+  text(field: FieldId): string;
+  /** The number in the field, or null with a message left at the field. */
+  number(words: FieldWords): number | null;
+  /** As `number`, but an empty field is no error and gives undefined. */
+  optionalNumber(words: FieldWords): number | null | undefined;
+  /** Leaves a message at a field, the first one only; null, to be returned. */
+  fail(field: FieldId, message: string): null;
+  notice(notice: Notice): void;
+}
+
+/** Larger than any length, rate or anomaly a person means; keeps every formula finite. */
+const largest = 1e12;
+
+export function fieldReader(texts: Readonly<Record<FieldId, string>>): FieldReader {
+  const errors: FieldErrors = {};
+  const notices: Notice[] = [];
+  const leave = (field: FieldId, error: FieldError): null => {
+    errors[field] ??= error;
+    return null;
+  };
+  const number = (words: FieldWords): number | null => {
+    const result = meantReading(readNumber(texts[words.field]), words);
+    if (result.ok && Math.abs(result.value) <= largest) return result.value;
+    return leave(words.field, result.ok ? tooLarge(words) : numberError(result, words, texts[words.field]));
+  };
+  return {
+    errors,
+    notices,
+    text: (field) => texts[field].trim(),
+    number,
+    optionalNumber: (words) => (texts[words.field].trim() === '' ? undefined : number(words)),
+    fail: (field, message) => leave(field, { message }),
+    notice: (notice) => {
+      notices.push(notice);
+    },
+  };
+}
+
+/** A number that reads two ways is not in doubt where only one of them can be meant in this field. */
+function meantReading(result: NumberResult, { meant }: FieldWords): NumberResult {
+  if (result.ok || meant === undefined) return result;
+  const [only, ...others] = (result.readings ?? []).filter(({ value }) => meant(value));
+  return only !== undefined && others.length === 0 ? { ok: true, value: only.value } : result;
+}
+
+type Unread = Extract<NumberResult, { ok: false }>;
+
+function numberError(result: Unread, words: FieldWords, text: string): FieldError {
+  const { label, expected } = words;
+  switch (result.problem) {
+    case 'empty':
+      return { message: `${label} is empty; type ${expected}.` };
+    case 'ambiguous':
+      return {
+        message: `${label}: “${quoted(text)}” can be read two ways; choose which is meant.`,
+        choices: (result.readings ?? []).map((reading) => ({ text: reading.text, label: reading.text })),
+      };
+    case 'tooLarge':
+      return tooLarge(words);
+    case 'notANumber':
+      return { message: `${label}: “${quoted(text)}” is not a number; type ${expected}.` };
+  }
+}
+
+function tooLarge({ label, expected }: FieldWords): FieldError {
+  return { message: `${label} is too large a number; type ${expected}.` };
+}
+
+/** A typed text as a message can quote it. */
+export function quoted(text: string): string {
+  const trimmed = text.trim();
+  return trimmed.length > 24 ? `${trimmed.slice(0, 24)}…` : trimmed;
+}
