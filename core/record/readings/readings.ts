@@ -1,0 +1,81 @@
+/** The registry: every reading of an orbit, in the order in which they are shown. */
+import type { Theory } from '../../orbit/elements';
+import { heightsAlongOrbit } from '../../orbit/heights';
+import { driftReadings } from './drift';
+import { nodeReadings } from './node';
+import type { Alternate, Reading, ReadingId, ReadingPoint, ReadingSpec } from './reading';
+import { sensitivitiesOf } from './sensitivity';
+import { shapeReadings } from './shape';
+import { timeReadings } from './time';
+
+const specs: readonly ReadingSpec[] = [...driftReadings, ...nodeReadings, ...timeReadings, ...shapeReadings];
+
+/** All readings the orbit has, at the given level; what a lacking epoch, day or year rules out is in `absentReadings`. */
+export function readingsOf(orbit: ReadingPoint, theory: Theory = 'second'): Reading[] {
+  const heights = heightValues(orbit);
+  return specs
+    .filter((spec) => !spec.missing?.(orbit))
+    .filter(({ id }) => heights !== null || !isHeight(id))
+    .map((spec) => readingOf(spec, orbit, theory, heights?.[spec.id as HeightId]));
+}
+
+export interface AbsentReading {
+  readonly id: ReadingId;
+  readonly label: string;
+  readonly reason: string;
+}
+
+/** Readings the orbit does not have, each with the reason. */
+export function absentReadings(orbit: ReadingPoint): AbsentReading[] {
+  const noHeights = heightValues(orbit) === null;
+  return specs.flatMap((spec) => {
+    const reason =
+      noHeights && isHeight(spec.id) ? 'J2 is too large a correction on this orbit.' : spec.missing?.(orbit);
+    return reason ? [{ id: spec.id, label: labelAt(spec.label, orbit), reason }] : [];
+  });
+}
+
+type HeightId = 'leastHeight' | 'greatestHeight';
+
+function isHeight(id: ReadingId): id is HeightId {
+  return id === 'leastHeight' || id === 'greatestHeight';
+}
+
+/** One walk along the orbit serves both; null where J2 terms are too large for the orbit to close. */
+function heightValues({ body, mean }: ReadingPoint): Partial<Record<ReadingId, number>> | null {
+  try {
+    const { leastKm, greatestKm } = heightsAlongOrbit(body, mean);
+    return { leastHeight: leastKm, greatestHeight: greatestKm };
+  } catch {
+    return null;
+  }
+}
+
+function readingOf(spec: ReadingSpec, orbit: ReadingPoint, theory: Theory, known: number | undefined): Reading {
+  const { id, symbol, quantity, mark, ordered } = spec;
+  const orders = ordered ? { first: spec.evaluate(orbit, 'first'), second: spec.evaluate(orbit, 'second') } : null;
+  const value = orders?.[theory] ?? known ?? spec.evaluate(orbit, theory);
+  const remark = spec.remark?.(orbit, value);
+  const alternates: readonly Alternate[] = spec.alternates?.(orbit, value) ?? [];
+  return {
+    id,
+    label: labelAt(spec.label, orbit),
+    symbol,
+    quantity,
+    value,
+    level: ordered ? theory : 'geometry',
+    mark,
+    orders,
+    sensitivities: () =>
+      spec.sensitive === false ? null : sensitivitiesOf(orbit, (point) => spec.evaluate(point, theory)),
+    alternates,
+    ...(remark === undefined ? {} : { remark }),
+    working: () => spec.working(orbit),
+  };
+}
+
+/** At other bodies the trade speaks of periapsis and apoapsis. */
+function labelAt(label: string, { body }: ReadingPoint): string {
+  if (body.id === 'earth') return label;
+  return label.replace(/erigee/, 'eriapsis').replace(/pogee/, 'poapsis');
+}
