@@ -1,0 +1,106 @@
+/**
+ * The sentence above everything: which orbit this is, by how node and perigee move now.
+ *
+ * The closed form knows rates now; it says nothing here about years ahead.
+ */
+import { degPerRad, secondsPerDay, twoPi } from '../numerics/angles';
+import { stationaryYears } from './readings/drift';
+import type { Reading, ReadingId, ReadingMark } from './readings/reading';
+import type { ResolvedOrbit } from './resolved';
+import { formatNumber, unitOf } from './units';
+import { smallEccentricity } from './warnings';
+
+export interface HeadlineSpan {
+  readonly text: string;
+  readonly mark?: Exclude<ReadingMark, 'none'>;
+  readonly strong?: boolean;
+}
+
+/** Local time drifting less than this is Sun-synchronous for a mission that trims once a year. */
+const synchronousMinPerYear = 1;
+const nearlySynchronousMinPerYear = 15;
+/** A node slower than this takes 1000 years to go round. */
+const stillDegPerDay = 360 / (stationaryYears * 365.25);
+
+/** Two sentences, node then perigee, in spans; joined they read as plain text. */
+export function headlineOf(
+  { body, mean }: Pick<ResolvedOrbit, 'body' | 'mean'>,
+  readings: readonly Reading[],
+  options: { readonly rateUnit?: string } = {},
+): HeadlineSpan[] {
+  const value = (wanted: ReadingId) => readings.find(({ id }) => id === wanted)?.value;
+  const rates: Rates = { node: needed(value('nodeRate')), perigee: needed(value('perigeeRate')), ...options };
+  const apsis = body.id === 'earth' ? 'perigee' : 'periapsis';
+  const node = nodeSpans(rates, value('localTimeDrift'));
+  return [...node, { text: ' ' }, ...perigeeSpans(rates, mean.eccentricity, apsis)];
+}
+
+interface Rates {
+  readonly node: number;
+  readonly perigee: number;
+  readonly rateUnit?: string;
+}
+
+function needed(value: number | undefined): number {
+  if (value === undefined) throw new Error('Expected readings of node and perigee rate, got none');
+  return value;
+}
+
+function nodeSpans(rates: Rates, drift: number | undefined): HeadlineSpan[] {
+  const minutes = drift === undefined ? Number.NaN : drift * unitOf('localTimeDrift').perCore;
+  const rate: HeadlineSpan = { text: rateText(rates.node, rates), mark: 'node', strong: true };
+  if (Math.abs(minutes) < nearlySynchronousMinPerYear) return synchronousSpans(rate, minutes);
+  if (isStill(rates.node)) return [{ text: 'The node stands still now', mark: 'node', strong: true }, { text: '.' }];
+  const sense = rates.node < 0 ? 'regresses' : 'advances';
+  return [{ text: `The node ${sense} now, ` }, rate, { text: `: once round in ${turnText(rates.node)}.` }];
+}
+
+function synchronousSpans(rate: HeadlineSpan, minutes: number): HeadlineSpan[] {
+  const opening = Math.abs(minutes) < synchronousMinPerYear ? 'Sun-synchronous now' : 'Nearly Sun-synchronous now';
+  const digits = Math.abs(minutes) < synchronousMinPerYear ? 2 : 1;
+  return [
+    { text: opening, strong: true },
+    { text: ': the node moves ' },
+    rate,
+    { text: ', its local time ' },
+    { text: `${formatNumber(minutes, { digits, plus: true })} min a year`, mark: 'node', strong: true },
+    { text: ' at this rate.' },
+  ];
+}
+
+function perigeeSpans(rates: Rates, eccentricity: number, apsis: string): HeadlineSpan[] {
+  const name = apsis.charAt(0).toUpperCase() + apsis.slice(1);
+  if (eccentricity < smallEccentricity) {
+    const size = formatNumber(eccentricity, { digits: eccentricity < 0.001 ? 6 : 4 });
+    return [
+      { text: `At e ${size} ` },
+      { text: `${apsis} drift means little`, mark: 'perigee', strong: true },
+      { text: ': watch the eccentricity vector.' },
+    ];
+  }
+  if (isStill(rates.perigee)) {
+    return [{ text: `${name} stands still now`, mark: 'perigee', strong: true }, { text: '.' }];
+  }
+  return [
+    { text: `${name} moves ` },
+    { text: rateText(rates.perigee, rates), mark: 'perigee', strong: true },
+    { text: ` now: once round in ${turnText(rates.perigee)}.` },
+  ];
+}
+
+function isStill(radPerS: number): boolean {
+  return Math.abs(radPerS * degPerRad * secondsPerDay) < stillDegPerDay;
+}
+
+function rateText(radPerS: number, { rateUnit }: Rates): string {
+  const { perCore, symbol } = unitOf('angleRate', rateUnit);
+  return `${formatNumber(radPerS * perCore, { digits: symbol === 'deg/day' ? 4 : 2, plus: true })} ${symbol}`;
+}
+
+/** Three figures are as much as a rate of now is worth as a span. */
+function turnText(radPerS: number): string {
+  const days = twoPi / (Math.abs(radPerS) * secondsPerDay);
+  if (days < 730) return `${formatNumber(days, { digits: days < 100 ? 1 : 0 })} days`;
+  const years = days / 365.25;
+  return `${formatNumber(years, { digits: years < 10 ? 1 : 0 })} years`;
+}
