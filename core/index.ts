@@ -53,7 +53,39 @@ export {
   type OrbitEntry,
 } from './record/candidate';
 export { type CandidateError, lengthCaps, type ParsedCandidate, parseCandidate } from './record/candidateSchema';
+export { canonicalText } from './record/canonicalText';
+export { type EntryTags, type EntryTexts, entryFromOrbit } from './record/entryFromOrbit';
+export { fingerprint, fingerprintAlphabet, fingerprintLine } from './record/fingerprint';
 export { readStateText, type StateTextResult } from './record/formats/stateText';
 export { parseTle, type TwoLineElements, type TwoLineResult } from './record/formats/twoLine';
 export type { TwoLineError } from './record/formats/twoLineFields';
+export { type Expr, evaluate, mapSymbols, symbolsIn, type Values } from './record/formula';
+export { formulaText } from './record/formulaText';
+export { type HeadlineSpan, headlineOf } from './record/headline';
+export { type Migration, migrateCandidate } from './record/migrate';
 export { type NumberReading, type NumberResult, readNumber } from './record/numberText';
+export type {
+  Alternate,
+  Reading,
+  ReadingId,
+  ReadingLevel,
+  ReadingMark,
+  ReadingPoint,
+  Sensitivities,
+} from './record/readings/reading';
+export { type AbsentReading, absentReadings, readingsOf } from './record/readings/readings';
+export type { FieldError, FieldErrors, Notice, Resolution, ResolvedOrbit } from './record/resolved';
+export { resolveOrbit } from './record/resolveOrbit';
+export {
+  type DisplayUnit,
+  displayUnits,
+  formatClock,
+  formatNumber,
+  formatQuantity,
+  formatSignificant,
+  type Quantity,
+  unitOf,
+} from './record/units';
+export { warningsOf } from './record/warnings';
+export type { WorkingSymbol } from './record/workings/symbols';
+export type { Working, WorkingConstant, WorkingLine, WorkingValue } from './record/workings/working';
