@@ -9,13 +9,14 @@ interface Sketch {
   readonly name: string;
   readonly notes: string;
   readonly body?: Candidate['body'];
+  readonly gravitySet?: Candidate['gravitySet'];
   readonly entry: Partial<Omit<OrbitEntry, 'texts'>>;
   readonly texts: Partial<Record<FieldId, string>>;
 }
 
-function candidateFrom({ id, name, notes, body = 'earth', entry, texts }: Sketch): Candidate {
+function candidateFrom({ id, name, notes, body = 'earth', gravitySet = 'EGM2008', entry, texts }: Sketch): Candidate {
   const blank = blankCandidate({ id, name });
-  return { ...blank, notes, body, entry: { ...blank.entry, ...entry, texts: fieldTexts(texts) } };
+  return { ...blank, notes, body, gravitySet, entry: { ...blank.entry, ...entry, texts: fieldTexts(texts) } };
 }
 
 const summerPass: Sketch = {
@@ -74,12 +75,13 @@ const buoyCollector: Sketch = {
   name: 'Skerry D, buoy collector',
   notes:
     'Collects the short messages of drifting ice buoys, from an orbit that passes over the coast at every hour in turn. Entered as the two lines that tracking would send.',
+  gravitySet: 'WGS72',
   entry: { form: 'twoLine', frame: 'teme' },
   texts: {
     twoLine: [
       'SKERRY D',
       '1 99901U 28901A   28092.25000000  .00000214  00000-0  48210-4 0  9992',
-      '2 99901  63.0124 118.4021 0011873  84.3107 275.9250 14.33512876003212',
+      '2 99901  74.0124 118.4021 0011873  84.3107 275.9250 14.33512876003214',
     ].join('\n'),
   },
 };
