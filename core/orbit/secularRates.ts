@@ -60,28 +60,20 @@ function secondOrder(body: Body, mean: MeanElements): SecularRates {
   const gamma2 = 0.5 * (body.zonals[2] ?? 0) * ratio2;
   const gamma4 = -0.375 * (body.zonals[4] ?? 0) * ratio2 * ratio2;
   const square = gamma2 * gamma2;
+  // Brouwer's brackets beside γ2'², as polynomials in θ².
+  const node = -5 + 12 * eta + 9 * eta2 + (-35 - 36 * eta - 5 * eta2) * theta2;
+  const perigee0 = -35 + 24 * eta + 25 * eta2;
+  const perigee = perigee0 + (90 - 192 * eta - 126 * eta2) * theta2 + (385 + 360 * eta + 45 * eta2) * theta4;
+  const anomaly0 = -15 + 16 * eta + 25 * eta2;
+  const anomaly = anomaly0 + (30 - 96 * eta - 90 * eta2) * theta2 + (105 + 144 * eta + 25 * eta2) * theta4;
+  // And those beside γ4'.
+  const node4 = (5 - 3 * eta2) * (3 - 7 * theta2);
+  const perigee4 = 21 - 9 * eta2 + (-270 + 126 * eta2) * theta2 + (385 - 189 * eta2) * theta4;
+  const anomaly4 = e2 * (3 - 30 * theta2 + 35 * theta4);
   return {
-    nodeRadPerS:
-      n *
-      theta *
-      (-3 * gamma2 +
-        0.375 * square * (-5 + 12 * eta + 9 * eta2 + (-35 - 36 * eta - 5 * eta2) * theta2) +
-        1.25 * gamma4 * (5 - 3 * eta2) * (3 - 7 * theta2)),
-    perigeeRadPerS:
-      n *
-      (1.5 * gamma2 * (5 * theta2 - 1) +
-        0.09375 *
-          square *
-          (-35 + 24 * eta + 25 * eta2 + (90 - 192 * eta - 126 * eta2) * theta2 + (385 + 360 * eta + 45 * eta2) * theta4) +
-        0.3125 * gamma4 * (21 - 9 * eta2 + (-270 + 126 * eta2) * theta2 + (385 - 189 * eta2) * theta4)),
+    nodeRadPerS: n * theta * (-3 * gamma2 + 0.375 * square * node + 1.25 * gamma4 * node4),
+    perigeeRadPerS: n * (1.5 * gamma2 * (5 * theta2 - 1) + 0.09375 * square * perigee + 0.3125 * gamma4 * perigee4),
     meanAnomalyRadPerS:
-      n *
-      (1 +
-        eta *
-          (1.5 * gamma2 * (3 * theta2 - 1) +
-            0.09375 *
-              square *
-              (-15 + 16 * eta + 25 * eta2 + (30 - 96 * eta - 90 * eta2) * theta2 + (105 + 144 * eta + 25 * eta2) * theta4) +
-            0.9375 * gamma4 * e2 * (3 - 30 * theta2 + 35 * theta4))),
+      n * (1 + eta * (1.5 * gamma2 * (3 * theta2 - 1) + 0.09375 * square * anomaly + 0.9375 * gamma4 * anomaly4)),
   };
 }
