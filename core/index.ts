@@ -9,6 +9,8 @@ export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from
 export { meanSiderealTimeRad } from './bodies/siderealTime';
 export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
 export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
+export { type ClosedFormDrift, closedFormDrift, type DriftLines } from './mission/closedFormDrift';
+export { degPerRad, radPerDeg, secondsPerDay, twoPi, wrapPi, wrapTwoPi } from './numerics/angles';
 export type { KeplerianElements, MeanElements, OsculatingElements, StateVector, Theory } from './orbit/elements';
 export {
   elementsFromMeanOfDate,
@@ -32,6 +34,7 @@ export {
   tryMeanFromState,
 } from './orbit/meanState';
 export { type Periods, periods } from './orbit/periods';
+export { type RateCurves, ratesOverInclination } from './orbit/rateCurves';
 export { type SecularRates, secularRates } from './orbit/secularRates';
 export { elementsFromState, stateFromElements } from './orbit/state';
 export { blankCandidate, fieldTexts } from './record/blankCandidate';
@@ -54,8 +57,10 @@ export {
 } from './record/candidate';
 export { type CandidateError, lengthCaps, type ParsedCandidate, parseCandidate } from './record/candidateSchema';
 export { canonicalText } from './record/canonicalText';
+export { apsisName, driftHeadline, firstOrderSentence } from './record/driftHeadline';
 export { type EntryTags, type EntryTexts, entryFromOrbit } from './record/entryFromOrbit';
 export { fingerprint, fingerprintAlphabet, fingerprintLine } from './record/fingerprint';
+export { kmPerLengthUnit } from './record/entry/shape';
 export { readStateText, type StateTextResult } from './record/formats/stateText';
 export { parseTle, type TwoLineElements, type TwoLineResult } from './record/formats/twoLine';
 export type { TwoLineError } from './record/formats/twoLineFields';
@@ -86,6 +91,6 @@ export {
   type Quantity,
   unitOf,
 } from './record/units';
-export { warningsOf } from './record/warnings';
+export { smallEccentricity, warningsOf } from './record/warnings';
 export type { WorkingSymbol } from './record/workings/symbols';
 export type { Working, WorkingConstant, WorkingLine, WorkingValue } from './record/workings/working';

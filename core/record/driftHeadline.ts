@@ -1,0 +1,82 @@
+/**
+ * The answer of the place Drift, in one sentence of words and numbers. It speaks of rates now: the
+ * closed form knows nothing of what Sun, Moon and drag make of them over a mission.
+ */
+import type { Body } from '../bodies/body';
+import { secondsPerDay } from '../numerics/angles';
+import type { Theory } from '../orbit/elements';
+import { localTimeDriftSPerS } from '../orbit/localTime';
+import { secularRates } from '../orbit/secularRates';
+import type { HeadlineSpan } from './headline';
+import type { ResolvedOrbit } from './resolved';
+import { formatNumber, unitOf } from './units';
+import { smallEccentricity } from './warnings';
+
+export type RateUnitId = 'degPerDay' | 'degPerYear';
+
+const yearDays = 365.25;
+
+/** Faster than a turn of the clock in so many days, local time is said a day, with the time of a turn. */
+const slowTurnDays = 3 * yearDays;
+
+/** What the point nearest to the body is called. */
+export const apsisName = (body: Pick<Body, 'id'>): string => (body.id === 'earth' ? 'perigee' : 'periapsis');
+
+/** Rates now, second order, of node, perigee and local time. */
+export function driftHeadline(orbit: ResolvedOrbit, rateUnit: RateUnitId): HeadlineSpan[] {
+  const rates = ratesIn(orbit, 'second', rateUnit);
+  const isRound = orbit.mean.eccentricity < smallEccentricity;
+  return [
+    { text: 'Node', mark: 'node', strong: true },
+    { text: ' moves ' },
+    { text: `${rates.node} ${rates.per}`, mark: 'node', strong: true },
+    { text: '; ' },
+    { text: apsisName(orbit.body), mark: 'perigee', strong: true },
+    { text: ' ' },
+    { text: `${rates.perigee} ${rates.per}`, mark: 'perigee', strong: true },
+    { text: isRound ? ', which means little on so round an orbit. ' : '. ' },
+    ...localTimeSpans(orbit),
+  ];
+}
+
+/** What first order alone would say, beside the headline's second order. */
+export function firstOrderSentence(orbit: ResolvedOrbit, rateUnit: RateUnitId): string {
+  const { node, perigee, per } = ratesIn(orbit, 'first', rateUnit);
+  const perDay = localTimePerDayMin(orbit, 'first');
+  const localTime = perDay === null ? '' : `, local time ${localTimeText(perDay)}`;
+  return `Rates now, second order. First order alone says node ${node}, ${apsisName(orbit.body)} ${perigee} ${per}${localTime}.`;
+}
+
+function ratesIn(orbit: ResolvedOrbit, theory: Theory, rateUnit: RateUnitId) {
+  const { nodeRadPerS, perigeeRadPerS } = secularRates(orbit.body, orbit.mean, theory);
+  const isPerYear = rateUnit === 'degPerYear';
+  const { perCore } = unitOf('angleRate', isPerYear ? 'deg/yr' : 'deg/day');
+  const text = (radPerS: number) => `${formatNumber(radPerS * perCore, { digits: isPerYear ? 2 : 4, plus: true })}°`;
+  return { node: text(nodeRadPerS), perigee: text(perigeeRadPerS), per: isPerYear ? 'a year' : 'a day' };
+}
+
+function localTimePerDayMin(orbit: ResolvedOrbit, theory: Theory): number | null {
+  const drift = localTimeDriftSPerS(secularRates(orbit.body, orbit.mean, theory).nodeRadPerS, orbit.body);
+  return drift === null ? null : (drift * secondsPerDay) / 60;
+}
+
+const turnMin = 24 * 60;
+
+function localTimeText(perDayMin: number): string {
+  return turnMin / Math.abs(perDayMin) < slowTurnDays
+    ? `${formatNumber(perDayMin, { digits: 2, plus: true })} min a day`
+    : `${formatNumber(perDayMin * yearDays, { digits: 1, plus: true })} min a year`;
+}
+
+function localTimeSpans(orbit: ResolvedOrbit): HeadlineSpan[] {
+  const perDayMin = localTimePerDayMin(orbit, 'second');
+  if (perDayMin === null) return [{ text: `Local time needs the year and the spin of ${orbit.body.name}.` }];
+  const turnDays = turnMin / Math.abs(perDayMin);
+  const turn = `, once round the clock in ${formatNumber(turnDays, { digits: 1 })} days.`;
+  return [
+    { text: 'Local time', mark: 'node', strong: true },
+    { text: ' drifts ' },
+    { text: localTimeText(perDayMin), mark: 'node', strong: true },
+    { text: turnDays < slowTurnDays ? turn : ' at today’s rate.' },
+  ];
+}

@@ -1,0 +1,91 @@
+/** The closed form's lines in units a reader can hold: minutes or hours, degrees or turns. Pure. */
+import { type ClosedFormDrift, formatNumber } from '../../core/index';
+
+export type ChangeId = 'localTime' | 'node' | 'perigee';
+
+export interface ChangeUnit {
+  readonly perCore: number;
+  /** Set right after the number. */
+  readonly symbol: string;
+  /** Written in the title of the axis. */
+  readonly name: string;
+}
+
+export interface Change {
+  readonly id: ChangeId;
+  readonly title: string;
+  readonly unit: ChangeUnit;
+  /** Digits after the point that show the difference of the two orders to about three figures. */
+  readonly digits: number;
+  readonly first: Float64Array;
+  readonly second: Float64Array;
+}
+
+const thinSpace = '\u2009';
+export const degrees: ChangeUnit = { perCore: 180 / Math.PI, symbol: '°', name: 'degrees' };
+const turns: ChangeUnit = { perCore: 1 / (2 * Math.PI), symbol: `${thinSpace}turns`, name: 'turns' };
+export const minutes: ChangeUnit = { perCore: 1 / 60, symbol: `${thinSpace}min`, name: 'minutes' };
+const hours: ChangeUnit = { perCore: 1 / 3600, symbol: `${thinSpace}h`, name: 'hours' };
+const clockDays: ChangeUnit = { perCore: 1 / 86_400, symbol: `${thinSpace}d`, name: 'days of 24 h' };
+
+/** Degrees up to ten turns. */
+export const angleUnit = (largestRad: number): ChangeUnit => (largestRad > 20 * Math.PI ? turns : degrees);
+
+/** Minutes up to five hours, hours up to four days, then days. */
+export function localTimeUnit(largestS: number): ChangeUnit {
+  if (largestS <= 5 * 3600) return minutes;
+  return largestS <= 4 * 86_400 ? hours : clockDays;
+}
+
+/** Local time where the body has one, node, perigee (by the name it has at the body): in the order they are drawn. */
+export function changesOf({ first, second }: ClosedFormDrift, apsis: string): Change[] {
+  const change = (id: ChangeId, title: string, unitFor: (largest: number) => ChangeUnit, lines: OrderedLines) => {
+    const unit = unitFor(Math.max(largestOf(lines.first), largestOf(lines.second)));
+    const scaled = (line: Float64Array) => line.map((value) => value * unit.perCore);
+    const drawn = { first: scaled(lines.first), second: scaled(lines.second) };
+    return { id, title, unit, ...drawn, digits: digitsFor(drawn) };
+  };
+  const changes = [
+    change('node', 'Node', angleUnit, { first: first.nodeRad, second: second.nodeRad }),
+    change('perigee', apsis.charAt(0).toUpperCase() + apsis.slice(1), angleUnit, {
+      first: first.perigeeRad,
+      second: second.perigeeRad,
+    }),
+  ];
+  if (first.localTimeS === null || second.localTimeS === null) return changes;
+  const lines = { first: first.localTimeS, second: second.localTimeS };
+  return [change('localTime', 'Local time', localTimeUnit, lines), ...changes];
+}
+
+interface OrderedLines {
+  readonly first: Float64Array;
+  readonly second: Float64Array;
+}
+
+/** Lines start at zero and are straight: the end is the largest. */
+const largestOf = (line: Float64Array): number => Math.abs(line.at(-1) ?? 0);
+
+function digitsFor({ first, second }: OrderedLines): number {
+  const difference = Math.abs((second.at(-1) ?? 0) - (first.at(-1) ?? 0));
+  const size = difference > 1e-9 ? difference : Math.max(largestOf(second) / 100, 1e-3);
+  return Math.max(1, Math.min(6, 2 - Math.floor(Math.log10(size))));
+}
+
+/** Second order, first order and second minus first at a sample, written with sign and unit. */
+export function textsAt({ first, second, unit, digits }: Change, sample: number) {
+  const write = (value: number) => formatNumber(value, { digits, plus: true });
+  const one = first[sample] ?? 0;
+  const two = second[sample] ?? 0;
+  return {
+    first: write(one) + unit.symbol,
+    second: write(two) + unit.symbol,
+    difference: write(two - one) + unit.symbol,
+    apart: formatNumber(Math.abs(two - one), { digits }) + unit.symbol,
+  };
+}
+
+/** “After 5 years: +1805.12° second order, +1802.30° first order; they differ by 2.82°.” */
+export function changeCaption(change: Change, spanText: string): string {
+  const { first, second, apart } = textsAt(change, change.second.length - 1);
+  return `After ${spanText}: ${second} second order, ${first} first order; they differ by ${apart}.`;
+}

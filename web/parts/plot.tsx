@@ -1,0 +1,101 @@
+/**
+ * One plot of a stack: a canvas for lines and axes, and above it the cursor, the marks and labels at
+ * line ends. It is a slider for keyboard and screen reader: its value is the moment of the cursor.
+ */
+import { useRef } from 'preact/hooks';
+import { sampleAfterKey } from './plotCursor';
+import { spreadLabels } from './plotLabels';
+import type { PlotLine, PlotModel } from './plotModel';
+import { heightIn } from './plotScale';
+import { useCursorDrag } from './useCursorDrag';
+import { useHeights } from './useHeights';
+import { usePlotCanvas } from './usePlotCanvas';
+
+export interface PlotProps {
+  readonly name: string;
+  readonly model: PlotModel;
+  /** Index of the sample that the cursor stands on. */
+  readonly sample: number;
+  /** The cursor's moment, and the values there, in words. */
+  readonly momentText: string;
+  readonly valueText: string;
+  readonly onSample: (sample: number) => void;
+}
+
+export function Plot({ name, model, sample, momentText, valueText, onSample }: PlotProps) {
+  const host = useRef<HTMLDivElement>(null);
+  const area = useRef<HTMLDivElement>(null);
+  const failed = usePlotCanvas({ host, area }, model);
+  const last = model.days.length - 1;
+  const drag = useCursorDrag(last, onSample);
+  const onKeyDown = (event: KeyboardEvent) => {
+    const next = event.altKey || event.ctrlKey || event.metaKey ? null : sampleAfterKey(event.key, sample, last);
+    if (next === null) return;
+    event.preventDefault();
+    onSample(next);
+  };
+  if (failed) return <p class="plot-failed">This browser cannot draw the plot. The tables hold the same values.</p>;
+  return (
+    <div class={`plot${model.hasTimeLabels ? ' has-time' : ''}`}>
+      <div class="plot-canvas" ref={host} aria-hidden="true" />
+      <div
+        class="plot-area"
+        ref={area}
+        role="slider"
+        tabIndex={0}
+        aria-label={`${name}: cursor`}
+        aria-valuemin={0}
+        aria-valuemax={last}
+        aria-valuenow={sample}
+        aria-valuetext={`${momentText}: ${valueText}`}
+        onKeyDown={onKeyDown}
+        {...drag}
+      >
+        <div class="plot-zero" style={{ bottom: percent(heightIn(model.range, 0)) }} />
+        <Cursor model={model} sample={sample} momentText={momentText} />
+        <LineEnds model={model} />
+      </div>
+    </div>
+  );
+}
+
+const percent = (part: number): string => `${part * 100}%`;
+const valueAt = (line: PlotLine, sample: number): number => line.values[sample] ?? 0;
+
+function Cursor({ model, sample, momentText }: Pick<PlotProps, 'model' | 'sample' | 'momentText'>) {
+  const left = percent(sample / (model.days.length - 1));
+  return (
+    <div class="plot-cursor" style={{ left }}>
+      {model.lines.map((line) => (
+        <i
+          key={line.id}
+          class={`plot-dot mark-${line.hue} is-${line.pattern}`}
+          style={{ bottom: percent(heightIn(model.range, valueAt(line, sample))) }}
+        />
+      ))}
+      {model.hasTimeLabels && <span class="plot-moment">{momentText}</span>}
+    </div>
+  );
+}
+
+/** Marks where the lines end, and beside them what each line is. */
+function LineEnds({ model }: { readonly model: PlotModel }) {
+  const ends = useRef<HTMLDivElement>(null);
+  const { heightPx, linePx } = useHeights(ends);
+  const parts = model.lines.map((line) => heightIn(model.range, valueAt(line, line.values.length - 1)));
+  const wantedPx = parts.map((part) => (1 - part) * heightPx);
+  const placedPx = spreadLabels(wantedPx, linePx, heightPx);
+  return (
+    <div class="plot-ends" ref={ends} aria-hidden="true">
+      {model.lines.map((line, index) => (
+        <span key={line.id} class={`mark-${line.hue}`}>
+          <i class={`plot-mark is-${line.mark} is-${line.pattern}`} style={{ bottom: percent(parts[index] ?? 0) }} />
+          <span class="plot-label" style={{ top: `${placedPx[index] ?? 0}px` }}>
+            {line.label[0]}
+            <span class="plot-label-rest">{line.label[1]}</span>
+          </span>
+        </span>
+      ))}
+    </div>
+  );
+}
