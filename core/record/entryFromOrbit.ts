@@ -4,7 +4,7 @@
  */
 import { isoFromJulianDate } from '../bodies/julianDate';
 import { degPerRad, wrapTwoPi } from '../numerics/angles';
-import type { KeplerianElements } from '../orbit/elements';
+import type { KeplerianElements, StateVector } from '../orbit/elements';
 import { elementsFromMeanOfDate, stateFromMeanOfDate } from '../orbit/frames';
 import { localTimeOfNodeH } from '../orbit/localTime';
 import { stateFromMean } from '../orbit/meanState';
@@ -27,10 +27,13 @@ export function entryFromOrbit(orbit: ResolvedOrbit, form: EntryForm, tags: Entr
   const refusal = refusalOf(orbit, form, tags);
   if (refusal) return refusal;
   const epoch: Partial<Record<FieldId, string>> = orbit.epochJd === null ? {} : { epoch: epochText(orbit.epochJd) };
-  if (form === 'state') return { ok: true, texts: { ...epoch, ...stateTexts(orbit, tags) } };
-  const elements = elementsAsTyped(orbit, tags);
-  const shape = form === 'altitudes' ? altitudeTexts(orbit, elements, tags) : shapeTexts(elements, tags);
-  return { ok: true, texts: { ...epoch, ...shape, ...orientationTexts(orbit, elements, tags) } };
+  const state = form === 'state' || tags.elementsAre === 'osculating' ? osculatingState(orbit) : null;
+  if (form === 'state') return state ? { ok: true, texts: { ...epoch, ...stateTexts(orbit, state, tags) } } : noState;
+  const elements = tags.elementsAre === 'mean' ? orbit.mean : state && osculatingElements(orbit, state);
+  if (elements === null) return noState;
+  const typed = inTypedFrame(orbit, elements, tags);
+  const shape = form === 'altitudes' ? altitudeTexts(orbit, typed, tags) : shapeTexts(typed, tags);
+  return { ok: true, texts: { ...epoch, ...shape, ...orientationTexts(orbit, typed, tags) } };
 }
 
 function refusalOf(orbit: ResolvedOrbit, form: EntryForm, tags: EntryTags): EntryTexts | null {
@@ -65,8 +68,18 @@ function epochText(jd: number): string {
   return fraction === '' ? whole : whole.replace('Z', `.${fraction}Z`);
 }
 
-function stateTexts(orbit: ResolvedOrbit, tags: EntryTags): Partial<Record<FieldId, string>> {
-  const ofDate = stateFromMean(orbit.body, orbit.mean);
+const noState = refuse('cannotWrite', 'J2 is too large a correction on this orbit for it to have a state.');
+
+/** Null where the short-period terms are so large that no ellipse belongs to the mean elements. */
+function osculatingState({ body, mean }: ResolvedOrbit): StateVector | null {
+  try {
+    return stateFromMean(body, mean);
+  } catch {
+    return null;
+  }
+}
+
+function stateTexts(orbit: ResolvedOrbit, ofDate: StateVector, tags: EntryTags): Partial<Record<FieldId, string>> {
   const { frame } = tags;
   const state = orbit.epochJd === null ? ofDate : stateFromMeanOfDate(ofDate, { frame, epochJd: orbit.epochJd });
   const [factor, shift] = tags.stateUnit === 'm' ? [1000, 3] : [1, 0];
@@ -76,17 +89,15 @@ function stateTexts(orbit: ResolvedOrbit, tags: EntryTags): Partial<Record<Field
   );
 }
 
-function elementsAsTyped(orbit: ResolvedOrbit, tags: EntryTags): KeplerianElements {
-  const elements = tags.elementsAre === 'mean' ? orbit.mean : osculating(orbit);
-  const frame = tags.nodeForm === 'raan' ? tags.frame : 'meanOfDate';
-  if (orbit.epochJd === null || frame === 'earthFixed') return elements;
-  return elementsFromMeanOfDate(elements, frame, orbit.epochJd);
+function osculatingElements({ body }: ResolvedOrbit, state: StateVector): KeplerianElements | null {
+  const result = elementsFromState(body.muKm3PerS2, state);
+  return result.ok ? result.elements : null;
 }
 
-function osculating({ body, mean }: ResolvedOrbit): KeplerianElements {
-  const result = elementsFromState(body.muKm3PerS2, stateFromMean(body, mean));
-  if (!result.ok) throw new Error(`Expected an ellipse from mean elements, got: ${result.message}`);
-  return result.elements;
+function inTypedFrame({ epochJd }: ResolvedOrbit, elements: KeplerianElements, tags: EntryTags): KeplerianElements {
+  const frame = tags.nodeForm === 'raan' ? tags.frame : 'meanOfDate';
+  if (epochJd === null || frame === 'earthFixed') return elements;
+  return elementsFromMeanOfDate(elements, frame, epochJd);
 }
 
 function altitudeTexts({ body }: ResolvedOrbit, elements: KeplerianElements, tags: EntryTags) {

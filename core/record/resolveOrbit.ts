@@ -57,7 +57,7 @@ function fromElements(
   epochJd: EpochReading,
   reader: FieldReader,
 ): MeanElements | null {
-  const shape = entry.form === 'altitudes' ? readAltitudes(entry, body, reader) : readShape(entry, reader);
+  const shape = entry.form === 'altitudes' ? readAltitudes(entry, body, reader) : readShape(entry, body, reader);
   const orientation = readOrientation(entry, body, epochJd, reader);
   if (shape === null || orientation === null || body === null || epochJd === undefined) return null;
   const elements = ofDate({ ...shape, ...orientation }, entry, epochJd);

@@ -1,22 +1,26 @@
+import type { Body } from '../../bodies/body';
 import type { OrbitEntry } from '../candidate';
 import type { FieldReader } from '../readFields';
 import { plainNumber } from './plainNumber';
 import { kmPerLengthUnit, largestRadiusKm, type Shape } from './shape';
 
+/** Deeper inside the body than this share of its radius every formula loses its meaning. */
+const leastShare = 0.01;
+
 /** Semi-major axis and eccentricity as typed. */
-export function readShape(entry: OrbitEntry, reader: FieldReader): Shape | null {
-  const semiMajorAxisKm = readSemiMajorAxis(entry, reader);
+export function readShape(entry: OrbitEntry, body: Body | null, reader: FieldReader): Shape | null {
+  const semiMajorAxisKm = readSemiMajorAxis(entry, body, reader);
   const eccentricity = readEccentricity(reader);
   return semiMajorAxisKm === null || eccentricity === null ? null : { semiMajorAxisKm, eccentricity };
 }
 
-function readSemiMajorAxis(entry: OrbitEntry, reader: FieldReader): number | null {
+function readSemiMajorAxis(entry: OrbitEntry, body: Body | null, reader: FieldReader): number | null {
   const unit = entry.lengthUnit;
   const expected = `a length above 0 in ${unit}, from the centre of the body, such as ${unit === 'km' ? '6928' : '3741'}`;
   const typed = reader.number({ field: 'semiMajorAxis', label: 'Semi-major axis', expected });
   if (typed === null) return null;
   const km = typed * kmPerLengthUnit(entry);
-  if (km > 0 && km <= largestRadiusKm) return km;
+  if (km > leastShare * (body?.radiusKm ?? 0) && km <= largestRadiusKm) return km;
   return reader.fail('semiMajorAxis', `Semi-major axis is ${plainNumber(typed)} ${unit}; expected ${expected}.`);
 }
 

@@ -4,7 +4,7 @@ import type { MeanElements } from '../../orbit/elements';
 import type { ReadingPoint, Sensitivities } from './reading';
 
 /** Steps wide against rounding and narrow against curvature. */
-const stepKm = 0.05;
+const stepShare = 1e-5;
 const stepInclinationRad = 1e-3 * radPerDeg;
 const stepEccentricity = 1e-5;
 
@@ -13,6 +13,7 @@ export function sensitivitiesOf(point: ReadingPoint, evaluate: (point: ReadingPo
   const at = (change: Partial<MeanElements>) => evaluate({ ...point, mean: { ...point.mean, ...change } });
   const inclination = sides(inclinationRad, stepInclinationRad, 0, Math.PI);
   const shape = sides(eccentricity, stepEccentricity, 0, 1 - stepEccentricity);
+  const stepKm = stepShare * semiMajorAxisKm;
   const perKm = slope([semiMajorAxisKm - stepKm, semiMajorAxisKm + stepKm], (value) => at({ semiMajorAxisKm: value }));
   return {
     perKm,
