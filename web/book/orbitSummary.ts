@@ -1,0 +1,60 @@
+/** The one line by which an orbit is known in a list. */
+import { type Candidate, fingerprint, formatNumber, resolveOrbit, unitOf } from '../../core/index';
+
+export interface SummarisedOrbit {
+  readonly kind: 'orbit';
+  /** Mean altitudes above the equatorial radius. */
+  readonly perigeeAltitudeKm: number;
+  readonly apogeeAltitudeKm: number;
+  readonly inclinationRad: number;
+  readonly fingerprint: string;
+  readonly bodyName: string;
+  readonly isEarth: boolean;
+}
+/** The entry does not come to an orbit yet; the message is that of its first field in the way. */
+export interface UnsettledOrbit {
+  readonly kind: 'unsettled';
+  readonly message: string;
+}
+export type OrbitSummary = SummarisedOrbit | UnsettledOrbit;
+
+export function orbitSummary(candidate: Candidate): OrbitSummary {
+  const resolution = resolveOrbit(candidate);
+  if (!resolution.ok) {
+    const [first] = Object.values(resolution.errors);
+    return { kind: 'unsettled', message: first?.message ?? 'The entry does not come to an orbit yet.' };
+  }
+  const { body, mean } = resolution.orbit;
+  return {
+    kind: 'orbit',
+    perigeeAltitudeKm: mean.semiMajorAxisKm * (1 - mean.eccentricity) - body.equatorialRadiusKm,
+    apogeeAltitudeKm: mean.semiMajorAxisKm * (1 + mean.eccentricity) - body.equatorialRadiusKm,
+    inclinationRad: mean.inclinationRad,
+    fingerprint: fingerprint(resolution.orbit),
+    bodyName: body.name,
+    isEarth: candidate.body === 'earth',
+  };
+}
+
+/** Such as `561.0 × 575.0 km, 97.680°`, with the body in front where it is not the Earth. */
+export function orbitLine(summary: OrbitSummary, lengthUnit: 'km' | 'NM'): string {
+  if (summary.kind === 'unsettled') return 'No orbit yet';
+  const { symbol, perCore } = unitOf('length', lengthUnit);
+  const altitude = (km: number) => formatNumber(km * perCore, { digits: 1 });
+  const inclination = formatNumber((summary.inclinationRad * 180) / Math.PI, { digits: 3 });
+  const numbers = `${altitude(summary.perigeeAltitudeKm)} × ${altitude(summary.apogeeAltitudeKm)} ${symbol}, ${inclination}°`;
+  return summary.isEarth ? numbers : `${summary.bodyName}: ${numbers}`;
+}
+
+export const meanAltitudeKm = (orbit: SummarisedOrbit): number =>
+  (orbit.perigeeAltitudeKm + orbit.apogeeAltitudeKm) / 2;
+
+/** Keeps the summaries of saved revisions, which never change, from one reading of the book to the next. */
+export function createSummaryKeeper(): (key: string, candidate: Candidate) => OrbitSummary {
+  const kept = new Map<string, OrbitSummary>();
+  return (key, candidate) => {
+    const found = kept.get(key) ?? orbitSummary(candidate);
+    kept.set(key, found);
+    return found;
+  };
+}
