@@ -9,7 +9,7 @@ export const daysPerJulianCentury = 36_525;
  *
  * Source: Espenak and Meeus, Five Millennium Canon of Solar Eclipses, NASA/TP-2006-214141,
  * section 2.7, polynomial expressions for 1941 to 2150. It predicts: the true value in the 2020s
- * is some 5 s lower, which moves the Sun by 6e-5°. Before 1941 and after 2150 the long-term parabola.
+ * is some 6 s lower, which moves the Sun by 7e-5°. Before 1941 and after 2150 the long-term parabola.
  */
 export function deltaTSeconds(jdUtc: number): number {
   const year = 2000 + (jdUtc - 2_451_544.5) / 365.25;
