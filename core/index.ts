@@ -58,9 +58,9 @@ export {
 export { type CandidateError, lengthCaps, type ParsedCandidate, parseCandidate } from './record/candidateSchema';
 export { canonicalText } from './record/canonicalText';
 export { apsisName, driftHeadline, firstOrderSentence } from './record/driftHeadline';
+export { kmPerLengthUnit } from './record/entry/shape';
 export { type EntryTags, type EntryTexts, entryFromOrbit } from './record/entryFromOrbit';
 export { fingerprint, fingerprintAlphabet, fingerprintLine } from './record/fingerprint';
-export { kmPerLengthUnit } from './record/entry/shape';
 export { readStateText, type StateTextResult } from './record/formats/stateText';
 export { parseTle, type TwoLineElements, type TwoLineResult } from './record/formats/twoLine';
 export type { TwoLineError } from './record/formats/twoLineFields';

@@ -26,7 +26,7 @@ const astronomicalUnitKm = 149_597_870.7;
  * Apparent Sun. Source: Meeus, Astronomical Algorithms, 2nd edition, chapter 25, "Low accuracy",
  * eq. 25.2 to 25.5 and the terms of the centre; obliquity eq. 22.2. Worst error found against a
  * full theory, some 90 000 dates from 1950: 0.0098° to 2060, 0.0106° to 2100. The Astronomical
- * Almanac's shorter formulas reach 0.0112° and 0.0134°: they hold the eccentricity fixed.
+ * Almanac's shorter formulas reach 0.0112° and 0.0134° on the same dates.
  */
 export function sunPosition(jdUtc: number): SunPosition {
   const centuries = terrestrialCenturies(jdUtc);
