@@ -1,0 +1,39 @@
+/** `npm run bench`: times as a table, and an exit code that says whether the bounds held. */
+import { measure, type Timing } from './measure';
+import { taskGroups } from './tasks';
+
+/** `name` may take at most `times` as long as `yardstick`: one call, its checks and its result object included. */
+const bounds = [
+  { name: 'secularRates, first order', yardstick: 'first order, inlined', times: 2 },
+  { name: 'secularRates, second order', yardstick: 'second order, inlined', times: 2 },
+] as const;
+
+/** What every row is also expressed in. */
+const unit = 'first order, inlined';
+
+function nsOf(timings: readonly Timing[], name: string): number {
+  const found = timings.find((timing) => timing.name === name);
+  if (!found) throw new Error(`nothing measured under the name ${name}`);
+  return found.nsPerCall;
+}
+
+function table(timings: readonly Timing[]): readonly string[] {
+  const unitNs = nsOf(timings, unit);
+  const rows = timings.map(({ name, nsPerCall }) => {
+    const multiple = nsPerCall / unitNs;
+    return [name, nsPerCall.toFixed(nsPerCall < 1000 ? 1 : 0), multiple.toFixed(multiple < 100 ? 2 : 0)] as const;
+  });
+  const line = ([name, ns, multiple]: readonly [string, string, string]) =>
+    `${name.padEnd(28)}${ns.padStart(12)}${multiple.padStart(28)}`;
+  return [line(['median of 15', 'ns a call', '× first order, inlined']), ...rows.map(line)];
+}
+
+const timings = taskGroups().flatMap((tasks) => measure(tasks, () => performance.now()));
+console.log(table(timings).join('\n'));
+console.log();
+for (const { name, yardstick, times } of bounds) {
+  const ratio = nsOf(timings, name) / nsOf(timings, yardstick);
+  const holds = ratio <= times;
+  console.log(`${holds ? 'holds ' : 'BROKEN'}  ${name}: ${ratio.toFixed(2)} × ${yardstick}, at most ${times}`);
+  if (!holds) process.exitCode = 1;
+}
