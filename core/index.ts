@@ -69,6 +69,7 @@ export { formulaText } from './record/formulaText';
 export { type HeadlineSpan, headlineOf } from './record/headline';
 export { type Migration, migrateCandidate } from './record/migrate';
 export { type NumberReading, type NumberResult, readNumber } from './record/numberText';
+export type { Doubt } from './record/readings/doubt';
 export type {
   Alternate,
   Reading,

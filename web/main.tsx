@@ -1,12 +1,25 @@
 import { render } from 'preact';
-import { version } from './version';
+import { App } from './app';
+import { createOffline } from './offline/offline';
+import { AppProvider } from './state/appContext';
+import { createAppState } from './state/appState';
+import { openStore } from './store/store';
+import './style/tokens.css';
+import './style/base.css';
+import './style/shell.css';
+import './style/narrow.css';
+import './parts/fields.css';
 
 const host = document.getElementById('app');
 if (!host) throw new Error('The page has no element with the id "app"');
+
+const newId = () => crypto.randomUUID();
+const store = await openStore({ clock: () => new Date(), newId });
+const offline = createOffline({ canReload: async () => (await store.draft.flush()) !== 'failed' });
+const app = await createAppState({ store, offline, page: window, newId });
 render(
-  <main>
-    <h1>Driftbook</h1>
-    <p>Version {version}</p>
-  </main>,
+  <AppProvider value={app}>
+    <App />
+  </AppProvider>,
   host,
 );

@@ -42,8 +42,11 @@ export function shortPeriodVariation(body: Body, mean: OrbitFrame): ShortPeriodV
   // e δl, and δ(l + g) with the division by e done by hand: (1 − η)/e = e/(1 + η).
   const eDeltaL = -0.25 * eta ** 3 * terms.scaled * bracket;
   const deltaLatitude =
-    0.25 * terms.scaled *
-    (((eta2 * e) / (1 + eta)) * bracket + 6 * (5 * theta * theta - 1) * centre + (3 - 5 * theta * theta) * latitudeSine);
+    0.25 *
+    terms.scaled *
+    (((eta2 * e) / (1 + eta)) * bracket +
+      6 * (5 * theta * theta - 1) * centre +
+      (3 - 5 * theta * theta) * latitudeSine);
   const deltaNode = -0.5 * terms.scaled * theta * (6 * centre - latitudeSine);
   const deltaInclination = 0.5 * terms.scaled * theta * sine * cosineSum(terms);
 

@@ -70,15 +70,16 @@ export function frameFromState(muKm3PerS2: number, state: StateVector): Elements
 
 function stateProblem(mu: number, r: number, v: number, momentum: number): ElementsResult<never> | null {
   if (!(Number.isFinite(r) && Number.isFinite(v))) return failure('notFinite', 'position and velocity must be finite');
-  if (r === 0 || v === 0) return failure('zero', `${r === 0 ? 'the position' : 'the velocity'} is zero: that is no orbit`);
+  if (r === 0 || v === 0)
+    return failure('zero', `${r === 0 ? 'the position' : 'the velocity'} is zero: that is no orbit`);
   if (momentum < rectilinearShare * r * v) {
     return failure('rectilinear', 'position and velocity point along one line: that is no orbit');
   }
-  const escape = Math.sqrt((2 * mu) / r);
-  if (v >= escape) {
+  const escapeKmPerS = Math.sqrt((2 * mu) / r);
+  if (v >= escapeKmPerS) {
     return failure(
       'hyperbolic',
-      `${v.toFixed(3)} km/s is at or above the escape speed ${escape.toFixed(3)} km/s at ${r.toFixed(1)} km: the orbit does not close`,
+      `${v.toFixed(3)} km/s is at or above the escape speed ${escapeKmPerS.toFixed(3)} km/s at ${r.toFixed(1)} km: the orbit does not close`,
     );
   }
   return null;

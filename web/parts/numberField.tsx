@@ -1,0 +1,157 @@
+/** One field of an entry: label, text, unit, steppers and, below, what is wrong with it in words. */
+import type { ComponentChildren } from 'preact';
+import { useId } from 'preact/hooks';
+import { type FieldError, lengthCaps } from '../../core/index';
+import { signTurned } from './stepping';
+import { useDragSteps } from './useDragSteps';
+import { useRepeat } from './useRepeat';
+
+export interface NumberFieldProps {
+  readonly label: string;
+  /** Stands in place of the label text where the label is itself a choice. */
+  readonly labelControl?: ComponentChildren;
+  readonly text: string;
+  readonly unit?: string;
+  readonly error?: FieldError | undefined;
+  readonly note?: string | undefined;
+  /** The text some steps on, or null where the text cannot be stepped. */
+  readonly step?: ((text: string, count: number) => string | null) | undefined;
+  readonly signed?: boolean;
+  readonly keyboard?: 'decimal' | 'text';
+  readonly placeholder?: string;
+  readonly readOnly?: boolean;
+  readonly onText: (text: string) => void;
+}
+
+export function NumberField(props: NumberFieldProps) {
+  const id = useId();
+  const { error, note } = props;
+  return (
+    <div class={`field${error ? ' has-error' : ''}`}>
+      <div class="field-row">
+        <FieldLabel id={id} {...props} />
+        <FieldInput id={id} {...props} />
+        {props.signed && <SignButton {...props} />}
+        {props.step && <Steppers {...props} />}
+      </div>
+      <div id={`${id}-says`} aria-live="polite">
+        {error && <FieldTrouble error={error} onText={props.onText} />}
+        {!error && note && <p class="field-note">{note}</p>}
+      </div>
+    </div>
+  );
+}
+
+type PartProps = NumberFieldProps & { readonly id: string };
+
+function FieldLabel({ id, label, labelControl, text, step, onText, readOnly }: PartProps) {
+  const drag = useDragSteps((count) => {
+    const next = readOnly ? null : step?.(text, count);
+    if (next !== null && next !== undefined) onText(next);
+  });
+  if (labelControl) return <div class="field-label">{labelControl}</div>;
+  return (
+    <label for={id} class={`field-label${step ? ' can-drag' : ''}`} {...(step ? drag : {})}>
+      {label}
+    </label>
+  );
+}
+
+function FieldInput({
+  id,
+  label,
+  labelControl,
+  text,
+  unit,
+  error,
+  step,
+  keyboard,
+  placeholder,
+  readOnly,
+  onText,
+}: PartProps) {
+  const onKeyDown = (event: KeyboardEvent) => {
+    const direction = { ArrowUp: 1, ArrowDown: -1 }[event.key];
+    if (direction === undefined || !step || readOnly) return;
+    event.preventDefault();
+    const next = step(text, event.shiftKey ? direction * 10 : direction);
+    if (next !== null) onText(next);
+  };
+  return (
+    <span class="field-value">
+      <input
+        id={id}
+        class="field-input"
+        inputMode={keyboard ?? 'decimal'}
+        autocomplete="off"
+        autocapitalize="off"
+        maxLength={lengthCaps.text}
+        spellcheck={false}
+        enterkeyhint="done"
+        aria-label={labelControl ? label : undefined}
+        aria-invalid={error ? true : undefined}
+        aria-describedby={`${id}-says`}
+        placeholder={placeholder}
+        readOnly={readOnly}
+        value={text}
+        onInput={(event) => onText(event.currentTarget.value)}
+        onKeyDown={onKeyDown}
+      />
+      {unit && <span class="field-unit">{unit}</span>}
+    </span>
+  );
+}
+
+function SignButton({ label, text, readOnly, onText }: NumberFieldProps) {
+  return (
+    <button
+      type="button"
+      class="field-button sign"
+      disabled={readOnly}
+      aria-label={`Turn the sign of ${label}`}
+      // The field keeps the focus, so that the keypad stays.
+      onPointerDown={(event) => event.preventDefault()}
+      onClick={() => onText(signTurned(text))}
+    >
+      ±
+    </button>
+  );
+}
+
+function Steppers({ label, text, step, readOnly, onText }: NumberFieldProps) {
+  const stepBy = (count: number) => () => {
+    const next = step?.(text, count);
+    if (next !== null && next !== undefined) onText(next);
+  };
+  const down = useRepeat(stepBy(-1));
+  const up = useRepeat(stepBy(1));
+  return (
+    <>
+      <button type="button" class="field-button" disabled={readOnly} aria-label={`Less ${label}`} {...down}>
+        −
+      </button>
+      <button type="button" class="field-button" disabled={readOnly} aria-label={`More ${label}`} {...up}>
+        +
+      </button>
+    </>
+  );
+}
+
+export function FieldTrouble({
+  error,
+  onText,
+}: {
+  readonly error: FieldError;
+  readonly onText: (text: string) => void;
+}) {
+  return (
+    <div class="field-error">
+      <p>{error.message}</p>
+      {error.choices?.map((choice) => (
+        <button key={choice.text} type="button" onClick={() => onText(choice.text)}>
+          {choice.label}
+        </button>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,39 @@
+/** Stepping the number in a text: arrow keys, buttons and drags all go through here. */
+import { readNumber } from '../../core/index';
+
+const decimalsOf = (text: string): number => /[.,](\d+)\s*$/.exec(text)?.[1]?.length ?? 0;
+
+/** A comma is kept where it is the decimal mark of the text. */
+const usesComma = (text: string): boolean => text.includes(',') && !text.includes('.');
+
+/**
+ * The text one or more steps on, with as many decimals as the text or the step has; null where the text is no
+ * number. The text is the state, so that no step is lost to rounding.
+ */
+export function stepped(text: string, step: number, count: number): string | null {
+  const number = readNumber(text);
+  if (!number.ok) return null;
+  const decimals = Math.max(decimalsOf(text), decimalsOf(String(step)));
+  const next = (number.value + step * count).toFixed(decimals);
+  const plain = Number(next) === 0 ? next.replace('-', '') : next;
+  return usesComma(text) ? plain.replace('.', ',') : plain;
+}
+
+const clockPattern = /^\s*(\d{1,2}):?(\d{2})(?::(\d{2}))?\s*$/;
+
+/** The same for a local time of day, by minutes, wrapping at midnight. */
+export function steppedClock(text: string, minutes: number): string | null {
+  const parts = clockPattern.exec(text);
+  if (!parts) return null;
+  const [, hours = '0', minute = '0', second] = parts;
+  const total = (((Number(hours) * 60 + Number(minute) + minutes) % 1440) + 1440) % 1440;
+  const clock = [Math.floor(total / 60), total % 60].map((part) => String(part).padStart(2, '0'));
+  return [...clock, ...(second === undefined ? [] : [second])].join(':');
+}
+
+/** The text with its sign turned; tablet keypads lack a minus. */
+export function signTurned(text: string): string {
+  const plain = text.trim();
+  if (/^[-−]/.test(plain)) return plain.slice(1);
+  return `-${plain.replace(/^\+/, '')}`;
+}

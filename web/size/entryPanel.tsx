@@ -1,0 +1,187 @@
+/** The entry: in the form the user has, with the rarer fields folded away until they are needed. */
+import type { ComponentChildren } from 'preact';
+import { useEffect, useRef } from 'preact/hooks';
+import type { EntryForm, FieldId, InputFrame } from '../../core/index';
+import { Choice } from '../parts/choice';
+import { useApp } from '../state/appContext';
+import { switchForm, takePaste } from '../state/entryActions';
+import { BodyFields, bodySummary, Pick } from './bodyFields';
+import { EpochField, InclinationField, NodeField, PlaceFields, ShapeFields } from './shapeFields';
+import { StateFields, StateUnitChoice } from './stateFields';
+import { TwoLineField } from './twoLineField';
+
+const forms: readonly { readonly value: EntryForm; readonly label: string }[] = [
+  { value: 'altitudes', label: 'Altitudes' },
+  { value: 'elements', label: 'a and e' },
+  { value: 'state', label: 'State' },
+  { value: 'twoLine', label: 'Two-line' },
+];
+
+export function EntryPanel() {
+  const { document } = useApp();
+  const { form } = document.draft.value.entry;
+  return (
+    <section class="entry" aria-label="The orbit as you have it" onPasteCapture={usePaste()}>
+      <Choice
+        label="Form of the entry"
+        name="form"
+        options={forms}
+        value={form}
+        onChoose={(next) => switchForm(document, next)}
+      />
+      {form === 'twoLine' && <TwoLineField />}
+      {form === 'state' && <StateEntry />}
+      {(form === 'altitudes' || form === 'elements') && <ElementEntry />}
+      <Fold title="Body and constants" says={useBodySummary()} holds={bodyFieldIds}>
+        <BodyFields />
+      </Fold>
+    </section>
+  );
+}
+
+const bodyFieldIds: readonly FieldId[] = [
+  'bodyMu',
+  'bodyRadius',
+  'bodyJ2',
+  'bodyJ3',
+  'bodyJ4',
+  'bodyFlattening',
+  'bodyDay',
+  'bodyYear',
+];
+
+function useBodySummary(): string {
+  const { body, gravitySet } = useApp().document.draft.value;
+  return bodySummary(body, gravitySet);
+}
+
+/** A paste that is a whole orbit is taken as one, wherever the finger was. */
+function usePaste() {
+  const { document, announcer, store } = useApp();
+  return (event: ClipboardEvent) => {
+    if (store.tabs.editorElsewhere.value) return;
+    const before = document.draft.value;
+    const outcome = takePaste(document, event.clipboardData?.getData('text') ?? '');
+    if (outcome === 'notOurs') return;
+    event.preventDefault();
+    const undo = () => document.restoreDraft(before);
+    announcer.say({
+      text: outcome.said,
+      tone: 'note',
+      ...(document.draft.value === before ? {} : { action: { label: 'Undo', run: undo } }),
+    });
+  };
+}
+
+function ElementEntry() {
+  const { texts, elementsAre, nodeForm } = useApp().document.draft.value.entry;
+  const epoch = texts.epoch.trim().slice(0, 10) || 'no epoch yet';
+  const says = `${epoch}, ${elementsAre}`;
+  return (
+    <>
+      <div class="field-group">
+        <ShapeFields />
+        <InclinationField />
+        <NodeField />
+      </div>
+      <Fold title="Perigee, anomaly, epoch" says={says} holds={['perigee', 'meanAnomaly', 'epoch']}>
+        <PlaceFields />
+        <EpochField />
+        <ElementKind />
+        {nodeForm === 'raan' ? <FrameChoice frames={['meanOfDate', 'j2000', 'teme']} /> : <SunChoice />}
+      </Fold>
+    </>
+  );
+}
+
+function StateEntry() {
+  return (
+    <>
+      <StateUnitChoice />
+      <div class="field-group">
+        <StateFields />
+      </div>
+      <div class="field-group">
+        <EpochField />
+        <FrameChoice frames={['meanOfDate', 'j2000', 'teme', 'earthFixed']} />
+      </div>
+    </>
+  );
+}
+
+const frameNames: Readonly<Record<InputFrame, string>> = {
+  meanOfDate: 'Mean equator of epoch',
+  j2000: 'J2000',
+  teme: 'TEME',
+  earthFixed: 'Earth-fixed',
+};
+
+function FrameChoice({ frames }: { readonly frames: readonly InputFrame[] }) {
+  const { document } = useApp();
+  return (
+    <Pick
+      label="Axes"
+      value={document.draft.value.entry.frame}
+      options={frames.map((frame) => ({ value: frame, label: frameNames[frame] }))}
+      onPick={(frame) => document.setTags({ frame: frame as InputFrame })}
+    />
+  );
+}
+
+function SunChoice() {
+  const { document } = useApp();
+  return (
+    <Pick
+      label="Local time by"
+      value={document.draft.value.entry.sun}
+      options={[
+        { value: 'mean', label: 'Mean Sun' },
+        { value: 'apparent', label: 'Apparent Sun' },
+      ]}
+      onPick={(sun) => document.setTags({ sun: sun as 'mean' | 'apparent' })}
+    />
+  );
+}
+
+function ElementKind() {
+  const { document } = useApp();
+  return (
+    <Pick
+      label="These elements are"
+      value={document.draft.value.entry.elementsAre}
+      options={[
+        { value: 'mean', label: 'Mean (Brouwer)' },
+        { value: 'osculating', label: 'Osculating' },
+      ]}
+      onPick={(kind) => document.setTags({ elementsAre: kind as 'mean' | 'osculating' })}
+    />
+  );
+}
+
+interface FoldProps {
+  readonly title: string;
+  /** What the folded fields hold, in a line. */
+  readonly says: string;
+  readonly holds: readonly FieldId[];
+  readonly children: ComponentChildren;
+}
+
+/** Opens by itself where one of its fields is in error, since a message must not be folded away; never closes by itself. */
+function Fold({ title, says, holds, children }: FoldProps) {
+  const { document } = useApp();
+  const resolution = document.resolution.value;
+  const inError = !resolution.ok && holds.some((field) => resolution.errors[field]);
+  const fold = useRef<HTMLDetailsElement>(null);
+  useEffect(() => {
+    if (inError && fold.current) fold.current.open = true;
+  }, [inError]);
+  return (
+    <details class="fold" ref={fold}>
+      <summary>
+        <span class="fold-title">{title}</span>
+        <span class="fold-says">{says}</span>
+      </summary>
+      <div class="field-group">{children}</div>
+    </details>
+  );
+}

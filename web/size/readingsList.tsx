@@ -1,0 +1,98 @@
+/** The readings: value large, what would change it small, the working behind a tap. */
+import { formatSignificant, type Reading, unitOf } from '../../core/index';
+import { quantityText, usePreferredUnit, useReadingText } from '../parts/readingText';
+import { useApp } from '../state/appContext';
+
+const levelNames = { geometry: '', first: 'first order', second: 'second order' } as const;
+
+export function ReadingsList() {
+  const { document } = useApp();
+  const readings = document.readings.value;
+  const absent = document.absentReadings.value;
+  const isStale = document.stale.value;
+  if (readings.length === 0) {
+    return <p class="readings-empty">No readings yet: the entry above does not come to an orbit.</p>;
+  }
+  return (
+    <section class="readings" aria-label="Readings">
+      {isStale && <p class="stale-says">Readings of the last good entry; the one above is being changed.</p>}
+      <ul class={isStale ? 'is-stale' : ''}>
+        {readings.map((reading) => (
+          <ReadingRow key={reading.id} reading={reading} />
+        ))}
+      </ul>
+      {absent.length > 0 && (
+        <ul class="readings-absent">
+          {absent.map(({ label, reason }) => (
+            <li key={label}>
+              <span>{label}:</span> {reason}
+            </li>
+          ))}
+        </ul>
+      )}
+    </section>
+  );
+}
+
+function ReadingRow({ reading }: { readonly reading: Reading }) {
+  const { openWorking } = useApp();
+  const text = useReadingText(reading);
+  const isOpen = openWorking.value === reading.id;
+  return (
+    <li>
+      <button
+        type="button"
+        class={`reading mark-of-${reading.mark}`}
+        aria-expanded={isOpen}
+        onClick={() => {
+          openWorking.value = isOpen ? null : reading.id;
+        }}
+      >
+        <span class="reading-label">{reading.label}</span>
+        <span class="reading-value">
+          {text.value} <span class="unit">{text.unit}</span>
+        </span>
+        <Sensitivity reading={reading} />
+        <Order reading={reading} />
+        {reading.remark && <span class="reading-remark">{reading.remark}</span>}
+      </button>
+    </li>
+  );
+}
+
+/** What one more kilometre, hundredth of a degree or thousandth of e would do. */
+function Sensitivity({ reading }: { readonly reading: Reading }) {
+  const unit = usePreferredUnit()(reading.quantity);
+  const sensitivities = reading.sensitivities();
+  if (!sensitivities) return null;
+  const { perKm, perHundredthDegree, perThousandth } = sensitivities;
+  const parts = [
+    { value: perKm, per: '1 km' },
+    { value: perHundredthDegree, per: '0.01°' },
+    { value: perThousandth, per: '0.001 e' },
+  ].map(({ value, per }) => `+${per} ${changeText(reading, value, unit)}`);
+  return (
+    <span class="reading-sub">
+      {parts.map((part) => (
+        <span key={part}>{part}</span>
+      ))}
+    </span>
+  );
+}
+
+/** Two figures are all that a sensitivity is worth. */
+function changeText({ quantity }: Reading, value: number, unitId?: string): string {
+  const text = formatSignificant(value * unitOf(quantity, unitId).perCore, 2);
+  return /^[−0∞–]/.test(text) && !/^0[.]/.test(text) ? text : `+${text}`;
+}
+
+function Order({ reading }: { readonly reading: Reading }) {
+  const unit = usePreferredUnit()(reading.quantity);
+  if (!reading.orders) return null;
+  const first = quantityText(reading.quantity, reading.orders.first, unit).value;
+  return (
+    <span class="reading-order">
+      {levelNames[reading.level]}; first order {first}
+    </span>
+  );
+}

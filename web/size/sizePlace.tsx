@@ -1,0 +1,156 @@
+/** Which orbit? The answer, its picture, the entry and the readings. */
+import { headlineOf, type Notice, type Reading, type ReadingId } from '../../core/index';
+import { later } from '../parts/later';
+import { useReadingText } from '../parts/readingText';
+import { useApp } from '../state/appContext';
+import { EntryPanel } from './entryPanel';
+import { PlaneSketch } from './planeSketch';
+import { PoleSketch } from './poleSketch';
+import { RateChart } from './rateChart';
+import { ReadingsList } from './readingsList';
+import { UnitChoices } from './unitChoices';
+import './entry.css';
+import './pictures.css';
+import './readings.css';
+import './size.css';
+
+const WorkingView = later(async () => (await import('./workingView')).WorkingView);
+
+export function SizePlace() {
+  const { document, openWorking } = useApp();
+  const reading = document.readings.value.find(({ id }) => id === openWorking.value);
+  return (
+    <>
+      <section class="picture" aria-label="The orbit">
+        <div class="answer">
+          <Headline />
+          <KeyReadings />
+        </div>
+        {reading ? <WorkingView reading={reading} /> : <Pictures />}
+      </section>
+      <aside class="numbers" aria-label="Entry and readings">
+        <EntryPanel />
+        <UnitChoices />
+        <ReadingsList />
+        <Actions />
+      </aside>
+    </>
+  );
+}
+
+function Headline() {
+  const { document, preferences } = useApp();
+  const orbit = document.orbit.value;
+  if (!orbit) {
+    return <h1 class="headline">Type or paste an orbit to read how its node and perigee drift.</h1>;
+  }
+  const { rateUnit } = preferences.values.value;
+  const spans = headlineOf(orbit, document.readings.value, {
+    rateUnit: rateUnit === 'degPerYear' ? 'deg/yr' : 'deg/day',
+  });
+  return (
+    <h1 class={`headline${document.stale.value ? ' is-stale' : ''}`}>
+      {spans.map((span, index) => (
+        <span key={`${index}${span.text}`} class={spanClass(span)}>
+          {span.text.replace('deg/', '°/')}
+        </span>
+      ))}
+    </h1>
+  );
+}
+
+type Span = ReturnType<typeof headlineOf>[number];
+
+const spanClass = ({ mark, strong }: Span): string =>
+  [mark ? `mark-${mark}` : '', strong ? 'strong' : ''].filter(Boolean).join(' ');
+
+const keyIds: ReadonlySet<ReadingId> = new Set(['nodeRate', 'perigeeRate', 'localTimeDrift', 'nodalPeriod']);
+
+/** The readings that stay in view while the on-screen keyboard is open. */
+function KeyReadings() {
+  const { document } = useApp();
+  return (
+    <dl class={`key-readings${document.stale.value ? ' is-stale' : ''}`}>
+      {document.readings.value
+        .filter(({ id }) => keyIds.has(id))
+        .map((reading) => (
+          <KeyReading key={reading.id} reading={reading} />
+        ))}
+    </dl>
+  );
+}
+
+function KeyReading({ reading }: { readonly reading: Reading }) {
+  const text = useReadingText(reading);
+  return (
+    <div>
+      <dt>{reading.label}</dt>
+      <dd>
+        {text.value} <span class="unit">{text.unit}</span>
+      </dd>
+    </div>
+  );
+}
+
+function Pictures() {
+  const { document } = useApp();
+  const orbit = document.orbit.value;
+  if (!orbit) return null;
+  return (
+    <div class={document.stale.value ? 'pictures is-stale' : 'pictures'}>
+      <Notices notices={document.notices.value} severity="caution" />
+      <RateChart orbit={orbit} />
+      <div class="sketches">
+        <PlaneSketch orbit={orbit} />
+        <PoleSketch orbit={orbit} />
+      </div>
+      <Notices notices={document.notices.value} severity="note" />
+    </div>
+  );
+}
+
+/** Cautions stand above the picture, notes below it. */
+function Notices({
+  notices,
+  severity,
+}: {
+  readonly notices: readonly Notice[];
+  readonly severity: Notice['severity'];
+}) {
+  const shown = notices.filter((notice) => notice.severity === severity);
+  if (shown.length === 0) return null;
+  return (
+    <ul class="notices">
+      {shown.map(({ id, text }) => (
+        <li key={id} class={`notice is-${severity}`}>
+          {text}
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+function Actions() {
+  const { document, saving, store } = useApp();
+  const changed = document.changed.value || document.baseRevision.value === null;
+  const blocked = store.tabs.editorElsewhere.value;
+  return (
+    <div class="actions">
+      <button
+        type="button"
+        disabled={!document.changed.value || document.baseRevision.value === null || blocked}
+        onClick={() => void saving.discardChanges()}
+      >
+        Discard changes
+      </button>
+      <button
+        type="button"
+        class="primary"
+        disabled={!changed || blocked || saving.status.value.kind === 'saving'}
+        onClick={() => void saving.save()}
+      >
+        {changed ? 'Save' : 'Saved'}
+      </button>
+    </div>
+  );
+}

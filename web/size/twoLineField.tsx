@@ -1,0 +1,37 @@
+/** Two-line elements, as they are pasted. */
+import { lengthCaps } from '../../core/index';
+import { FieldTrouble } from '../parts/numberField';
+import { useApp } from '../state/appContext';
+
+export function TwoLineField() {
+  const { document, store } = useApp();
+  const { draft, resolution } = document;
+  const error = resolution.value.ok ? undefined : resolution.value.errors.twoLine;
+  const setText = (text: string) => document.setText('twoLine', text);
+  return (
+    <div class={`field field-tall${error ? ' has-error' : ''}`}>
+      <label class="field-label" for="two-line">
+        Two-line elements
+      </label>
+      <textarea
+        id="two-line"
+        class="two-line"
+        rows={3}
+        spellcheck={false}
+        autocomplete="off"
+        autocapitalize="off"
+        wrap="off"
+        maxLength={lengthCaps.text}
+        aria-invalid={error ? true : undefined}
+        aria-describedby="two-line-says"
+        placeholder="Paste both lines; a name line may stand above."
+        readOnly={store.tabs.editorElsewhere.value}
+        value={draft.value.entry.texts.twoLine}
+        onInput={(event) => setText(event.currentTarget.value)}
+      />
+      <div id="two-line-says" aria-live="polite">
+        {error && <FieldTrouble error={error} onText={setText} />}
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,104 @@
+/**
+ * Switching the form, unit or body of an entry without losing the orbit: where the entry is good, the orbit is
+ * written into the fields of the new form; where it is not, every text stays as typed.
+ */
+import { batch } from '@preact/signals';
+import {
+  type BodyId,
+  type EntryForm,
+  entryFromOrbit,
+  type FieldId,
+  kmPerLengthUnit,
+  type NodeForm,
+  type OrbitEntry,
+  readNumber,
+  readStateText,
+} from '../../core/index';
+import type { OrbitDocument } from './document';
+
+type Tags = Partial<Omit<OrbitEntry, 'texts'>>;
+
+/** Sets tags and rewrites the fields so that the orbit stays the same; answers why the texts could not follow. */
+function retag(document: OrbitDocument, tags: Tags): string | null {
+  const { entry } = document.draft.value;
+  const { form, ...rest } = { ...entry, ...tags };
+  const resolution = document.resolution.value;
+  const written = resolution.ok ? entryFromOrbit(resolution.orbit, form, rest) : null;
+  if (written?.ok) {
+    document.setTags(tags, written.texts);
+    return null;
+  }
+  document.setTags(tags);
+  return written && written.reason !== 'cannotWrite' ? written.message : null;
+}
+
+export function switchForm(document: OrbitDocument, form: EntryForm): void {
+  const { entry, body } = document.draft.value;
+  if (form === entry.form) return;
+  batch(() => {
+    // Elements know no Earth-fixed axes; the numbers are rewritten in axes of date.
+    const frame = entry.frame === 'earthFixed' || entry.form === 'twoLine' ? 'meanOfDate' : entry.frame;
+    retag(document, { form, frame });
+    if (form === 'twoLine' && body === 'earth') document.setCandidate({ gravitySet: 'WGS72' });
+  });
+}
+
+export function switchNodeForm(document: OrbitDocument, nodeForm: NodeForm): void {
+  retag(document, { nodeForm });
+}
+
+/** The lengths typed are rewritten one by one, whether or not the rest of the entry is good. */
+export function switchLengthUnit(document: OrbitDocument, lengthUnit: OrbitEntry['lengthUnit']): void {
+  const { entry } = document.draft.value;
+  if (entry.lengthUnit === lengthUnit) return;
+  const factor = kmPerLengthUnit(entry) / kmPerLengthUnit({ lengthUnit });
+  const lengths: readonly FieldId[] = ['perigeeAltitude', 'apogeeAltitude', 'semiMajorAxis'];
+  const texts: Partial<Record<FieldId, string>> = {};
+  for (const field of lengths) {
+    const number = readNumber(entry.texts[field]);
+    if (number.ok) texts[field] = String(Number((number.value * factor).toFixed(6)));
+  }
+  document.setTags({ lengthUnit }, texts);
+}
+
+/** Local times and the frames of the Earth do not exist elsewhere: the node goes back to an angle of date. */
+export function switchBody(document: OrbitDocument, body: BodyId): void {
+  batch(() => {
+    if (body !== 'earth') retag(document, { nodeForm: 'raan', frame: 'meanOfDate' });
+    document.setCandidate({ body });
+  });
+}
+
+const twoLinePattern = /^\s*1 .{20,}[\r\n]+\s*2 /m;
+const longestPaste = 20_000;
+
+export type PasteOutcome = 'notOurs' | { readonly said: string };
+
+/**
+ * Takes a paste that is a whole orbit, wherever it was pasted: two-line elements or six numbers of a state.
+ * Answers `notOurs` for anything else, which the field then takes as usual.
+ */
+export function takePaste(document: OrbitDocument, text: string): PasteOutcome {
+  if (text.length > longestPaste) {
+    const size = text.length > 1e6 ? `${(text.length / 1e6).toFixed(1)} MB` : `${Math.round(text.length / 1e3)} kB`;
+    return {
+      said: `That paste is ${size}; an orbit is six numbers or two lines of 69 characters. Nothing was changed.`,
+    };
+  }
+  if (twoLinePattern.test(text)) {
+    batch(() => {
+      switchForm(document, 'twoLine');
+      document.setText('twoLine', text);
+    });
+    return { said: 'Read as two-line elements.' };
+  }
+  const state = readStateText(text);
+  if (!state.ok) return 'notOurs';
+  const [x = '', y = '', z = '', vx = '', vy = '', vz = ''] = state.numbers;
+  const { entry } = document.draft.value;
+  const stateUnit = state.unitGuess ?? entry.stateUnit;
+  const epoch = state.epochText === undefined ? {} : { epoch: state.epochText };
+  document.setTags({ form: 'state', stateUnit }, { x, y, z, vx, vy, vz, ...epoch });
+  const unit = stateUnit === 'm' ? 'm and m/s' : 'km and km/s';
+  return { said: `Read as a state vector in ${unit}. Check the unit, the axes and the epoch.` };
+}
