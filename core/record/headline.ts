@@ -31,7 +31,10 @@ export function headlineOf(
   const value = (wanted: ReadingId) => readings.find(({ id }) => id === wanted)?.value;
   const rates: Rates = { node: needed(value('nodeRate')), perigee: needed(value('perigeeRate')), ...options };
   const apsis = body.id === 'earth' ? 'perigee' : 'periapsis';
-  const node = nodeSpans(rates, value('localTimeDrift'));
+  const node = nodeSpans(
+    rates,
+    readings.find(({ id }) => id === 'localTimeDrift'),
+  );
   return [...node, { text: ' ' }, ...perigeeSpans(rates, mean.eccentricity, apsis)];
 }
 
@@ -46,24 +49,27 @@ function needed(value: number | undefined): number {
   return value;
 }
 
-function nodeSpans(rates: Rates, drift: number | undefined): HeadlineSpan[] {
-  const minutes = drift === undefined ? Number.NaN : drift * unitOf('localTimeDrift').perCore;
+function nodeSpans(rates: Rates, drift: Reading | undefined): HeadlineSpan[] {
+  const { perCore } = unitOf('localTimeDrift');
+  const minutes = drift === undefined ? Number.NaN : drift.value * perCore;
   const rate: HeadlineSpan = { text: rateText(rates.node, rates), mark: 'node', strong: true };
-  if (Math.abs(minutes) < nearlySynchronousMinPerYear) return synchronousSpans(rate, minutes);
+  if (Math.abs(minutes) < nearlySynchronousMinPerYear) {
+    return synchronousSpans(rate, minutes, (drift?.doubt?.size ?? 0) * perCore);
+  }
   if (isStill(rates.node)) return [{ text: 'The node stands still now', mark: 'node', strong: true }, { text: '.' }];
   const sense = rates.node < 0 ? 'regresses' : 'advances';
   return [{ text: `The node ${sense} now, ` }, rate, { text: `: once round in ${turnText(rates.node)}.` }];
 }
 
-function synchronousSpans(rate: HeadlineSpan, minutes: number): HeadlineSpan[] {
+function synchronousSpans(rate: HeadlineSpan, minutes: number, doubt: number): HeadlineSpan[] {
   const opening = Math.abs(minutes) < synchronousMinPerYear ? 'Sun-synchronous now' : 'Nearly Sun-synchronous now';
-  const digits = Math.abs(minutes) < synchronousMinPerYear ? 2 : 1;
+  const spread = doubt < 0.05 ? '' : ` ± ${formatNumber(doubt, { digits: 1 })}`;
   return [
     { text: opening, strong: true },
     { text: ': the node moves ' },
     rate,
     { text: ', its local time ' },
-    { text: `${formatNumber(minutes, { digits, plus: true })} min a year`, mark: 'node', strong: true },
+    { text: `${formatNumber(minutes, { digits: 1, plus: true })}${spread} min a year`, mark: 'node', strong: true },
     { text: ' at this rate.' },
   ];
 }

@@ -6,6 +6,7 @@ import type { Body } from '../../bodies/body';
 import type { MeanElements, Theory } from '../../orbit/elements';
 import type { Quantity } from '../units';
 import type { Working } from '../workings/working';
+import type { Doubt } from './doubt';
 
 export type ReadingLevel = 'geometry' | 'first' | 'second';
 /** What the reading is about, for hue and mark. */
@@ -44,6 +45,8 @@ export interface Reading {
   /** Null where the elements have no part in it. Worked out when asked for. */
   readonly sensitivities: () => Sensitivities | null;
   readonly alternates: readonly Alternate[];
+  /** How wrong the method may be, as a rate now; null where no honest figure is known. */
+  readonly doubt: Doubt | null;
   /** What has to be said beside the number. */
   readonly remark?: string;
   /** Worked out when asked for. */

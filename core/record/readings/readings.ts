@@ -1,6 +1,7 @@
 /** The registry: every reading of an orbit, in the order in which they are shown. */
 import type { Theory } from '../../orbit/elements';
 import { heightsAlongOrbit } from '../../orbit/heights';
+import { doubtOf } from './doubt';
 import { driftReadings } from './drift';
 import { nodeReadings } from './node';
 import type { Alternate, Reading, ReadingId, ReadingPoint, ReadingSpec } from './reading';
@@ -69,6 +70,7 @@ function readingOf(spec: ReadingSpec, orbit: ReadingPoint, theory: Theory, known
     sensitivities: () =>
       spec.sensitive === false ? null : sensitivitiesOf(orbit, (point) => spec.evaluate(point, theory)),
     alternates,
+    doubt: doubtOf(id, orbit, theory),
     ...(remark === undefined ? {} : { remark }),
     working: () => spec.working(orbit),
   };

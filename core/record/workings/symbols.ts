@@ -67,10 +67,10 @@ const rows = {
   eSin: ['h', 'e sin ω', ''],
   localTime: ['t', 'local time of the node', 'h'],
   // the result once more, in people's units
-  nodePerDay: ['Ω̇', 'node rate', 'deg/day'],
-  perigeePerDay: ['ω̇', 'perigee rate', 'deg/day'],
+  nodePerDay: ['ΔΩ', 'node drift in a day', 'deg/day'],
+  perigeePerDay: ['Δω', 'perigee drift in a day', 'deg/day'],
   minutes: ['T', 'the period', 'min'],
-  driftPerYear: ['τ̇', 'drift of local time', 'min/yr'],
+  driftPerYear: ['Δτ', 'drift of local time in a year', 'min/yr'],
   shiftKm: ['s', 'shift at the equator', 'km'],
   apsidalDays: ['T_ω', 'apsidal period', 'd'],
 } as const satisfies Readonly<Record<string, Row>>;

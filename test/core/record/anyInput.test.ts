@@ -67,13 +67,13 @@ const candidates: fc.Arbitrary<Candidate> = fc
   .record({
     sound,
     laidOver,
-    body: fc.constantFrom(...bodyIds),
+    body: fc.constantFrom('earth', 'earth', 'earth', 'earth', 'earth', 'earth', ...bodyIds),
     gravitySet: fc.constantFrom(...gravitySetIds),
-    form: fc.constantFrom(...entryForms),
+    form: fc.constantFrom('altitudes', 'elements', 'altitudes', 'elements', ...entryForms),
     elementsAre: fc.constantFrom('mean', 'osculating'),
-    nodeForm: fc.constantFrom(...nodeForms),
+    nodeForm: fc.constantFrom('raan', 'raan', 'raan', ...nodeForms),
     sun: fc.constantFrom('mean', 'apparent'),
-    frame: fc.constantFrom(...inputFrames),
+    frame: fc.constantFrom('meanOfDate', 'meanOfDate', 'meanOfDate', ...inputFrames),
     lengthUnit: fc.constantFrom('km', 'NM'),
     stateUnit: fc.constantFrom('km', 'm'),
   })
@@ -107,8 +107,8 @@ describe('whatever is typed', () => {
         expect(fingerprint(orbit)).toMatch(/^[A-Z]{3} [A-Z]{4}$/);
         for (const form of entryForms) entryFromOrbit(orbit, form, candidate.entry);
       }),
-      { numRuns: 2500 },
+      { numRuns: 1000 },
     );
-    expect(orbits).toBeGreaterThan(100);
-  });
+    expect(orbits).toBeGreaterThan(50);
+  }, 30_000);
 });

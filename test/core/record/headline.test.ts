@@ -19,7 +19,7 @@ describe('the headline', () => {
       { form: 'elements' },
     );
     expect(text).toMatch(
-      /^Sun-synchronous now: the node moves \+0\.985\d deg\/day, its local time [+−]?0\.\d\d min a year at this rate\./,
+      /^Sun-synchronous now: the node moves \+0\.985\d deg\/day, its local time [+−]?0\.\d ± 0\.3 min a year at this rate\./,
     );
     expect(text).toContain('At e 0.0012 perigee drift means little');
   });

@@ -116,6 +116,32 @@ describe('readings', () => {
   });
 });
 
+describe('the doubt of a rate', () => {
+  it('is some tenths of a per mille of the node rate near the Sun-synchronous inclination, and in the drift of local time', () => {
+    const { doubt, value } = reading('nodeRate');
+    expect((doubt?.size ?? 0) / value).toBeCloseTo(2e-4, 9);
+    expect((reading('localTimeDrift').doubt?.size ?? 0) * unitOf('localTimeDrift').perCore).toBeCloseTo(0.288, 2);
+  });
+
+  it('covers what the second order adds where the first is shown', () => {
+    const first = readingsOf(earth, 'first').find(({ id }) => id === 'nodeRate');
+    expect(first?.doubt?.size).toBeGreaterThan(Math.abs((first?.orders?.second ?? 0) - (first?.orders?.first ?? 0)));
+  });
+
+  it('is the whole perigee rate at a frozen eccentricity, and 6 % at 0.02', () => {
+    const share = (eccentricity: number) => {
+      const { doubt, value } = reading('perigeeRate', { ...earth, mean: { ...mean, eccentricity } });
+      return (doubt?.size ?? 0) / Math.abs(value);
+    };
+    expect(share(0.001)).toBeGreaterThan(1);
+    expect(share(0.02)).toBeCloseTo(0.06, 2);
+  });
+
+  it('is given for rates alone', () => {
+    expect(reading('nodalPeriod').doubt).toBeNull();
+  });
+});
+
 describe('sensitivities', () => {
   it('of the node rate follow a^(-7/2) and the sine of the inclination', () => {
     const { value, sensitivities } = reading('nodeRate');
