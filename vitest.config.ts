@@ -5,6 +5,7 @@ export default defineConfig({
   define: { __DRIFTBOOK_VERSION__: JSON.stringify('0.0.0+test') },
   test: {
     environment: 'node',
+    coverage: { provider: 'v8', include: ['core/**', 'web/**/*.ts'], exclude: ['web/build/**'] },
     projects: [
       {
         extends: true,

@@ -10,7 +10,7 @@ import { install, root } from './install.mjs';
 const reports = `${root}.cache/reports`;
 const bin = (name) => `${root}node_modules/.bin/${name}`;
 
-/** Each stage runs its commands until one fails. A `report` holds counts; a stage without one counts only if it fails. */
+/** A stage fails if one of its commands does. A `report` holds counts; a stage without one counts only if it fails. */
 const stages = [
   { name: 'types', commands: ['core', 'web', 'web/offline', 'web/build', 'test'].map((part) => ['tsc', '-p', part]) },
   { name: 'lint', commands: [['biome', 'check', '--error-on-warnings']] },
@@ -50,11 +50,11 @@ function runStage({ name, commands, report, needsBrowser }, extra) {
   const file = `${reports}/${name}.json`;
   rmSync(file, { force: true });
   const env = { ...process.env, PLAYWRIGHT_JSON_OUTPUT_FILE: file, ...(browser && { CHROMIUM_PATH: browser }) };
-  const ok = commands.every(
+  const statuses = commands.map(
     ([tool, ...args]) =>
-      spawnSync(bin(tool), [...args, ...extra], { cwd: root, env, stdio: ['ignore', 'inherit', 'inherit'] }).status ===
-      0,
+      spawnSync(bin(tool), [...args, ...extra], { cwd: root, env, stdio: ['ignore', 'inherit', 'inherit'] }).status,
   );
+  const ok = statuses.every((status) => status === 0);
   const counts = report && existsSync(file) ? report(JSON.parse(readFileSync(file, 'utf8'))) : { passed: 0, failed: 0 };
   return { passed: counts.passed, failed: ok ? counts.failed : Math.max(counts.failed, 1) };
 }
