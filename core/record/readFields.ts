@@ -29,6 +29,9 @@ export interface FieldReader {
   notice(notice: Notice): void;
 }
 
+/** A paste beyond this is no number and is not looked at. */
+const longest = 400;
+
 /** Larger than any length, rate or anomaly a person means; keeps every formula finite. */
 const largest = 1e12;
 
@@ -40,9 +43,11 @@ export function fieldReader(texts: Readonly<Record<FieldId, string>>): FieldRead
     return null;
   };
   const number = (words: FieldWords): number | null => {
-    const result = meantReading(readNumber(texts[words.field]), words);
+    const text = texts[words.field];
+    if (text.length > longest) return leave(words.field, tooLong(text, words));
+    const result = meantReading(readNumber(text.trim()), words);
     if (result.ok && Math.abs(result.value) <= largest) return result.value;
-    return leave(words.field, result.ok ? tooLarge(words) : numberError(result, words, texts[words.field]));
+    return leave(words.field, result.ok ? tooLarge(words) : numberError(result, words, text));
   };
   return {
     errors,
@@ -81,6 +86,10 @@ function numberError(result: Unread, words: FieldWords, text: string): FieldErro
     case 'notANumber':
       return { message: `${label}: “${quoted(text)}” is not a number; type ${expected}.` };
   }
+}
+
+function tooLong({ length }: string, { label, expected }: FieldWords): FieldError {
+  return { message: `${label} holds ${length} characters, which is no number; type ${expected}.` };
 }
 
 function tooLarge({ label, expected }: FieldWords): FieldError {

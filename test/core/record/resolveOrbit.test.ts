@@ -81,6 +81,15 @@ describe('every number field', () => {
     }
   });
 
+  it('answers a paste of 10 MB by its size, at once', () => {
+    const paste = '1 '.repeat(5_000_000);
+    const start = performance.now();
+    const found = messages({ perigeeAltitude: paste, node: paste, epoch: paste });
+    expect(performance.now() - start).toBeLessThan(500);
+    expect(found.perigeeAltitude).toContain('10000000 characters');
+    expect(Object.keys(found).sort()).toEqual(['epoch', 'node', 'perigeeAltitude']);
+  });
+
   it('all speak at once, so that nothing is found out one by one', () => {
     const found = messages({ inclination: 'a', node: '', perigee: 'NaN', apogeeAltitude: 'x', epoch: 'soon' });
     expect(Object.keys(found).sort()).toEqual(['apogeeAltitude', 'epoch', 'inclination', 'node', 'perigee']);
