@@ -9,6 +9,7 @@ import { BodyFields, bodySummary, Pick } from './bodyFields';
 import { EpochField, InclinationField, NodeField, PlaceFields, ShapeFields } from './shapeFields';
 import { StateFields, StateUnitChoice } from './stateFields';
 import { TwoLineField } from './twoLineField';
+import { UnitChoices } from './unitChoices';
 
 const forms: readonly { readonly value: EntryForm; readonly label: string }[] = [
   { value: 'altitudes', label: 'Altitudes' },
@@ -32,8 +33,11 @@ export function EntryPanel() {
       {form === 'twoLine' && <TwoLineField />}
       {form === 'state' && <StateEntry />}
       {(form === 'altitudes' || form === 'elements') && <ElementEntry />}
-      <Fold title="Body and constants" says={useBodySummary()} holds={bodyFieldIds}>
-        <BodyFields />
+      <Fold title="Body and units" says={useBodySummary()} holds={bodyFieldIds}>
+        <div class="field-group">
+          <BodyFields />
+        </div>
+        <UnitChoices />
       </Fold>
     </section>
   );
@@ -51,8 +55,8 @@ const bodyFieldIds: readonly FieldId[] = [
 ];
 
 function useBodySummary(): string {
-  const { body, gravitySet } = useApp().document.draft.value;
-  return bodySummary(body, gravitySet);
+  const { body, gravitySet, entry } = useApp().document.draft.value;
+  return `${bodySummary(body, gravitySet)}, ${entry.lengthUnit}`;
 }
 
 /** A paste that is a whole orbit is taken as one, wherever the finger was. */
@@ -85,10 +89,12 @@ function ElementEntry() {
         <NodeField />
       </div>
       <Fold title="Perigee, anomaly, epoch" says={says} holds={['perigee', 'meanAnomaly', 'epoch']}>
-        <PlaceFields />
-        <EpochField />
-        <ElementKind />
-        {nodeForm === 'raan' ? <FrameChoice frames={['meanOfDate', 'j2000', 'teme']} /> : <SunChoice />}
+        <div class="field-group">
+          <PlaceFields />
+          <EpochField />
+          <ElementKind />
+          {nodeForm === 'raan' ? <FrameChoice frames={['meanOfDate', 'j2000', 'teme']} /> : <SunChoice />}
+        </div>
       </Fold>
     </>
   );
@@ -181,7 +187,7 @@ function Fold({ title, says, holds, children }: FoldProps) {
         <span class="fold-title">{title}</span>
         <span class="fold-says">{says}</span>
       </summary>
-      <div class="field-group">{children}</div>
+      {children}
     </details>
   );
 }

@@ -1,5 +1,5 @@
 /** The readings: value large, what would change it small, the working behind a tap. */
-import { formatSignificant, type Reading, unitOf } from '../../core/index';
+import { formatNumber, type Reading, unitOf } from '../../core/index';
 import { quantityText, usePreferredUnit, useReadingText } from '../parts/readingText';
 import { useApp } from '../state/appContext';
 
@@ -82,8 +82,9 @@ function Sensitivity({ reading }: { readonly reading: Reading }) {
 
 /** Two figures are all that a sensitivity is worth. */
 function changeText({ quantity }: Reading, value: number, unitId?: string): string {
-  const text = formatSignificant(value * unitOf(quantity, unitId).perCore, 2);
-  return /^[−0∞–]/.test(text) && !/^0[.]/.test(text) ? text : `+${text}`;
+  const change = value * unitOf(quantity, unitId).perCore;
+  const leading = Math.floor(Math.log10(Math.abs(change) || 1));
+  return formatNumber(change, { digits: Math.min(7, Math.max(0, 1 - leading)), plus: true });
 }
 
 function Order({ reading }: { readonly reading: Reading }) {

@@ -8,7 +8,6 @@ import { PlaneSketch } from './planeSketch';
 import { PoleSketch } from './poleSketch';
 import { RateChart } from './rateChart';
 import { ReadingsList } from './readingsList';
-import { UnitChoices } from './unitChoices';
 import './entry.css';
 import './pictures.css';
 import './readings.css';
@@ -30,7 +29,6 @@ export function SizePlace() {
       </section>
       <aside class="numbers" aria-label="Entry and readings">
         <EntryPanel />
-        <UnitChoices />
         <ReadingsList />
         <Actions />
       </aside>

@@ -8,7 +8,6 @@ export function UnitChoices() {
   const { lengthUnit, rateUnit } = preferences.values.value;
   return (
     <div class="unit-choices">
-      <h2>Readings</h2>
       <Choice
         label="Unit of lengths"
         name="length-unit"

@@ -97,15 +97,19 @@ function Line({ line, known, isResult }: LineProps) {
   return (
     <li class={isResult ? 'is-result' : ''}>
       <span class="working-name">{line.symbol.name}</span>
-      <math display="block">
-        <Glyph symbol={line.symbol} />
-        <mo>=</mo>
-        <FormulaMath tree={line.expr} symbolOf={(id) => <Glyph symbol={find(id).symbol} />} />
-      </math>
-      <math display="block">
-        <mo>=</mo>
-        <FormulaMath tree={line.expr} symbolOf={(id) => <NumberPutIn value={find(id)} />} />
-      </math>
+      <p class="formula">
+        <math displaystyle>
+          <Glyph symbol={line.symbol} />
+          <mo>=</mo>
+          <FormulaMath tree={line.expr} symbolOf={(id) => <Glyph symbol={find(id).symbol} />} />
+        </math>
+      </p>
+      <p class="formula">
+        <math displaystyle>
+          <mo>=</mo>
+          <FormulaMath tree={line.expr} symbolOf={(id) => <NumberPutIn value={find(id)} />} />
+        </math>
+      </p>
       <p class="working-value">= {valueText(line)}</p>
     </li>
   );
