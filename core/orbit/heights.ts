@@ -5,9 +5,9 @@
  * the height by kilometres; perigee and node are held for the one revolution.
  */
 import type { Body } from '../bodies/body';
-import { twoPi, wrapTwoPi } from '../numerics/angles';
 import type { Vec3 } from '../numerics/vectors';
 import type { MeanElements } from './elements';
+import { meanFromTrue } from './kepler';
 import { stateFromMean } from './meanState';
 
 export interface HeightRange {
@@ -21,7 +21,7 @@ const samples = 72;
 /** Least and greatest height (km) over one revolution. Errors as `stateFromMean`. */
 export function heightsAlongOrbit(body: Body, mean: MeanElements): HeightRange {
   const heightAt = (index: number) => {
-    const meanAnomalyRad = wrapTwoPi((twoPi * index) / samples);
+    const meanAnomalyRad = sampledAnomalyRad(index, mean.eccentricity);
     return ellipsoidHeightKm(body, stateFromMean(body, { ...mean, meanAnomalyRad }).positionKm);
   };
   const heights = Array.from({ length: samples }, (_, index) => heightAt(index));
@@ -31,6 +31,21 @@ export function heightsAlongOrbit(body: Body, mean: MeanElements): HeightRange {
     leastKm: refinedExtreme(heightAt, lowest),
     greatestKm: refinedExtreme(heightAt, highest),
   };
+}
+
+/**
+ * Mean anomaly (rad) of a sample, rising evenly with the true anomaly on the half of the plane that perigee lies in and with
+ * the eccentric anomaly on the other: an even pace in time would leap over the perigee of a steep ellipse.
+ */
+function sampledAnomalyRad(index: number, eccentricity: number): number {
+  const half = samples / 2;
+  const fromPerigee = index - samples * Math.round(index / samples);
+  if (Math.abs(fromPerigee) <= half / 2) return meanFromTrue((Math.PI * fromPerigee) / half, eccentricity);
+  // E where the true anomaly is 90°, and evenly on from there to apogee.
+  const side = Math.acos(eccentricity);
+  const share = (Math.abs(fromPerigee) - half / 2) / (half / 2);
+  const eccentric = Math.sign(fromPerigee) * (side + (Math.PI - side) * share);
+  return eccentric - eccentricity * Math.sin(eccentric);
 }
 
 /** Vertex of parabolas through three points, the spacing shrinking each time. */

@@ -45,4 +45,35 @@ describe('height above the ellipsoid', () => {
       expect(Math.abs(greatestKm - Math.max(...walk))).toBeLessThan(0.01);
     }
   });
+
+  it.each([
+    { body: earth, eccentricity: 0.74 },
+    { body: earth, eccentricity: 0.93 },
+    { body: earth, eccentricity: 0.99 },
+    { body: saturn, eccentricity: 0.4 },
+    { body: saturn, eccentricity: 0.9 },
+  ])(
+    'finds the extremes of steep ellipses, where perigee passes in a moment ($body.name, e $eccentricity)',
+    ({ body, eccentricity }) => {
+      for (const perigeeRad of [0.5, 1.8, 2.6, 5.4]) {
+        const mean = {
+          semiMajorAxisKm: (1.25 * body.radiusKm) / (1 - eccentricity),
+          eccentricity,
+          inclinationRad: 1.15,
+          nodeRad: 1,
+          perigeeRad,
+          meanAnomalyRad: 0,
+        };
+        const walk = Array.from({ length: 4000 }, (_, k) => {
+          const eccentric = (2 * Math.PI * k) / 4000;
+          const meanAnomalyRad = eccentric - eccentricity * Math.sin(eccentric);
+          return ellipsoidHeightKm(body, stateFromMean(body, { ...mean, meanAnomalyRad }).positionKm);
+        });
+        const { leastKm, greatestKm } = heightsAlongOrbit(body, mean);
+        // A share of the height: the walk itself steps past the vertex by up to 1e-6 of the radius at e 0.99.
+        expect(Math.abs(leastKm - Math.min(...walk)) / body.radiusKm).toBeLessThan(1e-5);
+        expect(Math.abs(greatestKm / Math.max(...walk) - 1)).toBeLessThan(1e-6);
+      }
+    },
+  );
 });
