@@ -72,6 +72,8 @@ export interface ReadingSpec {
   /** Why the reading cannot be given for this orbit, or null. */
   readonly missing?: (point: ReadingPoint) => string | null;
   readonly evaluate: (point: ReadingPoint, theory: Theory) => number;
+  /** What to take differences of, where that costs less than the reading and has the same slope. */
+  readonly slopeOf?: (point: ReadingPoint) => (point: ReadingPoint) => number;
   readonly alternates?: (point: ReadingPoint, value: number) => readonly Alternate[];
   readonly remark?: (point: ReadingPoint, value: number) => string | undefined;
   readonly working: (point: ReadingPoint) => Working;

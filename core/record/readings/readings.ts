@@ -1,8 +1,8 @@
 /** The registry: every reading of an orbit, in the order in which they are shown. */
 import type { Theory } from '../../orbit/elements';
-import { heightsAlongOrbit } from '../../orbit/heights';
 import { doubtOf } from './doubt';
 import { driftReadings } from './drift';
+import { type HeightId, heightValues, isHeight } from './heights';
 import { nodeReadings } from './node';
 import type { Alternate, Reading, ReadingId, ReadingPoint, ReadingSpec } from './reading';
 import { sensitivitiesOf } from './sensitivity';
@@ -36,22 +36,6 @@ export function absentReadings(orbit: ReadingPoint): AbsentReading[] {
   });
 }
 
-type HeightId = 'leastHeight' | 'greatestHeight';
-
-function isHeight(id: ReadingId): id is HeightId {
-  return id === 'leastHeight' || id === 'greatestHeight';
-}
-
-/** One walk along the orbit serves both; null where J2 terms are too large for the orbit to close. */
-function heightValues({ body, mean }: ReadingPoint): Partial<Record<ReadingId, number>> | null {
-  try {
-    const { leastKm, greatestKm } = heightsAlongOrbit(body, mean);
-    return { leastHeight: leastKm, greatestHeight: greatestKm };
-  } catch {
-    return null;
-  }
-}
-
 function readingOf(spec: ReadingSpec, orbit: ReadingPoint, theory: Theory, known: number | undefined): Reading {
   const { id, symbol, quantity, mark, ordered } = spec;
   const orders = ordered ? { first: spec.evaluate(orbit, 'first'), second: spec.evaluate(orbit, 'second') } : null;
@@ -68,7 +52,9 @@ function readingOf(spec: ReadingSpec, orbit: ReadingPoint, theory: Theory, known
     mark,
     orders,
     sensitivities: () =>
-      spec.sensitive === false ? null : sensitivitiesOf(orbit, (point) => spec.evaluate(point, theory)),
+      spec.sensitive === false
+        ? null
+        : sensitivitiesOf(orbit, spec.slopeOf?.(orbit) ?? ((point) => spec.evaluate(point, theory))),
     alternates,
     doubt: doubtOf(id, orbit, theory),
     ...(remark === undefined ? {} : { remark }),

@@ -12,7 +12,7 @@ export function sensitivitiesOf(point: ReadingPoint, evaluate: (point: ReadingPo
   const { semiMajorAxisKm, eccentricity, inclinationRad } = point.mean;
   const at = (change: Partial<MeanElements>) => evaluate({ ...point, mean: { ...point.mean, ...change } });
   const inclination = sides(inclinationRad, stepInclinationRad, 0, Math.PI);
-  const shape = sides(eccentricity, stepEccentricity, 0, 1 - stepEccentricity);
+  const shape = sides(eccentricity, stepEccentricity, 0, Math.max(eccentricity, 1 - stepEccentricity));
   const stepKm = stepShare * semiMajorAxisKm;
   const perKm = slope([semiMajorAxisKm - stepKm, semiMajorAxisKm + stepKm], (value) => at({ semiMajorAxisKm: value }));
   return {

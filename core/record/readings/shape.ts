@@ -1,34 +1,13 @@
 /** Size and shape: the elements themselves and what follows from them without a theory. */
-import { heightsAlongOrbit } from '../../orbit/heights';
 import { apogeeAltitudeKm, perigeeAltitudeKm } from '../entry/shape';
 import { add, fn, frac, group, mul, neg, sqrt } from '../formula';
 import { plainWorking } from '../workings/build';
 import { noteOnly } from '../workings/working';
-import type { ReadingPoint, ReadingSpec } from './reading';
+import { heightReading } from './heights';
+import type { ReadingSpec } from './reading';
 
 const meanNote =
   'A Brouwer mean element: the first-order short-period J2 terms are removed, so the orbit at one instant lies some kilometres off it.';
-const heightNote =
-  'Found along one revolution: short-period J2 terms put back, heights taken along the normal of the ellipsoid. No closed formula.';
-
-/** Both heights come from one walk along the orbit. */
-function heightReading(id: 'leastHeight' | 'greatestHeight', label: string): ReadingSpec {
-  const evaluate = ({ body, mean }: ReadingPoint) => heightOf(heightsAlongOrbit(body, mean), id);
-  return {
-    id,
-    label,
-    symbol: id === 'leastHeight' ? 'h min' : 'h max',
-    quantity: 'length',
-    mark: 'none',
-    ordered: false,
-    evaluate,
-    working: (point) => noteOnly(evaluate(point), heightNote),
-  };
-}
-
-function heightOf(heights: ReturnType<typeof heightsAlongOrbit>, id: 'leastHeight' | 'greatestHeight'): number {
-  return id === 'leastHeight' ? heights.leastKm : heights.greatestKm;
-}
 
 const element = { mark: 'none', ordered: false } as const;
 

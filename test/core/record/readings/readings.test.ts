@@ -167,6 +167,22 @@ describe('sensitivities', () => {
     expect(slopes?.perKm).toBeCloseTo(1, 9);
   });
 
+  it('of a height are those of the height worked out anew beside it', () => {
+    const tilted = { ...mean, eccentricity: 0.02, perigeeRad: 0.7 };
+    for (const id of ['leastHeight', 'greatestHeight'] as const) {
+      const at = (change: object) => reading(id, { ...earth, mean: { ...tilted, ...change } });
+      const slopes = at({}).sensitivities();
+      const step = 1e-4;
+      const perThousandth =
+        ((at({ eccentricity: 0.02 + step }).value - at({ eccentricity: 0.02 - step }).value) / (2 * step)) * 1e-3;
+      const perKm =
+        at({ semiMajorAxisKm: mean.semiMajorAxisKm + 0.5 }).value -
+        at({ semiMajorAxisKm: mean.semiMajorAxisKm - 0.5 }).value;
+      expect(slopes?.perThousandth).toBeCloseTo(perThousandth, 2);
+      expect(slopes?.perKm).toBeCloseTo(perKm, 3);
+    }
+  });
+
   it('are absent where the elements have no part', () => {
     expect(reading('localTimeAscending').sensitivities()).toBeNull();
   });
