@@ -34,7 +34,7 @@ function AboutText() {
       <dl class="book-facts">
         <Fact label="Version">{version}</Fact>
         <Fact label="Constants">EGM2008, unless an orbit names another set</Fact>
-        <Fact label="Record schema">{String(candidateSchema)}</Fact>
+        <Fact label="Schema">{`version ${candidateSchema} of the saved record`}</Fact>
         <Fact label="Offline">
           {offlineTexts[offline.status.value]}
           {offline.updateWaiting.value && ' A new version waits.'}

@@ -35,6 +35,7 @@ function createBookView({ store, document }: AppState): BookView {
   const chosenId = signal<string | null>(null);
   const reads = createReads(store.book);
   const summaryOf = createSummaryKeeper();
+  const openId = computed(() => document.draft.value.id);
   const openSummary = computed(() => orbitSummary(document.draft.value));
   const listed = computed(() =>
     reads.stored.value === null
@@ -42,7 +43,8 @@ function createBookView({ store, document }: AppState): BookView {
       : listedEntries({
           entries: reads.stored.value,
           summaryOf,
-          open: { candidate: document.draft.value, summary: () => openSummary.value },
+          openId: openId.value,
+          open: () => ({ candidate: document.draft.value, summary: openSummary.value }),
         }),
   );
   const selectedId = computed(() => {

@@ -2,8 +2,8 @@
 import type { BodyId, Candidate, EntryForm, FieldId, InputFrame, NodeForm } from '../../core/index';
 
 export const formLabels: Readonly<Record<EntryForm, string>> = {
-  altitudes: 'perigee and apogee altitude',
-  elements: 'semi-major axis and eccentricity',
+  altitudes: 'altitudes',
+  elements: 'a and e',
   state: 'state vector',
   twoLine: 'two-line elements',
 };

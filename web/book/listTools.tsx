@@ -2,10 +2,10 @@ import { type SortKey, sortKeys } from './listing';
 import { useBook } from './useBook';
 
 const sortLabels: Readonly<Record<SortKey, string>> = {
-  saved: 'Latest saved first',
-  name: 'Name, A to Z',
-  altitude: 'Altitude, low to high',
-  inclination: 'Inclination, low to high',
+  saved: 'Saved',
+  name: 'Name',
+  altitude: 'Altitude',
+  inclination: 'Inclination',
 };
 
 /** Search and order of the list. */
@@ -15,9 +15,10 @@ export function ListTools() {
   return (
     <search class="book-tools">
       <label>
-        <span class="small soft">Search names, notes, fingerprints</span>
+        <span class="small soft">Search</span>
         <input
           type="search"
+          placeholder="name, notes …"
           autocomplete="off"
           spellcheck={false}
           value={view.query.value}
@@ -26,7 +27,7 @@ export function ListTools() {
           }}
         />
       </label>
-      <label>
+      <label class="book-order">
         <span class="small soft">Order</span>
         <select
           value={view.sort.value}

@@ -21,23 +21,24 @@ export type SortKey = (typeof sortKeys)[number];
 export interface ListingParts {
   readonly entries: readonly BookEntry[];
   readonly summaryOf: (key: string, candidate: Candidate) => OrbitSummary;
-  /** The orbit in the editor. */
-  readonly open: { readonly candidate: Candidate; readonly summary: () => OrbitSummary };
+  /** The orbit in the editor. Its content is asked for only where the book does not have it, since it changes at each key. */
+  readonly openId: string;
+  readonly open: () => { readonly candidate: Candidate; readonly summary: OrbitSummary };
 }
 
 /** The book's entries, with the open orbit in front of them where it is not among them. */
-export function listedEntries({ entries, summaryOf, open }: ListingParts): ListedEntry[] {
+export function listedEntries({ entries, summaryOf, openId, open }: ListingParts): ListedEntry[] {
   const listed = entries.map((entry): ListedEntry => {
     const { id, revision, savedAtIso: atIso, demo } = entry;
-    const facts = { id, name: entry.name, demo, saved: { revision, atIso }, isOpen: id === open.candidate.id };
+    const facts = { id, name: entry.name, demo, saved: { revision, atIso }, isOpen: id === openId };
     if (entry.kind === 'unreadable') return { ...facts, content: { kind: 'unreadable', message: entry.message } };
     const { candidate } = entry;
     const summary = summaryOf(`${id}/${revision}/${atIso}`, candidate);
     return { ...facts, content: { kind: 'readable', candidate, summary } };
   });
   if (listed.some(({ isOpen }) => isOpen)) return listed;
-  const { candidate } = open;
-  const content = { kind: 'readable', candidate, summary: open.summary() } as const;
+  const { candidate, summary } = open();
+  const content = { kind: 'readable', candidate, summary } as const;
   return [{ id: candidate.id, name: candidate.name, saved: null, demo: false, isOpen: true, content }, ...listed];
 }
 

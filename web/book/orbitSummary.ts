@@ -36,13 +36,29 @@ export function orbitSummary(candidate: Candidate): OrbitSummary {
   };
 }
 
+export interface OrbitFigure {
+  readonly label: string;
+  readonly number: string;
+  readonly unit: string;
+}
+
+/** Perigee altitude, apogee altitude and inclination, as written everywhere in the book. */
+export function orbitFigures(orbit: SummarisedOrbit, lengthUnit: 'km' | 'NM'): [OrbitFigure, OrbitFigure, OrbitFigure] {
+  const { symbol: unit, perCore } = unitOf('length', lengthUnit);
+  const altitude = (km: number) => formatNumber(km * perCore, { digits: 1 });
+  const inclination = formatNumber((orbit.inclinationRad * 180) / Math.PI, { digits: 3 });
+  return [
+    { label: 'Perigee', number: altitude(orbit.perigeeAltitudeKm), unit },
+    { label: 'Apogee', number: altitude(orbit.apogeeAltitudeKm), unit },
+    { label: 'Inclination', number: inclination, unit: '°' },
+  ];
+}
+
 /** Such as `561.0 × 575.0 km, 97.680°`, with the body in front where it is not the Earth. */
 export function orbitLine(summary: OrbitSummary, lengthUnit: 'km' | 'NM'): string {
   if (summary.kind === 'unsettled') return 'No orbit yet';
-  const { symbol, perCore } = unitOf('length', lengthUnit);
-  const altitude = (km: number) => formatNumber(km * perCore, { digits: 1 });
-  const inclination = formatNumber((summary.inclinationRad * 180) / Math.PI, { digits: 3 });
-  const numbers = `${altitude(summary.perigeeAltitudeKm)} × ${altitude(summary.apogeeAltitudeKm)} ${symbol}, ${inclination}°`;
+  const [perigee, apogee, inclination] = orbitFigures(summary, lengthUnit);
+  const numbers = `${perigee.number} × ${apogee.number} ${apogee.unit}, ${inclination.number}${inclination.unit}`;
   return summary.isEarth ? numbers : `${summary.bodyName}: ${numbers}`;
 }
 

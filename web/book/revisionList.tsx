@@ -70,7 +70,7 @@ function Revision({ entry, revision, before, isLatest }: RevisionProps) {
 
 function revisionLines(revision: BookRevision, before: BookRevision | null): readonly string[] {
   if (revision.kind === 'unreadable') return [`Cannot be read. ${revision.message}`];
-  if (before === null) return ['First revision'];
+  if (before === null) return revision.note ? [] : ['First revision'];
   if (before.kind === 'unreadable') return ['The one before cannot be read, so there is nothing to compare with.'];
   const changes = changesBetween(before.candidate, revision.candidate);
   if (changes.length === 0) return ['Nothing changed'];

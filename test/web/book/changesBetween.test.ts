@@ -23,7 +23,7 @@ describe('changes between two revisions', () => {
       texts: { ...before.entry.texts, x: '7000', perigeeAltitude: '', apogeeAltitude: '' },
     });
     expect(changesBetween(before, after)).toEqual([
-      'Entered as perigee and apogee altitude → state vector',
+      'Entered as altitudes → state vector',
       'Position x empty → 7000',
       '2 fields of other forms',
     ]);

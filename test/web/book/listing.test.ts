@@ -34,7 +34,8 @@ const listOf = (entries: readonly BookEntry[]): ListedEntry[] =>
   listedEntries({
     entries,
     summaryOf: createSummaryKeeper(),
-    open: { candidate: openOne, summary: () => orbitSummary(openOne) },
+    openId: openOne.id,
+    open: () => ({ candidate: openOne, summary: orbitSummary(openOne) }),
   });
 const names = (entries: readonly ListedEntry[]) => entries.map(({ name }) => name);
 
