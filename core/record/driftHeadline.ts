@@ -25,26 +25,29 @@ export const apsisName = (body: Pick<Body, 'id'>): string => (body.id === 'earth
 /** Rates now, second order, of node, perigee and local time. */
 export function driftHeadline(orbit: ResolvedOrbit, rateUnit: RateUnitId): HeadlineSpan[] {
   const rates = ratesIn(orbit, 'second', rateUnit);
-  const isRound = orbit.mean.eccentricity < smallEccentricity;
   return [
     { text: 'Node', mark: 'node', strong: true },
     { text: ' moves ' },
     { text: `${rates.node} ${rates.per}`, mark: 'node', strong: true },
-    { text: '; ' },
+    { text: ', ' },
     { text: apsisName(orbit.body), mark: 'perigee', strong: true },
     { text: ' ' },
-    { text: `${rates.perigee} ${rates.per}`, mark: 'perigee', strong: true },
-    { text: isRound ? ', which means little on so round an orbit. ' : '. ' },
+    { text: rates.perigee, mark: 'perigee', strong: true },
+    { text: '. ' },
     ...localTimeSpans(orbit),
   ];
 }
 
-/** What first order alone would say, beside the headline's second order. */
+/** What first order alone would say, beside the headline's second order, and whether perigee means anything. */
 export function firstOrderSentence(orbit: ResolvedOrbit, rateUnit: RateUnitId): string {
   const { node, perigee, per } = ratesIn(orbit, 'first', rateUnit);
   const perDay = localTimePerDayMin(orbit, 'first');
   const localTime = perDay === null ? '' : `, local time ${localTimeText(perDay)}`;
-  return `Rates now, second order. First order alone says node ${node}, ${apsisName(orbit.body)} ${perigee} ${per}${localTime}.`;
+  const apsis = apsisName(orbit.body);
+  const e = orbit.mean.eccentricity;
+  const round =
+    e < smallEccentricity ? ` At e\u00a0${formatNumber(e, { digits: 4 })} ${apsis} drift means little.` : '';
+  return `First order alone: node ${node} ${per}, ${apsis} ${perigee}${localTime}.${round}`;
 }
 
 function ratesIn(orbit: ResolvedOrbit, theory: Theory, rateUnit: RateUnitId) {

@@ -7,6 +7,8 @@ export interface ChangeUnit {
   readonly perCore: number;
   /** Set right after the number. */
   readonly symbol: string;
+  /** In the head of a table. */
+  readonly short: string;
   /** Written in the title of the axis. */
   readonly name: string;
 }
@@ -21,12 +23,19 @@ export interface Change {
   readonly second: Float64Array;
 }
 
-const thinSpace = '\u2009';
-export const degrees: ChangeUnit = { perCore: 180 / Math.PI, symbol: '°', name: 'degrees' };
-const turns: ChangeUnit = { perCore: 1 / (2 * Math.PI), symbol: `${thinSpace}turns`, name: 'turns' };
-export const minutes: ChangeUnit = { perCore: 1 / 60, symbol: `${thinSpace}min`, name: 'minutes' };
-const hours: ChangeUnit = { perCore: 1 / 3600, symbol: `${thinSpace}h`, name: 'hours' };
-const clockDays: ChangeUnit = { perCore: 1 / 86_400, symbol: `${thinSpace}d`, name: 'days of 24 h' };
+/** A thin space at which no line breaks. */
+const thin = '\u202f';
+const worded = (perCore: number, short: string, name: string): ChangeUnit => ({
+  perCore,
+  symbol: thin + short,
+  short,
+  name,
+});
+export const degrees: ChangeUnit = { perCore: 180 / Math.PI, symbol: '°', short: '°', name: 'degrees' };
+const turns = worded(1 / (2 * Math.PI), 'turns', 'turns');
+const minutes = worded(1 / 60, 'min', 'minutes');
+const hours = worded(1 / 3600, 'h', 'hours');
+const clockDays = worded(1 / 86_400, 'd', 'days of 24 h');
 
 /** Degrees up to ten turns. */
 export const angleUnit = (largestRad: number): ChangeUnit => (largestRad > 20 * Math.PI ? turns : degrees);
@@ -71,21 +80,24 @@ function digitsFor({ first, second }: OrderedLines): number {
   return Math.max(1, Math.min(6, 2 - Math.floor(Math.log10(size))));
 }
 
-/** Second order, first order and second minus first at a sample, written with sign and unit. */
-export function textsAt({ first, second, unit, digits }: Change, sample: number) {
+/** Second order, first order and second minus first at a sample, signed; the unit is said elsewhere. */
+export function numbersAt({ first, second, digits }: Change, sample: number) {
   const write = (value: number) => formatNumber(value, { digits, plus: true });
   const one = first[sample] ?? 0;
   const two = second[sample] ?? 0;
-  return {
-    first: write(one) + unit.symbol,
-    second: write(two) + unit.symbol,
-    difference: write(two - one) + unit.symbol,
-    apart: formatNumber(Math.abs(two - one), { digits }) + unit.symbol,
-  };
+  return { first: write(one), second: write(two), difference: write(two - one) };
 }
 
-/** “After 5 years: +1805.12° second order, +1802.30° first order; they differ by 2.82°.” */
+/** “+1805.12° second order, +1802.30° first” at a sample. */
+export function ordersText(change: Change, sample: number): string {
+  const { first, second } = numbersAt(change, sample);
+  const { symbol } = change.unit;
+  return `${second}${symbol} second order, ${first}${symbol === '°' ? symbol : ''} first`;
+}
+
+/** “After 5 years: +1805.12° second order, +1802.30° first; they differ by 2.82°.” */
 export function changeCaption(change: Change, spanText: string): string {
-  const { first, second, apart } = textsAt(change, change.second.length - 1);
-  return `After ${spanText}: ${second} second order, ${first} first order; they differ by ${apart}.`;
+  const end = change.second.length - 1;
+  const apart = numbersAt(change, end).difference.replace(/^[+\u2212]/, '');
+  return `After ${spanText}: ${ordersText(change, end)}; they differ by ${apart}${change.unit.symbol}.`;
 }

@@ -1,7 +1,7 @@
 /** The values where the cursor stands. */
 import { type Signal, useSignalEffect } from '@preact/signals';
 import { useState } from 'preact/hooks';
-import { type Change, textsAt } from './changes';
+import { type Change, numbersAt, ordersText } from './changes';
 import type { DriftView } from './driftView';
 
 /** A moving cursor is not read out; where it comes to rest is. */
@@ -22,7 +22,7 @@ export function CursorTable({ view, sample, stale }: CursorTableProps) {
         </caption>
         <thead>
           <tr>
-            <th scope="col">change</th>
+            <th scope="col">from the start</th>
             <th scope="col">2nd order</th>
             <th scope="col">1st order</th>
             <th scope="col">2nd − 1st</th>
@@ -40,15 +40,17 @@ export function CursorTable({ view, sample, stale }: CursorTableProps) {
 }
 
 function CursorRow({ change, sample }: { readonly change: Change; readonly sample: number }) {
-  const { first, second, difference } = textsAt(change, sample);
+  const { first, second, difference } = numbersAt(change, sample);
   return (
     <tr>
       <th scope="row" class={change.id === 'perigee' ? 'mark-perigee' : 'mark-node'}>
-        {change.title}
+        {change.title} <span class="unit">{change.unit.short}</span>
       </th>
-      <td class="drift-main">{second}</td>
-      <td>{first}</td>
-      <td>{difference}</td>
+      <td class="drift-main" data-label="2nd order">
+        {second}
+      </td>
+      <td data-label="1st order">{first}</td>
+      <td data-label="2nd − 1st">{difference}</td>
     </tr>
   );
 }
@@ -59,7 +61,7 @@ function RestingCursor({ view, sample }: Omit<CursorTableProps, 'stale'>) {
   useSignalEffect(() => {
     const at = sample.value;
     const timer = setTimeout(() => {
-      const values = view.changes.map((change) => `${change.title} ${textsAt(change, at).second}`);
+      const values = view.changes.map((change) => `${change.title} ${ordersText(change, at)}`);
       setSaid(`${view.moment(at)}: ${values.join(', ')}`);
     }, restMs);
     return () => clearTimeout(timer);

@@ -2,7 +2,7 @@
 import type { ClosedFormDrift } from '../../core/index';
 import type { PlotLine, PlotModel } from '../parts/plotModel';
 import { valueRange } from '../parts/plotScale';
-import { type Change, type ChangeId, changeCaption, changesOf, textsAt } from './changes';
+import { type Change, type ChangeId, changeCaption, changesOf, ordersText } from './changes';
 import { differenceCaption, differenceOf, differenceText } from './difference';
 import { type TimeSpan, timeTicks } from './timeAxis';
 
@@ -48,14 +48,11 @@ function changePlot(change: Change, { drift, time, spanText, isRound }: PlotInpu
   const smallest = change.id === 'localTime' ? smallestRange.minutes : smallestRange.degrees;
   return {
     id: change.id,
-    title: `${change.title}, ${change.unit.name} from the start`,
+    title: `${change.title}${weak ? ' (means little at this e)' : ''}, ${change.unit.name} from the start`,
     hue: look.hue,
-    caption: changeCaption(change, spanText) + (weak ? ' At e below 0.02 this means little.' : ''),
+    caption: changeCaption(change, spanText),
     model: modelOf(drift, time, lines, { smallest, hasTimeLabels: false }),
-    valueText: (sample) => {
-      const { first, second } = textsAt(change, sample);
-      return `${second} second order, ${first} first order`;
-    },
+    valueText: (sample) => ordersText(change, sample),
   };
 }
 
@@ -67,7 +64,7 @@ function differencePlot({ drift, time, spanText, isRound, apsis }: PlotInputs): 
     pattern: 'second',
     ...looks[id],
     weak: id === 'perigee' && isRound,
-    label: id === 'node' ? ['node', ''] : [apsis.slice(0, 4), apsis.slice(4)],
+    label: [id === 'node' ? 'node' : apsis, ''],
   }));
   return {
     id: 'difference',

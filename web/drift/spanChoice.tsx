@@ -30,13 +30,15 @@ export function SpanChoice() {
         value={spanIdOf(spanDays)}
         onChoose={choose}
       />
-      <NumberField
-        label="Any span"
-        unit="days"
-        text={typed ?? daysNumber(spanDays)}
-        error={read?.ok === false ? read.error : undefined}
-        onText={type}
-      />
+      <div class="field-group">
+        <NumberField
+          label="Any span"
+          unit="days"
+          text={typed ?? daysNumber(spanDays)}
+          error={read?.ok === false ? read.error : undefined}
+          onText={type}
+        />
+      </div>
     </section>
   );
 }

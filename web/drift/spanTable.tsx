@@ -1,5 +1,5 @@
 /** The whole span at five moments, so that every plot can be read without pointing at it. */
-import { textsAt } from './changes';
+import { numbersAt } from './changes';
 import type { DriftView } from './driftView';
 
 const parts = [0, 0.25, 0.5, 0.75, 1] as const;
@@ -18,8 +18,7 @@ export function SpanTable({ view, stale }: { readonly view: DriftView; readonly 
             <th scope="col">{view.time.epochJd === null ? 'day' : 'date'}</th>
             {view.changes.map(({ id, title, unit }) => (
               <th key={id} scope="col">
-                {title}
-                <span class="hidden-visually">, {unit.name}</span>
+                {title} <span class="unit">{unit.short}</span>
               </th>
             ))}
           </tr>
@@ -29,7 +28,11 @@ export function SpanTable({ view, stale }: { readonly view: DriftView; readonly 
             <tr key={sample}>
               <th scope="row">{view.moment(sample).replace(/^day /, '')}</th>
               {view.changes.map((change) => (
-                <TwoOrders key={change.id} {...textsAt(change, sample)} />
+                <TwoOrders
+                  key={change.id}
+                  label={`${change.title} ${change.unit.short}`}
+                  {...numbersAt(change, sample)}
+                />
               ))}
             </tr>
           ))}
@@ -39,9 +42,15 @@ export function SpanTable({ view, stale }: { readonly view: DriftView; readonly 
   );
 }
 
-function TwoOrders({ first, second }: { readonly first: string; readonly second: string }) {
+interface TwoOrdersProps {
+  readonly label: string;
+  readonly first: string;
+  readonly second: string;
+}
+
+function TwoOrders({ label, first, second }: TwoOrdersProps) {
   return (
-    <td>
+    <td data-label={label}>
       <span class="drift-main">{second}</span>
       <span class="soft small">
         <span class="hidden-visually">first order </span>

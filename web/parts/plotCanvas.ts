@@ -104,10 +104,13 @@ function timeAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlo
 function valueAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlot.Axis {
   const ticks = (plot: uPlot) => {
     const heightPx = plot.height - sizeOfTimeAxis(plot);
-    return valueTicks(modelNow().range, Math.max(2, Math.floor(heightPx / (ink.fontPx * 1.9))), { plus: true });
+    return valueTicks(modelNow().range, Math.max(2, Math.floor(heightPx / (ink.fontPx * 1.6))), { plus: true });
   };
+  const look = axisInk(ink);
   return {
-    ...axisInk(ink),
+    ...look,
+    // The zero line is an element above the canvas, stronger than the grid.
+    grid: { ...look.grid, filter: (_, splits) => splits.map((at) => (at === 0 ? null : at)) },
     size: sizePx,
     gap: 8,
     splits: (plot) => ticks(plot).map(({ at }) => at),
@@ -139,7 +142,7 @@ function seriesFor({ pattern, hue, weak }: PlotLine, ink: PlotInk): uPlot.Series
     width: widthPx,
     dash: dashPx.map((length) => length * window.devicePixelRatio),
     cap: pattern === 'first' ? 'round' : 'butt',
-    alpha: weak ? 0.55 : 1,
+    alpha: weak ? 0.6 : 1,
     points: { show: false },
   };
 }

@@ -4,7 +4,8 @@
  * Centres of labels, top to bottom in px, for wanted centres in px.
  *
  * Labels keep the order of what they name; those that would overlap are moved apart evenly about
- * their common middle, then all are brought inside 0 to `heightPx` as far as there is room.
+ * their common middle, then all are brought inside 0 to `heightPx` with half their height,
+ * as far as there is room.
  */
 export function spreadLabels(wantedPx: readonly number[], gapPx: number, heightPx: number): number[] {
   const order = wantedPx.map((_, index) => index).sort((one, other) => at(wantedPx, one) - at(wantedPx, other));
@@ -16,7 +17,8 @@ export function spreadLabels(wantedPx: readonly number[], gapPx: number, heightP
   const placed = new Array<number>(wantedPx.length).fill(0);
   for (const { members, middlePx } of groups) {
     const halfPx = ((members.length - 1) * gapPx) / 2;
-    const middle = Math.max(halfPx, Math.min(heightPx - halfPx, middlePx));
+    const reachPx = halfPx + gapPx / 2;
+    const middle = Math.max(reachPx, Math.min(heightPx - reachPx, middlePx));
     members.forEach((index, place) => {
       placed[index] = middle - halfPx + place * gapPx;
     });

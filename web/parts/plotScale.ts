@@ -46,7 +46,7 @@ export function valueTicks({ least, greatest }: Range, most: number, { plus }: {
   const digits = Math.max(0, -Math.floor(Math.log10(step) + 1e-9));
   const ticks: Tick[] = [];
   for (let k = Math.ceil(least / step); k * step <= greatest; k += 1) {
-    ticks.push({ at: k * step, text: formatNumber(k * step, { digits, plus }) });
+    ticks.push({ at: k * step, text: k === 0 ? '0' : formatNumber(k * step, { digits, plus }) });
   }
   return ticks;
 }
