@@ -13,7 +13,7 @@
  * version takes over and, since typing may have gone on meanwhile, just before the reload.
  */
 import { type ReadonlySignal, type Signal, signal } from '@preact/signals';
-import { messageSW, Workbox } from 'workbox-window';
+import type { Workbox } from 'workbox-window';
 import { type CacheReport, checkCacheMessage } from './messages';
 
 export type OfflineStatus = 'unsupported' | 'installing' | 'ready' | 'failed';
@@ -45,33 +45,45 @@ export function createOffline({ canReload, scriptUrl = './serviceWorker.js' }: O
     return { status, updateWaiting, applyUpdate: async () => false };
   }
 
-  const container = navigator.serviceWorker;
-  const workbox = new Workbox(scriptUrl);
+  let applyUpdate: Offline['applyUpdate'] = async () => false;
+  // Loaded apart: the page has its readings before it looks after its cache.
+  const start = async () => {
+    const { Workbox, messageSW } = await import('workbox-window');
+    const workbox = new Workbox(scriptUrl);
+    watchWorker(workbox, status, updateWaiting);
+    const container = navigator.serviceWorker;
+    applyUpdate = followUpdates({ container, workbox, updateWaiting, canReload });
+    status.value = await install(container, workbox, messageSW);
+  };
+  start().catch(() => {
+    status.value = 'failed';
+  });
+  return { status, updateWaiting, applyUpdate: () => applyUpdate() };
+}
+
+function watchWorker(workbox: Workbox, status: Signal<OfflineStatus>, updateWaiting: Signal<boolean>): void {
   workbox.addEventListener('waiting', () => {
     updateWaiting.value = true;
   });
   workbox.addEventListener('redundant', () => {
     if (status.value === 'installing') status.value = 'failed';
   });
-  const applyUpdate = followUpdates({ container, workbox, updateWaiting, canReload });
-  void install(container, workbox).then((outcome) => {
-    status.value = outcome;
-  });
-  return { status, updateWaiting, applyUpdate };
 }
 
-async function install(container: ServiceWorkerContainer, workbox: Workbox): Promise<OfflineStatus> {
+type Ask = typeof import('workbox-window').messageSW;
+
+async function install(container: ServiceWorkerContainer, workbox: Workbox, ask: Ask): Promise<OfflineStatus> {
   try {
     await workbox.register();
     const { active } = await container.ready;
-    return active && (await everythingCached(active)) ? 'ready' : 'failed';
+    return active && (await everythingCached(active, ask)) ? 'ready' : 'failed';
   } catch {
     return 'failed';
   }
 }
 
-async function everythingCached(worker: ServiceWorker): Promise<boolean> {
-  const answer: Promise<CacheReport> = messageSW(worker, { type: checkCacheMessage });
+async function everythingCached(worker: ServiceWorker, ask: Ask): Promise<boolean> {
+  const answer: Promise<CacheReport> = ask(worker, { type: checkCacheMessage });
   const silence = new Promise<null>((resolve) => setTimeout(resolve, checkTimeoutMs, null));
   const report = await Promise.race([answer, silence]);
   return report !== null && report.expected > 0 && report.cached === report.expected;

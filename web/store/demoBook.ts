@@ -10,6 +10,12 @@ import type { Outcome, Shelf } from './rows';
 
 const demoSetting = 'demoBook';
 
+/** Whether the demo book was put in or taken out before; false too where the storage does not answer. */
+export async function isDemoBookDecided(shelf: Shelf): Promise<boolean> {
+  const setting = await shelf.look((rows) => rows.setting(demoSetting));
+  return setting.ok && setting.value !== undefined;
+}
+
 /** Answers whether the candidates were put in by this call. */
 export function seedDemoBook(
   shelf: Shelf,

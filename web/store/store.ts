@@ -6,7 +6,7 @@ import type { ReadonlySignal } from '@preact/signals';
 import { createBook } from './book';
 import type { Book } from './bookContract';
 import { openDatabaseShelf } from './databaseShelf';
-import { removeDemoBook, seedDemoBook } from './demoBook';
+import { isDemoBookDecided, removeDemoBook, seedDemoBook } from './demoBook';
 import { createDraftKeeper, type DraftKeeper } from './draft';
 import type { StoreFailure } from './failure';
 import { flushWhenLeaving } from './leaving';
@@ -14,7 +14,6 @@ import { createMemoryShelf } from './memoryShelf';
 import { createPersistence, type Persistence } from './persistence';
 import type { Clock, Outcome, Shelf, ShelfState } from './rows';
 import { loadSettings, type SettingsKeeper } from './settings';
-import { skerryBook } from './skerryBook';
 import { joinTabs, type Tabs } from './tabs';
 
 export interface Store {
@@ -47,7 +46,11 @@ const millisecondsPerDay = 86_400_000;
 
 async function prepareBook(shelf: Shelf, book: Book, clock: Clock): Promise<void> {
   const now = clock();
-  await seedDemoBook(shelf, { candidates: skerryBook, savedAtIso: now.toISOString() });
+  if (!(await isDemoBookDecided(shelf))) {
+    // Needed once in the life of a book, so it is not among what every start loads.
+    const { skerryBook } = await import('./skerryBook');
+    await seedDemoBook(shelf, { candidates: skerryBook, savedAtIso: now.toISOString() });
+  }
   // Not awaited, so that the start does not wait; whatever reads the book next queues behind it.
   void book.purgeRemoved(new Date(now.getTime() - removedKeptDays * millisecondsPerDay));
 }
