@@ -20,14 +20,16 @@ export interface SecularRates {
 /**
  * Rates now, of mean elements (km, rad), in the inertial equatorial frame of the body.
  *
- * @throws Error where the elements are marked osculating, or e is outside [0, 1), or a ≤ 0.
+ * @throws Error where the elements are marked osculating, e is outside [0, 1), a ≤ 0, or a or i is not finite.
  */
 export function secularRates(body: Body, mean: MeanElements, theory: Theory): SecularRates {
   if (mean.kind !== undefined && mean.kind !== 'mean') {
     throw new Error(`secular rates need mean elements, got ${String(mean.kind)}`);
   }
-  const { semiMajorAxisKm: a, eccentricity: e } = mean;
-  if (!(a > 0 && e >= 0 && e < 1)) throw new Error(`secular rates need a > 0 and 0 ≤ e < 1, got a ${a}, e ${e}`);
+  const { semiMajorAxisKm: a, eccentricity: e, inclinationRad: i } = mean;
+  if (!(a > 0 && a < Infinity && e >= 0 && e < 1 && Number.isFinite(i))) {
+    throw new Error(`secular rates need a > 0, 0 ≤ e < 1 and finite a and i, got a ${a}, e ${e}, i ${i}`);
+  }
   return theory === 'first' ? firstOrder(body, mean) : secondOrder(body, mean);
 }
 

@@ -21,28 +21,38 @@ const shapes = fc.tuple(
 );
 
 describe('secular rates', () => {
-  it.each(['first', 'second'] as Theory[])('mirror the node and keep the perigee under i → 180° − i (%s order)', (theory) => {
-    fc.assert(
-      fc.property(shapes, ([a, e, i]) => {
-        const direct = secularRates(earth, orbit(a, e, i), theory);
-        const mirrored = secularRates(earth, orbit(a, e, Math.PI - i), theory);
-        expect(mirrored.nodeRadPerS).toBeCloseTo(-direct.nodeRadPerS, 18);
-        expect(mirrored.perigeeRadPerS).toBeCloseTo(direct.perigeeRadPerS, 18);
-        expect(mirrored.meanAnomalyRadPerS).toBeCloseTo(direct.meanAnomalyRadPerS, 15);
-      }),
-    );
-  });
+  it.each(['first', 'second'] as Theory[])(
+    'mirror the node and keep the perigee under i → 180° − i (%s order)',
+    (theory) => {
+      fc.assert(
+        fc.property(shapes, ([a, e, i]) => {
+          const direct = secularRates(earth, orbit(a, e, i), theory);
+          const mirrored = secularRates(earth, orbit(a, e, Math.PI - i), theory);
+          expect(mirrored.nodeRadPerS).toBeCloseTo(-direct.nodeRadPerS, 18);
+          expect(mirrored.perigeeRadPerS).toBeCloseTo(direct.perigeeRadPerS, 18);
+          expect(mirrored.meanAnomalyRadPerS).toBeCloseTo(direct.meanAnomalyRadPerS, 15);
+        }),
+      );
+    },
+  );
 
   it('of both orders differ by J2² and J4 alone: the difference falls a hundredfold when both shrink tenfold', () => {
     const scaled = (factor: number) => {
       const zonals = [0, 0, (earth.zonals[2] ?? 0) * factor, 0, (earth.zonals[4] ?? 0) * factor ** 2];
       const body = { ...earth, zonals };
       const mean = orbit(7000, 0.05, 0.9);
-      return (
-        secularRates(body, mean, 'second').nodeRadPerS - secularRates(body, mean, 'first').nodeRadPerS
-      );
+      return secularRates(body, mean, 'second').nodeRadPerS - secularRates(body, mean, 'first').nodeRadPerS;
     };
     expect(scaled(1) / scaled(0.1)).toBeCloseTo(100, 6);
+  });
+
+  it.each([
+    [Number.NaN, 1],
+    [Number.POSITIVE_INFINITY, 1],
+    [7000, Number.NaN],
+    [7000, Number.POSITIVE_INFINITY],
+  ])('refuse a = %s with i = %s, rather than give rates that are not numbers', (a, i) => {
+    expect(() => secularRates(earth, orbit(a, 0.1, i), 'second')).toThrow(/finite/);
   });
 
   it.each([-1, 1, Number.NaN])('refuse e = %s', (e) => {
