@@ -35,8 +35,8 @@ const tolerances = [
 ] as const;
 
 /**
- * Round trip: 1 mm and 1 µm/s, asked of every state here. A state for which the conversion reports no convergence
- * would be allowed and is counted; there is none in the list.
+ * Round trip: 1 mm and 1 µm/s. A state may also be said not to converge, but every one of this list does, so that is
+ * asked too.
  */
 const roundTrip = { km: 1e-6, kmPerS: 1e-9 };
 
