@@ -15,7 +15,7 @@ export function Details({ entry }: { readonly entry: ListedEntry }) {
   const inFront = view.detailsInFront.value;
   useEffect(() => {
     // Where list and details share the screen, the focus stays in the list.
-    const listIsHidden = document.querySelector('.book-list')?.getClientRects().length === 0;
+    const listIsHidden = document.querySelector('.book-entries')?.getClientRects().length === 0;
     if (inFront && listIsHidden) heading.current?.focus();
   }, [inFront]);
   return (

@@ -5,9 +5,9 @@ export function StorageCaution() {
   const { store } = useApp();
   if (store.state.value !== 'memory') return null;
   return (
-    <p class="book-caution">
-      This book is gone when the tab closes. To keep it, open Driftbook in an ordinary window where sites may store
-      data, or add it to the home screen; until then, write down what you need.
+    <p class="book-caution book-storage">
+      To keep this book, open Driftbook in an ordinary window where sites may store data. Until then, write down what
+      you need before the tab closes.
     </p>
   );
 }
