@@ -16,12 +16,14 @@ test.afterEach(async () => {
   await server.stop();
 });
 
-const statusOf = (page: Page) => page.getByText(/ready offline|ready for offline|no offline here/i).first();
+const statusOf = (page: Page) => page.getByRole('status').filter({ hasText: /offline/ });
+const ready = /(?<!not )ready offline/;
+const notReady = /not ready offline/;
 
 async function openAndGetReady(context: BrowserContext): Promise<Page> {
   const page = await context.newPage();
   await page.goto(server.url);
-  await expect(statusOf(page)).toHaveText('ready offline', { timeout: 20_000 });
+  await expect(statusOf(page)).toHaveText(ready, { timeout: 20_000 });
   return page;
 }
 
@@ -49,12 +51,12 @@ test('starts again with the server gone, and asks nothing of any other origin', 
   const page = await openAndGetReady(context);
   await server.stop();
   await page.reload();
-  await expect(statusOf(page)).toHaveText('ready offline');
+  await expect(statusOf(page)).toHaveText(ready);
   const notices = await page.evaluate(async () => (await fetch('./notices.txt')).text());
   expect(notices).toContain('preact');
   const second = await context.newPage();
   await second.goto(`${server.url}#/book`);
-  await expect(statusOf(second)).toHaveText('ready offline');
+  await expect(statusOf(second)).toHaveText(ready);
   expect(watched).toEqual({ strayRequests: [], cspViolations: [], pageErrors: [] });
 });
 
@@ -62,18 +64,18 @@ test('a file whose fetch fails keeps it from being called ready', async ({ conte
   await context.route(/notices\.txt/, (route) => route.abort());
   const page = await context.newPage();
   await page.goto(server.url);
-  await expect(statusOf(page)).toHaveText('not ready offline', { timeout: 20_000 });
+  await expect(statusOf(page)).toHaveText(notReady, { timeout: 20_000 });
 });
 
 test('a file that the browser dropped is fetched again, and missed when that is impossible', async ({ context }) => {
   const page = await openAndGetReady(context);
   await dropFromCache(page, 'notices.txt');
   await page.reload();
-  await expect(statusOf(page)).toHaveText('ready offline');
+  await expect(statusOf(page)).toHaveText(ready);
   await dropFromCache(page, 'notices.txt');
   await server.stop();
   await page.reload();
-  await expect(statusOf(page)).toHaveText('not ready offline');
+  await expect(statusOf(page)).toHaveText(notReady);
 });
 
 async function dropFromCache(page: Page, name: string): Promise<void> {
@@ -109,11 +111,11 @@ test.describe('a new version', () => {
 
     await updateButton(page).click();
     await expect.poll(() => scriptsOf(page).catch(() => oldScripts), { timeout: 15_000 }).not.toEqual(oldScripts);
-    await expect(statusOf(page)).toHaveText('ready offline');
+    await expect(statusOf(page)).toHaveText(ready);
     await expect(updateButton(page)).toHaveCount(0);
     await server.stop();
     await page.reload();
-    await expect(statusOf(page)).toHaveText('ready offline');
+    await expect(statusOf(page)).toHaveText(ready);
   });
 
   test('applied in one tab, leaves the other as it is until that one asks too', async ({ context }) => {
@@ -138,9 +140,9 @@ test('the folder works below any path', async ({ context }) => {
   const watched = await watch(context, parent.url);
   const page = await context.newPage();
   await page.goto(`${parent.url}dist/`);
-  await expect(statusOf(page)).toHaveText('ready offline', { timeout: 20_000 });
+  await expect(statusOf(page)).toHaveText(ready, { timeout: 20_000 });
   await parent.stop();
   await page.reload();
-  await expect(statusOf(page)).toHaveText('ready offline');
+  await expect(statusOf(page)).toHaveText(ready);
   expect(watched.cspViolations).toEqual([]);
 });
