@@ -25,6 +25,8 @@ export default defineConfig({
     target: 'es2022',
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
+    // What several places share is one file: fewer requests, and it packs better than many small ones.
+    rolldownOptions: { output: { codeSplitting: { groups: [{ name: 'shared', minShareCount: 2 }] } } },
   },
   preview: { headers: { 'Content-Security-Policy': contentSecurityPolicy } },
 });
