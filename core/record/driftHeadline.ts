@@ -46,7 +46,7 @@ export function firstOrderSentence(orbit: ResolvedOrbit, rateUnit: RateUnitId): 
   const apsis = apsisName(orbit.body);
   const e = orbit.mean.eccentricity;
   const round =
-    e < smallEccentricity ? ` At e\u00a0${formatNumber(e, { digits: 4 })} ${apsis} drift means little.` : '';
+    e < smallEccentricity ? ` At e\u00a0${formatNumber(e, { digits: 4 })} the ${apsis} rate means little.` : '';
   return `First order alone: node ${node} ${per}, ${apsis} ${perigee}${localTime}.${round}`;
 }
 
@@ -67,7 +67,7 @@ const turnMin = 24 * 60;
 
 function localTimeText(perDayMin: number): string {
   return turnMin / Math.abs(perDayMin) < slowTurnDays
-    ? `${formatNumber(perDayMin, { digits: 2, plus: true })} min a day`
+    ? `${formatNumber(perDayMin, { digits: 1, plus: true })} min a day`
     : `${formatNumber(perDayMin * yearDays, { digits: 1, plus: true })} min a year`;
 }
 
@@ -75,7 +75,7 @@ function localTimeSpans(orbit: ResolvedOrbit): HeadlineSpan[] {
   const perDayMin = localTimePerDayMin(orbit, 'second');
   if (perDayMin === null) return [{ text: `Local time needs the year and the spin of ${orbit.body.name}.` }];
   const turnDays = turnMin / Math.abs(perDayMin);
-  const turn = `, once round the clock in ${formatNumber(turnDays, { digits: 1 })} days.`;
+  const turn = `, once round in ${formatNumber(turnDays, { digits: turnDays < 100 ? 1 : 0 })} days.`;
   return [
     { text: 'Local time', mark: 'node', strong: true },
     { text: ' drifts ' },

@@ -74,10 +74,15 @@ interface OrderedLines {
 /** Lines start at zero and are straight: the end is the largest. */
 const largestOf = (line: Float64Array): number => Math.abs(line.at(-1) ?? 0);
 
+/** More figures than these are noise to a reader. */
+const mostFigures = 6;
+
 function digitsFor({ first, second }: OrderedLines): number {
   const difference = Math.abs((second.at(-1) ?? 0) - (first.at(-1) ?? 0));
   const size = difference > 1e-9 ? difference : Math.max(largestOf(second) / 100, 1e-3);
-  return Math.max(1, Math.min(6, 2 - Math.floor(Math.log10(size))));
+  const wanted = 2 - Math.floor(Math.log10(size));
+  const most = mostFigures - 1 - Math.floor(Math.log10(Math.max(1, largestOf(first), largestOf(second))));
+  return Math.max(1, Math.min(6, wanted, most));
 }
 
 /** Second order, first order and second minus first at a sample, signed; the unit is said elsewhere. */
@@ -95,9 +100,9 @@ export function ordersText(change: Change, sample: number): string {
   return `${second}${symbol} second order, ${first}${symbol === '°' ? symbol : ''} first`;
 }
 
-/** “After 5 years: +1805.12° second order, +1802.30° first; they differ by 2.82°.” */
+/** “After 5 years: +1805.12° second order, +1802.30° first; 2.82° apart.” */
 export function changeCaption(change: Change, spanText: string): string {
   const end = change.second.length - 1;
   const apart = numbersAt(change, end).difference.replace(/^[+\u2212]/, '');
-  return `After ${spanText}: ${ordersText(change, end)}; they differ by ${apart}${change.unit.symbol}.`;
+  return `After ${spanText}: ${ordersText(change, end)}; ${apart}${change.unit.symbol} apart.`;
 }

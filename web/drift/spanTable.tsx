@@ -26,7 +26,9 @@ export function SpanTable({ view, stale }: { readonly view: DriftView; readonly 
         <tbody>
           {samples.map((sample) => (
             <tr key={sample}>
-              <th scope="row">{view.moment(sample).replace(/^day /, '')}</th>
+              <th scope="row">
+                <Moment text={view.moment(sample).replace(/^day /, '')} />
+              </th>
               {view.changes.map((change) => (
                 <TwoOrders
                   key={change.id}
@@ -57,5 +59,15 @@ function TwoOrders({ label, first, second }: TwoOrdersProps) {
         {first}
       </span>
     </td>
+  );
+}
+
+/** A date and its time stay whole; the line breaks between them. */
+function Moment({ text }: { readonly text: string }) {
+  const [date, time] = text.split(' ');
+  return (
+    <>
+      <span>{date}</span> {time && <span>{time}</span>}
+    </>
   );
 }

@@ -34,7 +34,7 @@ export function Plot({ name, model, sample, momentText, valueText, onSample }: P
     event.preventDefault();
     onSample(next);
   };
-  if (failed) return <p class="plot-failed">This browser cannot draw the plot. The tables hold the same values.</p>;
+  if (failed) return <p class="plot-failed">Not drawn, since this browser cannot: the tables hold the same values.</p>;
   return (
     <div class={`plot${model.hasTimeLabels ? ' has-time' : ''}`}>
       <div class="plot-canvas" ref={host} aria-hidden="true" />

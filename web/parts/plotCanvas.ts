@@ -78,10 +78,10 @@ function optionsFor({ host, area }: PlotPlace, modelNow: () => PlotModel): uPlot
 /** Distances in px from the host's edges to the plotting area. */
 function insets(host: HTMLElement, area: HTMLElement) {
   return {
-    left: area.offsetLeft,
-    top: area.offsetTop,
-    right: host.clientWidth - area.offsetLeft - area.offsetWidth,
-    bottom: host.clientHeight - area.offsetTop - area.offsetHeight,
+    left: area.offsetLeft - host.offsetLeft,
+    top: area.offsetTop - host.offsetTop,
+    right: host.offsetLeft + host.clientWidth - area.offsetLeft - area.offsetWidth,
+    bottom: host.offsetTop + host.clientHeight - area.offsetTop - area.offsetHeight,
   };
 }
 
