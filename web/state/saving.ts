@@ -70,7 +70,7 @@ export function createSaving(parts: SavingParts): Saving {
 
   const open = async (next: OpenCandidate): Promise<boolean> => {
     const leaving = document.draft.value;
-    if (document.changed.value && leaving.id !== next.candidate.id) {
+    if (document.changed.value) {
       if (!(await save('kept when another orbit was opened'))) return false;
       announcer.say({
         text: `The changes of “${leaving.name}” were saved as a revision of their own.`,
