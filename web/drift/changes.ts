@@ -100,9 +100,9 @@ export function ordersText(change: Change, sample: number): string {
   return `${second}${symbol} second order, ${first}${symbol === '°' ? symbol : ''} first`;
 }
 
-/** “After 5 years: +1805.12° second order, +1802.30° first; 2.82° apart.” */
+/** “Rates of now held 5 years: +1805.12° second order, +1802.30° first; 2.82° apart.” */
 export function changeCaption(change: Change, spanText: string): string {
   const end = change.second.length - 1;
   const apart = numbersAt(change, end).difference.replace(/^[+\u2212]/, '');
-  return `After ${spanText}: ${ordersText(change, end)}; ${apart}${change.unit.symbol} apart.`;
+  return `Rates of now held ${spanText}: ${ordersText(change, end)}; ${apart}${change.unit.symbol} apart.`;
 }

@@ -27,7 +27,7 @@ export function differenceCaption(drift: ClosedFormDrift, difference: Difference
   const unit = localTimeUnit(Math.abs(apartS));
   const localTime =
     second.localTimeS === null ? '' : `, local time ${threeFigures(apartS * unit.perCore)}${unit.symbol}`;
-  return `After ${spanText}: ${differenceText(difference, end)}${localTime}.`;
+  return `Rates of now held ${spanText}: ${differenceText(difference, end)}${localTime}.`;
 }
 
 function threeFigures(value: number): string {

@@ -7,7 +7,7 @@ export interface Preferences {
   set: SettingsKeeper['set'];
 }
 
-const defaults = { lighting: 'room', lengthUnit: 'km', rateUnit: 'degPerDay', spanDays: 365 * 5 } as const;
+const defaults = { lighting: 'room', lengthUnit: 'km', rateUnit: 'degPerDay', spanDays: 5 * 365.25 } as const;
 
 export function createPreferences(settings: SettingsKeeper): Preferences {
   return {

@@ -56,7 +56,7 @@ describe('changes from the start', () => {
     const node = changes[1];
     if (!node) throw new Error('expected a node');
     expect(changeCaption(node, '5 years')).toMatch(
-      /^After 5 years: \+1[78]\d\d\.\d\d° second order, \+1[78]\d\d\.\d\d° first; \d\.\d\d° apart\.$/,
+      /^Rates of now held 5 years: \+1[78]\d\d\.\d\d° second order, \+1[78]\d\d\.\d\d° first; \d\.\d\d° apart\.$/,
     );
   });
 });
@@ -69,7 +69,7 @@ describe('the difference of the orders', () => {
       9,
     );
     expect(differenceCaption(drift, difference, '5 years')).toMatch(
-      /^After 5 years: node \u2212\d\.\d\d°, perigee [+\u2212][\d.]+°, local time \u2212[\d.]+\u202fmin\.$/,
+      /^Rates of now held 5 years: node \u2212\d\.\d\d°, perigee [+\u2212][\d.]+°, local time \u2212[\d.]+\u202fmin\.$/,
     );
   });
 });
