@@ -26,7 +26,11 @@ export default defineConfig({
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
     // What several places share is one file: fewer requests, and it packs better than many small ones.
-    rolldownOptions: { output: { codeSplitting: { groups: [{ name: 'shared', minShareCount: 2 }] } } },
+    rolldownOptions: {
+      // Core is pure: importing its table of contents needs none of the files that are not used from it.
+      treeshake: { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] },
+      output: { codeSplitting: { groups: [{ name: 'shared', minShareCount: 2 }] } },
+    },
   },
   preview: { headers: { 'Content-Security-Policy': contentSecurityPolicy } },
 });

@@ -95,3 +95,4 @@ export {
 export { smallEccentricity, warningsOf } from './record/warnings';
 export type { WorkingSymbol } from './record/workings/symbols';
 export type { Working, WorkingConstant, WorkingLine, WorkingValue } from './record/workings/working';
+export { workingOf } from './record/workings/workingOf';

@@ -1,5 +1,5 @@
 /** A reading as text, in the units the user has chosen. */
-import { formatQuantity, type Quantity, type Reading, unitOf } from '../../core/index';
+import { formatNumber, formatQuantity, type Quantity, type Reading, unitOf } from '../../core/index';
 import { useApp } from '../state/appContext';
 
 export interface ReadingText {
@@ -22,6 +22,22 @@ const spoken = (symbol: string): string => symbol.replace(/^deg\b/, '°');
 
 export function quantityText(quantity: Quantity, value: number, unitId?: string): ReadingText {
   return { value: formatQuantity(quantity, value, unitId), unit: spoken(unitOf(quantity, unitId).symbol) };
+}
+
+/** Two significant figures: all that a sensitivity or a doubt is worth. */
+export function roundedText(
+  quantity: Quantity,
+  value: number,
+  options: { unitId?: string | undefined; plus: boolean },
+) {
+  const shown = value * unitOf(quantity, options.unitId).perCore;
+  const leading = Math.floor(Math.log10(Math.abs(shown) || 1));
+  return formatNumber(shown, { digits: Math.min(7, Math.max(0, 1 - leading)), plus: options.plus });
+}
+
+/** How wrong the method may be, such as "± 0.00016"; empty where no figure is known. */
+export function doubtText({ quantity, doubt }: Reading, unitId?: string): string {
+  return doubt && doubt.size > 0 ? `± ${roundedText(quantity, doubt.size, { unitId, plus: false })}` : '';
 }
 
 export function useReadingText(reading: Reading): ReadingText {

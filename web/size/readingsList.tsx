@@ -1,6 +1,6 @@
 /** The readings: value large, what would change it small, the working behind a tap. */
-import { formatNumber, type Reading, unitOf } from '../../core/index';
-import { quantityText, usePreferredUnit, useReadingText } from '../parts/readingText';
+import type { Reading } from '../../core/index';
+import { doubtText, quantityText, roundedText, usePreferredUnit, useReadingText } from '../parts/readingText';
 import { useApp } from '../state/appContext';
 
 const levelNames = { geometry: '', first: 'first order', second: 'second order' } as const;
@@ -62,7 +62,7 @@ function ReadingRow({ reading }: { readonly reading: Reading }) {
 
 /** What one more kilometre, hundredth of a degree or thousandth of e would do. */
 function Sensitivity({ reading }: { readonly reading: Reading }) {
-  const unit = usePreferredUnit()(reading.quantity);
+  const unitId = usePreferredUnit()(reading.quantity);
   const sensitivities = reading.sensitivities();
   if (!sensitivities) return null;
   const { perKm, perHundredthDegree, perThousandth } = sensitivities;
@@ -70,7 +70,7 @@ function Sensitivity({ reading }: { readonly reading: Reading }) {
     { value: perKm, per: '1 km' },
     { value: perHundredthDegree, per: '0.01°' },
     { value: perThousandth, per: '0.001 e' },
-  ].map(({ value, per }) => `+${per} ${changeText(reading, value, unit)}`);
+  ].map(({ value, per }) => `+${per} ${roundedText(reading.quantity, value, { unitId, plus: true })}`);
   return (
     <span class="reading-sub">
       {parts.map((part) => (
@@ -80,20 +80,13 @@ function Sensitivity({ reading }: { readonly reading: Reading }) {
   );
 }
 
-/** Two figures are all that a sensitivity is worth. */
-function changeText({ quantity }: Reading, value: number, unitId?: string): string {
-  const change = value * unitOf(quantity, unitId).perCore;
-  const leading = Math.floor(Math.log10(Math.abs(change) || 1));
-  return formatNumber(change, { digits: Math.min(7, Math.max(0, 1 - leading)), plus: true });
-}
-
 function Order({ reading }: { readonly reading: Reading }) {
   const unit = usePreferredUnit()(reading.quantity);
   if (!reading.orders) return null;
   const first = quantityText(reading.quantity, reading.orders.first, unit).value;
   return (
     <span class="reading-order">
-      {levelNames[reading.level]}; first order {first}
+      {[levelNames[reading.level], doubtText(reading, unit)].filter(Boolean).join(' ')}; first order {first}
     </span>
   );
 }

@@ -17,6 +17,7 @@ const WorkingView = later(async () => (await import('./workingView')).WorkingVie
 
 export function SizePlace() {
   const { document, openWorking } = useApp();
+  const orbit = document.orbit.value;
   const reading = document.readings.value.find(({ id }) => id === openWorking.value);
   return (
     <>
@@ -25,7 +26,7 @@ export function SizePlace() {
           <Headline />
           <KeyReadings />
         </div>
-        {reading ? <WorkingView reading={reading} /> : <Pictures />}
+        {orbit && reading ? <WorkingView orbit={orbit} reading={reading} /> : <Pictures />}
       </section>
       <aside class="numbers" aria-label="Entry and readings">
         <EntryPanel />

@@ -1,12 +1,12 @@
 /** The working of a reading: formula, numbers put in, constants with their source, first against second order. */
 import { useEffect, useRef } from 'preact/hooks';
-import type { Reading, Working } from '../../core/index';
-import { quantityText, usePreferredUnit, useReadingText } from '../parts/readingText';
+import { type Reading, type ResolvedOrbit, type Working, workingOf } from '../../core/index';
+import { doubtText, quantityText, usePreferredUnit, useReadingText } from '../parts/readingText';
 import { useApp } from '../state/appContext';
 import { WorkingLines, WorkingTables } from './workingLines';
 import './working.css';
 
-export function WorkingView({ reading }: { readonly reading: Reading }) {
+export function WorkingView({ orbit, reading }: { readonly orbit: ResolvedOrbit; readonly reading: Reading }) {
   const { openWorking } = useApp();
   const title = useRef<HTMLHeadingElement>(null);
   const { id } = reading;
@@ -14,7 +14,7 @@ export function WorkingView({ reading }: { readonly reading: Reading }) {
     if (id) title.current?.focus();
   }, [id]);
   const text = useReadingText(reading);
-  const working = reading.working();
+  const working = workingOf(orbit, reading.id);
   const close = () => {
     openWorking.value = null;
   };
@@ -40,6 +40,7 @@ export function WorkingView({ reading }: { readonly reading: Reading }) {
       />
       <WorkingLines title="Second order, J2 + J2² + J4" lines={working.secondLines} working={working} />
       <Orders reading={reading} working={working} />
+      <DoubtSentence reading={reading} />
       <p class="working-note">{working.note}</p>
     </article>
   );
@@ -58,6 +59,22 @@ function OtherUnits({ reading }: { readonly reading: Reading }) {
         );
       })}
     </ul>
+  );
+}
+
+/** What the method leaves out, and how much that may come to. */
+function DoubtSentence({ reading }: { readonly reading: Reading }) {
+  const unit = usePreferredUnit()(reading.quantity);
+  const text = doubtText(reading, unit);
+  if (!reading.doubt || text === '') return null;
+  return (
+    <p class="working-orders">
+      {reading.doubt.reason} The {reading.label.toLowerCase()} now is good to{' '}
+      <strong>
+        {text} {quantityText(reading.quantity, 0, unit).unit}
+      </strong>
+      .
+    </p>
   );
 }
 

@@ -2,7 +2,6 @@
 import { twoPi } from '../../numerics/angles';
 import { ellipsoidHeightKm, heightsAlongOrbit } from '../../orbit/heights';
 import { stateFromMean } from '../../orbit/meanState';
-import { noteOnly } from '../workings/working';
 import type { ReadingId, ReadingPoint, ReadingSpec } from './reading';
 
 export type HeightId = 'leastHeight' | 'greatestHeight';
@@ -21,9 +20,6 @@ export function heightValues({ body, mean }: ReadingPoint): Partial<Record<Readi
   }
 }
 
-const note =
-  'Found along one revolution: short-period J2 terms put back, heights taken along the normal of the ellipsoid. No closed formula.';
-
 export function heightReading(id: HeightId, label: string): ReadingSpec {
   const evaluate = ({ body, mean }: ReadingPoint) => {
     const { leastKm, greatestKm } = heightsAlongOrbit(body, mean);
@@ -38,7 +34,6 @@ export function heightReading(id: HeightId, label: string): ReadingSpec {
     ordered: false,
     evaluate,
     slopeOf: (point) => heightAtFixedPlace(point, id),
-    working: (point) => noteOnly(evaluate(point), note),
   };
 }
 

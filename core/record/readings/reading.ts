@@ -1,11 +1,10 @@
 /**
- * A reading: one number about an orbit that knows its unit, the method that made it, what the
- * inputs' errors do to it, and its working.
+ * A reading: one number about an orbit that knows its unit, the method that made it and what the
+ * inputs' errors do to it. Its working is `workingOf`, apart, since few readings are asked for it.
  */
 import type { Body } from '../../bodies/body';
 import type { MeanElements, Theory } from '../../orbit/elements';
 import type { Quantity } from '../units';
-import type { Working } from '../workings/working';
 import type { Doubt } from './doubt';
 
 export type ReadingLevel = 'geometry' | 'first' | 'second';
@@ -49,8 +48,6 @@ export interface Reading {
   readonly doubt: Doubt | null;
   /** What has to be said beside the number. */
   readonly remark?: string;
-  /** Worked out when asked for. */
-  readonly working: () => Working;
 }
 
 /** What readings are worked out from. */
@@ -76,7 +73,6 @@ export interface ReadingSpec {
   readonly slopeOf?: (point: ReadingPoint) => (point: ReadingPoint) => number;
   readonly alternates?: (point: ReadingPoint, value: number) => readonly Alternate[];
   readonly remark?: (point: ReadingPoint, value: number) => string | undefined;
-  readonly working: (point: ReadingPoint) => Working;
   /** False where the elements a, i, e have no part. */
   readonly sensitive?: false;
 }

@@ -9,7 +9,36 @@ import { sensitivitiesOf } from './sensitivity';
 import { shapeReadings } from './shape';
 import { timeReadings } from './time';
 
-const specs: readonly ReadingSpec[] = [...driftReadings, ...nodeReadings, ...timeReadings, ...shapeReadings];
+/** What an orbit is chosen by comes first, what it is made of last. */
+const shownOrder = {
+  nodeRate: 0,
+  localTimeDrift: 1,
+  perigeeRate: 2,
+  nodalPeriod: 3,
+  revolutionsPerDay: 4,
+  westwardShift: 5,
+  perigeeAltitude: 6,
+  apogeeAltitude: 7,
+  leastHeight: 8,
+  greatestHeight: 9,
+  eCos: 10,
+  eSin: 11,
+  apsidalPeriod: 12,
+  nodeAtEpoch: 13,
+  localTimeAscending: 14,
+  localTimeDescending: 15,
+  revolutionsPerNodalDay: 16,
+  anomalisticPeriod: 17,
+  keplerianPeriod: 18,
+  speedAtPerigee: 19,
+  semiMajorAxis: 20,
+  eccentricity: 21,
+  inclination: 22,
+} as const satisfies Readonly<Record<ReadingId, number>>;
+
+const specs: readonly ReadingSpec[] = [...driftReadings, ...nodeReadings, ...timeReadings, ...shapeReadings].sort(
+  (one, other) => shownOrder[one.id] - shownOrder[other.id],
+);
 
 /** All readings the orbit has, at the given level; what a lacking epoch, day or year rules out is in `absentReadings`. */
 export function readingsOf(orbit: ReadingPoint, theory: Theory = 'second'): Reading[] {
@@ -58,7 +87,6 @@ function readingOf(spec: ReadingSpec, orbit: ReadingPoint, theory: Theory, known
     alternates,
     doubt: doubtOf(id, orbit, theory),
     ...(remark === undefined ? {} : { remark }),
-    working: () => spec.working(orbit),
   };
 }
 

@@ -1,6 +1,7 @@
 /** Workings of the readings that rest on secular rates, and of those that are geometry alone. */
 import type { Body } from '../../bodies/body';
 import type { MeanElements } from '../../orbit/elements';
+import { type Expr, mul, num } from '../formula';
 import { firstOrderLines, type RateId, rateConstants, secondOrderLines } from './rates';
 import type { SymbolId } from './symbols';
 import { buildWorking, type LineSpec, type Working, type WorkingParts } from './working';
@@ -9,6 +10,8 @@ export interface WorkingOrbit {
   readonly body: Body;
   readonly mean: MeanElements;
 }
+
+export const twoPiExpr: Expr = mul(2, num(Math.PI, 'π'));
 
 const rateSource =
   'First order: Kozai, Astron. J. 64, 367 (1959). Second order: Brouwer, Astron. J. 64, 378 (1959), J2, J2² and J4; it lacks J6 and above. Elements are Brouwer mean elements.';

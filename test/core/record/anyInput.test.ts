@@ -15,6 +15,7 @@ import { headlineOf } from '../../../core/record/headline';
 import { absentReadings, readingsOf } from '../../../core/record/readings/readings';
 import { resolveOrbit } from '../../../core/record/resolveOrbit';
 import { warningsOf } from '../../../core/record/warnings';
+import { workingOf } from '../../../core/record/workings/workingOf';
 import { candidateWith } from './candidates';
 
 /** What people and pastes put into fields: numbers of every size, near numbers, and rubbish. */
@@ -99,7 +100,7 @@ describe('whatever is typed', () => {
         for (const reading of readings) {
           expect(Number.isNaN(reading.value), reading.id).toBe(false);
           reading.sensitivities();
-          reading.working();
+          workingOf(orbit, reading.id);
         }
         absentReadings(orbit);
         warningsOf(orbit, readings);

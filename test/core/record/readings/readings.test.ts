@@ -45,6 +45,14 @@ describe('readings', () => {
     expect(shown('westwardShift') * 412).toBeCloseTo(360 * 29, 1);
   });
 
+  it('begin with what an orbit is chosen by', () => {
+    expect(
+      readingsOf(earth)
+        .slice(0, 6)
+        .map(({ id }) => id),
+    ).toEqual(['nodeRate', 'localTimeDrift', 'perigeeRate', 'nodalPeriod', 'revolutionsPerDay', 'westwardShift']);
+  });
+
   it('say a rate per revolution, per day and per year alike', () => {
     const { value, alternates } = reading('nodeRate');
     const [revolution, day, year] = alternates;
@@ -73,10 +81,10 @@ describe('readings', () => {
     const absent = absentReadings(point).map(({ id }) => id);
     expect(absent).toEqual([
       'localTimeDrift',
+      'westwardShift',
       'localTimeAscending',
       'localTimeDescending',
       'revolutionsPerNodalDay',
-      'westwardShift',
     ]);
     const present = readingsOf(point).map(({ id }) => id);
     expect(present.filter((id) => absent.includes(id))).toEqual([]);

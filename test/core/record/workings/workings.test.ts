@@ -8,6 +8,7 @@ import { evaluate, symbolsIn } from '../../../../core/record/formula';
 import type { ReadingId } from '../../../../core/record/readings/reading';
 import { readingsOf } from '../../../../core/record/readings/readings';
 import type { Working, WorkingLine } from '../../../../core/record/workings/working';
+import { workingOf } from '../../../../core/record/workings/workingOf';
 
 const orbits = fc.record({
   /** Perigee radius over the body's: outside the body, where the second order is a small correction. */
@@ -53,10 +54,11 @@ describe('workings', () => {
       fc.property(body, orbits, (where, { perigeeRadii, ...angles }) => {
         const semiMajorAxisKm = (perigeeRadii * where.equatorialRadiusKm) / (1 - angles.eccentricity);
         const mean = { ...angles, semiMajorAxisKm };
-        for (const reading of readingsOf({ body: where, mean, epochJd })) {
+        const point = { body: where, mean, epochJd };
+        for (const reading of readingsOf(point)) {
           // Near a stationary perigee the period is a number divided by a difference.
           if (reading.id === 'apsidalPeriod') continue;
-          const working = reading.working();
+          const working = workingOf(point, reading.id);
           if (working.result === null) continue;
           const scale = scales[reading.id] ?? 0;
           expectClose(followed(working, working.lines), reading.orders?.first ?? reading.value, scale);
@@ -78,10 +80,9 @@ describe('workings', () => {
       perigeeRad: 1,
       meanAnomalyRad: 0,
     };
-    const reading = readingsOf({ body: bodies.earth, mean, epochJd: null }).find(({ id }) => id === 'apsidalPeriod');
-    const working = reading?.working();
-    expectClose(working?.firstOrder ?? 0, twoPi / secularRates(bodies.earth, mean, 'first').perigeeRadPerS);
-    expectClose(working?.secondOrder ?? 0, twoPi / secularRates(bodies.earth, mean, 'second').perigeeRadPerS);
+    const working = workingOf({ body: bodies.earth, mean, epochJd: null }, 'apsidalPeriod');
+    expectClose(working.firstOrder, twoPi / secularRates(bodies.earth, mean, 'first').perigeeRadPerS);
+    expectClose(working.secondOrder ?? 0, twoPi / secularRates(bodies.earth, mean, 'second').perigeeRadPerS);
   });
 
   it('use no symbol that is not an input, a constant or a line above', () => {
@@ -93,8 +94,9 @@ describe('workings', () => {
       perigeeRad: 2,
       meanAnomalyRad: 0,
     };
-    for (const reading of readingsOf({ body: bodies.earth, mean, epochJd })) {
-      const working = reading.working();
+    const point = { body: bodies.earth, mean, epochJd };
+    for (const { id } of readingsOf(point)) {
+      const working = workingOf(point, id);
       const given = [...working.inputs, ...working.constants].map(({ symbol }) => symbol.id);
       for (const lines of [working.lines, working.secondLines]) {
         const known = new Set(given);
@@ -115,9 +117,9 @@ describe('workings', () => {
       perigeeRad: 0,
       meanAnomalyRad: 0,
     };
-    const find = (id: ReadingId) =>
-      readingsOf({ body: bodies.earth, mean, epochJd }).find((reading) => reading.id === id);
-    const last = (id: ReadingId) => find(id)?.working().secondLines.at(-1);
+    const point = { body: bodies.earth, mean, epochJd };
+    const find = (id: ReadingId) => readingsOf(point).find((reading) => reading.id === id);
+    const last = (id: ReadingId) => workingOf(point, id).secondLines.at(-1);
     expect(last('nodeRate')?.symbol.unit).toBe('deg/day');
     expect(last('nodeRate')?.value).toBeCloseTo((find('nodeRate')?.value ?? 0) * 86_400 * (180 / Math.PI), 12);
     expect(last('nodalPeriod')?.value).toBeCloseTo(periods(bodies.earth, mean, 'second').nodalS / 60, 10);
