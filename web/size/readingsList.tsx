@@ -1,4 +1,5 @@
 /** The readings: value large, what would change it small, the working behind a tap. */
+import { useEffect, useRef } from 'preact/hooks';
 import type { Reading } from '../../core/index';
 import { doubtText, quantityText, roundedText, usePreferredUnit, useReadingText } from '../parts/readingText';
 import { useApp } from '../state/appContext';
@@ -38,9 +39,11 @@ function ReadingRow({ reading }: { readonly reading: Reading }) {
   const { openWorking } = useApp();
   const text = useReadingText(reading);
   const isOpen = openWorking.value === reading.id;
+  const button = useFocusAfter(isOpen);
   return (
     <li>
       <button
+        ref={button}
         type="button"
         class={`reading mark-of-${reading.mark}`}
         aria-expanded={isOpen}
@@ -58,6 +61,18 @@ function ReadingRow({ reading }: { readonly reading: Reading }) {
       </button>
     </li>
   );
+}
+
+/** When its working is closed and no other takes its place, the row has the focus again. */
+function useFocusAfter(isOpen: boolean) {
+  const { openWorking } = useApp();
+  const button = useRef<HTMLButtonElement>(null);
+  const wasOpen = useRef(isOpen);
+  useEffect(() => {
+    if (wasOpen.current && openWorking.peek() === null) button.current?.focus();
+    wasOpen.current = isOpen;
+  }, [isOpen, openWorking]);
+  return button;
 }
 
 /** What one more kilometre, hundredth of a degree or thousandth of e would do. */
