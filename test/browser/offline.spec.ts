@@ -98,7 +98,7 @@ test.describe('a new version', () => {
   const loadsOf = (page: Page) => page.evaluate(() => performance.timeOrigin);
   const scriptsOf = (page: Page) => page.evaluate(() => [...document.scripts].map((script) => script.src));
 
-  test('waits through a reload, and is applied when asked for', async ({ context }) => {
+  test('waits through a reload, is applied when asked for, and keeps what was just typed', async ({ context }) => {
     const page = await openAndGetReady(context);
     const oldScripts = await scriptsOf(page);
     server.serve(newDir);
@@ -106,13 +106,17 @@ test.describe('a new version', () => {
     await expect(updateButton(page)).toBeVisible({ timeout: 15_000 });
     expect(await scriptsOf(page)).toEqual(oldScripts);
     const loaded = await loadsOf(page);
+    const field = page.getByRole('textbox', { name: 'Perigee altitude' });
+    await field.fill('555,5');
     await page.waitForTimeout(1_500);
     expect(await loadsOf(page)).toBe(loaded);
 
+    await field.fill('543,21');
     await updateButton(page).click();
     await expect.poll(() => scriptsOf(page).catch(() => oldScripts), { timeout: 15_000 }).not.toEqual(oldScripts);
     await expect(statusOf(page)).toHaveText(ready);
     await expect(updateButton(page)).toHaveCount(0);
+    await expect(field).toHaveValue('543,21');
     await server.stop();
     await page.reload();
     await expect(statusOf(page)).toHaveText(ready);
