@@ -50,6 +50,8 @@ const forbidden = [
   ['core/forces/a.ts', '../mission/history'],
   ['core/mission/a.ts', '../design/solve'],
   ['core/design/a.ts', '../record/candidate'],
+  ['core/orbit/deep/a.ts', '../../mission/history'],
+  ['core/orbit/a.ts', '../index'],
   ['core/orbit/a.ts', '../../web/state/document'],
   ['core/orbit/a.ts', 'preact'],
   ['core/orbit/a.ts', 'node:fs'],
@@ -76,6 +78,8 @@ const forbidden = [
 const allowed = [
   ['core/orbit/a.ts', '../bodies/body'],
   ['core/orbit/a.ts', '../numerics/angles'],
+  ['core/design/deep/a.ts', '../../bodies/body'],
+  ['core/design/deep/a.ts', '../shallow'],
   ['core/record/formats/a.ts', '../../orbit/kepler'],
   ['core/record/a.ts', 'valibot'],
   ['web/size/a.tsx', '../../core/index'],
