@@ -5,27 +5,27 @@
  */
 import type { FieldId } from './candidate';
 import { type NumberResult, readNumber } from './numberText';
-import type { FieldError, FieldErrors, Notice } from './resolved';
+import type { FieldError, Notice } from './resolved';
 
 /** A field by its name on screen and what it expects, as an end to "type …". */
-export interface FieldWords {
-  readonly field: FieldId;
+export interface FieldWords<Field extends string = FieldId> {
+  readonly field: Field;
   readonly label: string;
   readonly expected: string;
   /** Which values can be meant here: where only one reading of "97,679" can, it is taken. */
   readonly meant?: (value: number) => boolean;
 }
 
-export interface FieldReader {
-  readonly errors: FieldErrors;
+export interface FieldReader<Field extends string = FieldId> {
+  readonly errors: Partial<Record<Field, FieldError>>;
   readonly notices: Notice[];
-  text(field: FieldId): string;
+  text(field: Field): string;
   /** The number in the field, or null with a message left at the field. */
-  number(words: FieldWords): number | null;
+  number(words: FieldWords<Field>): number | null;
   /** As `number`, but an empty field is no error and gives undefined. */
-  optionalNumber(words: FieldWords): number | null | undefined;
+  optionalNumber(words: FieldWords<Field>): number | null | undefined;
   /** Leaves a message at a field, the first one only; null, to be returned. */
-  fail(field: FieldId, message: string): null;
+  fail(field: Field, message: string): null;
   notice(notice: Notice): void;
 }
 
@@ -35,14 +35,14 @@ const longest = 400;
 /** Larger than any length, rate or anomaly a person means; keeps every formula finite. */
 const largest = 1e12;
 
-export function fieldReader(texts: Readonly<Record<FieldId, string>>): FieldReader {
-  const errors: FieldErrors = {};
+export function fieldReader<Field extends string>(texts: Readonly<Record<Field, string>>): FieldReader<Field> {
+  const errors: Partial<Record<Field, FieldError>> = {};
   const notices: Notice[] = [];
-  const leave = (field: FieldId, error: FieldError): null => {
+  const leave = (field: Field, error: FieldError): null => {
     errors[field] ??= error;
     return null;
   };
-  const number = (words: FieldWords): number | null => {
+  const number = (words: FieldWords<Field>): number | null => {
     const text = texts[words.field];
     if (text.length > longest) return leave(words.field, tooLong(text, words));
     const result = meantReading(readNumber(text.trim()), words);
@@ -63,15 +63,16 @@ export function fieldReader(texts: Readonly<Record<FieldId, string>>): FieldRead
 }
 
 /** A number that reads two ways is not in doubt where only one of them can be meant in this field. */
-function meantReading(result: NumberResult, { meant }: FieldWords): NumberResult {
+function meantReading(result: NumberResult, { meant }: Pick<FieldWords, 'meant'>): NumberResult {
   if (result.ok || meant === undefined) return result;
   const [only, ...others] = (result.readings ?? []).filter(({ value }) => meant(value));
   return only !== undefined && others.length === 0 ? { ok: true, value: only.value } : result;
 }
 
+type Words = Pick<FieldWords, 'label' | 'expected'>;
 type Unread = Extract<NumberResult, { ok: false }>;
 
-function numberError(result: Unread, words: FieldWords, text: string): FieldError {
+function numberError(result: Unread, words: Words, text: string): FieldError {
   const { label, expected } = words;
   switch (result.problem) {
     case 'empty':
@@ -88,11 +89,11 @@ function numberError(result: Unread, words: FieldWords, text: string): FieldErro
   }
 }
 
-function tooLong({ length }: string, { label, expected }: FieldWords): FieldError {
+function tooLong({ length }: string, { label, expected }: Words): FieldError {
   return { message: `${label} holds ${length} characters, which is no number; type ${expected}.` };
 }
 
-function tooLarge({ label, expected }: FieldWords): FieldError {
+function tooLarge({ label, expected }: Words): FieldError {
   return { message: `${label} is too large a number; type ${expected}.` };
 }
 
