@@ -1,6 +1,7 @@
 import { render } from 'preact';
 import { App } from './app';
 import { createOffline } from './offline/offline';
+import { followLighting } from './parts/lighting';
 import { AppProvider } from './state/appContext';
 import { createAppState } from './state/appState';
 import { openStore } from './store/store';
@@ -17,6 +18,7 @@ const newId = () => crypto.randomUUID();
 const store = await openStore({ clock: () => new Date(), newId });
 const offline = createOffline({ canReload: async () => (await store.draft.flush()) !== 'failed' });
 const app = await createAppState({ store, offline, page: window, newId });
+followLighting(app.preferences, document);
 render(
   <AppProvider value={app}>
     <App />
