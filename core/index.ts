@@ -9,7 +9,14 @@ export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from
 export { meanSiderealTimeRad } from './bodies/siderealTime';
 export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
 export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
+export { type FrozenOptions, frozenOrbit } from './design/frozen';
+export type { FrozenInput } from './design/frozenChecks';
+export type { FrozenOrbit, FrozenRefusal, FrozenResult, FrozenShape, NoFrozenOrbit } from './design/frozenResult';
+export type { Force } from './forces/force';
+export { highestZonalDegree, zonalForce } from './forces/zonal';
+export { type AveragedModel, type AveragedRates, averagedRates } from './mission/averagedRates';
 export { type ClosedFormDrift, closedFormDrift, type DriftLines } from './mission/closedFormDrift';
+export { elementsFromEquinoctial, equinoctialFromElements, type Sense, senseOf } from './mission/equinoctial';
 export { degPerRad, radPerDeg, secondsPerDay, twoPi, wrapPi, wrapTwoPi } from './numerics/angles';
 export type { KeplerianElements, MeanElements, OsculatingElements, StateVector, Theory } from './orbit/elements';
 export {
