@@ -1,202 +1,21 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { zonalForce } from '../../../core/forces/zonal';
-import { type Body, bodies, type MeanElements, secularRates } from '../../../core/index';
-import { type AveragedModel, averagedRates } from '../../../core/mission/averagedRates';
+import { bodies } from '../../../core/index';
+import { averagedRates } from '../../../core/mission/averagedRates';
 import {
   elementsFromEquinoctial,
   equinoctialFromElements,
   type Sense,
   senseOf,
 } from '../../../core/mission/equinoctial';
+import { at, keplerian, orbits } from './orbits';
 
 const { earth } = bodies;
 const mu = earth.muKm3PerS2;
-
-interface Rates {
-  readonly axis: number;
-  readonly eccentricity: number;
-  readonly inclination: number;
-  readonly node: number;
-  readonly perigee: number;
-  readonly anomaly: number;
-}
-
-/** Keplerian rates from equinoctial ones, by the chain rule. */
-function keplerian(
-  mean: MeanElements,
-  model: Omit<AveragedModel, 'sense'>,
-  sense = senseOf(mean.inclinationRad),
-): Rates {
-  const values = equinoctialFromElements(mean, sense);
-  const rates = new Float64Array(6);
-  averagedRates({ ...model, sense })(rates, values, 0);
-  const [axis = 0, hRate = 0, kRate = 0, pRate = 0, qRate = 0, longitudeRate = 0] = rates;
-  const [, h = 0, k = 0, p = 0, q = 0] = values;
-  const tilt2 = p * p + q * q;
-  const node = (q * pRate - p * qRate) / tilt2;
-  const perigee = (k * hRate - h * kRate) / (h * h + k * k) - sense * node;
-  return {
-    axis,
-    eccentricity: (h * hRate + k * kRate) / Math.hypot(h, k),
-    inclination: (sense * 2 * (p * pRate + q * qRate)) / (Math.sqrt(tilt2) * (1 + tilt2)),
-    node,
-    perigee,
-    anomaly: longitudeRate - perigee - sense * node,
-  };
-}
-
-function cut(...degrees: readonly number[]): Body {
-  return { ...earth, zonals: earth.zonals.map((value, n) => (degrees.includes(n) ? value : 0)) };
-}
-
-const angle = fc.double({ min: 0, max: 2 * Math.PI, noNaN: true });
-
-function orbits(minEccentricity: number) {
-  return fc
-    .record({
-      perigeeKm: fc.double({ min: 6600, max: 12_000, noNaN: true }),
-      eccentricity: fc.double({ min: minEccentricity, max: 0.75, noNaN: true }),
-      inclinationRad: fc.double({ min: 0.02, max: Math.PI - 0.02, noNaN: true }),
-      nodeRad: angle,
-      perigeeRad: angle,
-      meanAnomalyRad: angle,
-    })
-    .map(({ perigeeKm, ...rest }): MeanElements => ({ ...rest, semiMajorAxisKm: perigeeKm / (1 - rest.eccentricity) }));
-}
-
-function at(orbit: Partial<MeanElements>): MeanElements {
-  return {
-    semiMajorAxisKm: 7000,
-    eccentricity: 0.01,
-    inclinationRad: 1,
-    nodeRad: 0.3,
-    perigeeRad: 0.4,
-    meanAnomalyRad: 0,
-    ...orbit,
-  };
-}
-
-/** The disturbing function, averaged, in Delaunay's variables. */
-type Hamiltonian = (at: { L: number; G: number; H: number; g: number }) => number;
-
-/** Delaunay's equations: rates by central differences of an explicit disturbing function. */
-function lagrange(force: Hamiltonian, mean: MeanElements): Rates {
-  const { semiMajorAxisKm: a, eccentricity: e, inclinationRad: i, perigeeRad: g } = mean;
-  const eta = Math.sqrt(1 - e * e);
-  const L = Math.sqrt(mu * a);
-  const [G, H] = [L * eta, L * eta * Math.cos(i)];
-  const place = { L, G, H, g };
-  const slope = (key: 'L' | 'G' | 'H' | 'g') => {
-    const step = key === 'g' ? 1e-3 : 1e-4 * L * Math.min(1, e * e);
-    const value = (times: number) => force({ ...place, [key]: place[key] + times * step });
-    return (8 * (value(1) - value(-1)) - (value(2) - value(-2))) / (12 * step);
-  };
-  const gRate = slope('g');
-  return {
-    axis: 0,
-    eccentricity: (-(eta * eta) / (e * G)) * gRate,
-    inclination: (Math.cos(i) / (G * Math.sin(i))) * gRate,
-    node: -slope('H'),
-    perigee: -slope('G'),
-    anomaly: -slope('L'),
-  };
-}
-
-const J = (n: number) => earth.zonals[n] ?? Number.NaN;
+const j2 = earth.zonals[2] ?? Number.NaN;
 
 describe('averaged rates', () => {
-  it('of J2 are those of the first order, to rounding', () => {
-    const body = cut(2);
-    const model = { body, oblateness: 'none', forces: [zonalForce(body, { from: 2, to: 2 })] } as const;
-    fc.assert(
-      fc.property(orbits(1e-3), (mean) => {
-        const found = keplerian(mean, model);
-        const expected = secularRates(earth, mean, 'first');
-        const n = Math.sqrt(mu / mean.semiMajorAxisKm) / mean.semiMajorAxisKm;
-        const unit = 1.5 * n * J(2) * (earth.radiusKm / (mean.semiMajorAxisKm * (1 - mean.eccentricity ** 2))) ** 2;
-        expect(Math.abs(found.node - expected.nodeRadPerS) / unit).toBeLessThan(1e-11);
-        expect(Math.abs(found.perigee - expected.perigeeRadPerS) / unit).toBeLessThan(1e-10);
-        expect(Math.abs(found.anomaly - expected.meanAnomalyRadPerS) / unit).toBeLessThan(1e-10);
-        expect(Math.abs(found.axis / mean.semiMajorAxisKm) / unit).toBeLessThan(1e-12);
-        expect(Math.abs(found.eccentricity) / unit).toBeLessThan(1e-12);
-        expect(Math.abs(found.inclination) / unit).toBeLessThan(1e-12);
-      }),
-      { numRuns: 300, seed: 1959 },
-    );
-  });
-
-  it('of J4, averaged over the perigee too, are its secular terms in the second order', () => {
-    const body = cut(4);
-    const model = { body, oblateness: 'none', forces: [zonalForce(body, { from: 3, to: 4 })] } as const;
-    fc.assert(
-      fc.property(orbits(1e-2), (mean) => {
-        // With J2 left out, the second order holds J4 alone.
-        const expected = secularRates(body, mean, 'second');
-        const sum = { node: 0, perigee: 0, anomaly: 0 };
-        for (const quarter of [0, 1, 2, 3]) {
-          const found = keplerian({ ...mean, perigeeRad: mean.perigeeRad + (quarter * Math.PI) / 4 }, model);
-          sum.node += 0.25 * found.node;
-          sum.perigee += 0.25 * found.perigee;
-          sum.anomaly += 0.25 * found.anomaly;
-        }
-        const a = mean.semiMajorAxisKm;
-        const n = Math.sqrt(mu / a) / a;
-        const unit = n * Math.abs(J(4)) * (earth.radiusKm / (a * (1 - mean.eccentricity ** 2))) ** 4;
-        expect(Math.abs(sum.node - expected.nodeRadPerS) / unit).toBeLessThan(1e-10);
-        expect(Math.abs(sum.perigee - expected.perigeeRadPerS) / unit).toBeLessThan(1e-9);
-        // The mean motion is in both and leaves its rounding.
-        expect(Math.abs(sum.anomaly - expected.meanAnomalyRadPerS)).toBeLessThan(1e-9 * unit + 1e-15 * n);
-      }),
-      { numRuns: 200, seed: 1959 },
-    );
-  });
-
-  it('of J3 are its long-period rates, by Lagrange from Kaula’s function', () => {
-    const body = cut(3);
-    const model = { body, oblateness: 'none', forces: [zonalForce(body, { from: 3, to: 3 })] } as const;
-    // (3/8) J3 (μR³/a⁴) e η⁻⁵ sin i (4 − 5 sin² i) sin ω: Kaula (1966), §3, F301 and G310 = e η⁻⁵ (from memory).
-    const force: Hamiltonian = ({ L, G, H, g }) => {
-      const eta = G / L;
-      const sine = Math.sqrt(1 - (H / G) ** 2);
-      const size = (0.375 * J(3) * mu * earth.radiusKm ** 3) / ((L * L) / mu) ** 4;
-      return size * Math.sqrt(1 - eta * eta) * eta ** -5 * sine * (4 - 5 * sine * sine) * Math.sin(g);
-    };
-    for (const eccentricity of [0.1, 0.4, 0.7]) {
-      for (const inclinationRad of [0.3, 1, 1.7, 2.5]) {
-        const mean = at({ semiMajorAxisKm: 7000 / (1 - eccentricity), eccentricity, inclinationRad, perigeeRad: 0.7 });
-        const found = keplerian(mean, model);
-        const n = Math.sqrt(mu / mean.semiMajorAxisKm) / mean.semiMajorAxisKm;
-        expectAlike({ ...found, anomaly: found.anomaly - n }, lagrange(force, mean), 1e-7);
-      }
-    }
-  });
-
-  it('of J2² have Brouwer’s secular and long-period terms, by Lagrange from his function', () => {
-    const body = cut(2);
-    // (3/16) (μ²/L³) L γ2² (η⁻⁷ − η⁻⁵)(1 − 16θ² + 15θ⁴) cos 2ω, γ2 = (J2/2)(R/a)².
-    const force: Hamiltonian = ({ L, G, H, g }) => {
-      const [eta, theta] = [G / L, H / G];
-      const gamma = 0.5 * J(2) * (earth.radiusKm / ((L * L) / mu)) ** 2;
-      const inner = 1 - 16 * theta ** 2 + 15 * theta ** 4;
-      return 0.1875 * (mu / L) ** 2 * gamma ** 2 * (eta ** -7 - eta ** -5) * inner * Math.cos(2 * g);
-    };
-    for (const eccentricity of [0.1, 0.4, 0.7]) {
-      for (const inclinationRad of [0.3, 1, 1.7, 2.9]) {
-        const mean = at({ semiMajorAxisKm: 7000 / (1 - eccentricity), eccentricity, inclinationRad, perigeeRad: 0.7 });
-        const found = keplerian(mean, { body, oblateness: 'second', forces: [] });
-        const secular = secularRates(body, mean, 'second');
-        const rest = {
-          ...found,
-          node: found.node - secular.nodeRadPerS,
-          perigee: found.perigee - secular.perigeeRadPerS,
-          anomaly: found.anomaly - secular.meanAnomalyRadPerS,
-        };
-        expectAlike(rest, lagrange(force, mean), 1e-6);
-      }
-    }
-  });
-
   it('are the same in both senses', () => {
     const model = { body: earth, oblateness: 'second', forces: [zonalForce(earth, { from: 3, to: 14 })] } as const;
     fc.assert(
@@ -254,7 +73,7 @@ describe('averaged rates', () => {
         const n = Math.sqrt(mu / mean.semiMajorAxisKm) / mean.semiMajorAxisKm;
         for (const index of [1, 2, 3, 4]) {
           const change = Math.abs((once[index] ?? Number.NaN) - (twice[index] ?? Number.NaN));
-          expect(change / (n * J(2))).toBeLessThan(1e-13);
+          expect(change / (n * j2)).toBeLessThan(1e-13);
         }
       }
     }
@@ -283,11 +102,3 @@ describe('equinoctial elements', () => {
     );
   });
 });
-
-/** Each rate to `share` of the largest angle rate. */
-function expectAlike(found: Rates, expected: Rates, share: number): void {
-  const largest = Math.max(Math.abs(expected.node), Math.abs(expected.perigee), Math.abs(expected.anomaly));
-  for (const key of ['eccentricity', 'inclination', 'node', 'perigee', 'anomaly'] as const) {
-    expect(Math.abs(found[key] - expected[key]) / largest, key).toBeLessThan(share);
-  }
-}
