@@ -11,6 +11,8 @@ export interface GridRoots {
   readonly roots: readonly number[];
   /** The sample, or the bottom of a dip, whose value is smallest; null where the function is nowhere defined. */
   readonly least: { readonly x: number; readonly value: number } | null;
+  /** The largest size of a sample; 0 where the function is nowhere defined. */
+  readonly greatest: number;
   /** Changes of sign that led to no root and to no pole. */
   readonly unresolved: number;
 }
@@ -23,6 +25,7 @@ export interface RootOptions {
 interface Gathered {
   readonly roots: number[];
   least: { x: number; value: number } | null;
+  greatest: number;
   unresolved: number;
 }
 
@@ -30,14 +33,17 @@ type Sample = { readonly x: number; readonly value: number };
 
 /** Roots in rising order of the grid. */
 export function rootsOnGrid(f: (x: number) => number, grid: ArrayLike<number>, options: RootOptions): GridRoots {
-  const found: Gathered = { roots: [], least: null, unresolved: 0 };
+  const found: Gathered = { roots: [], least: null, greatest: 0, unresolved: 0 };
   let before: Sample | null = null;
   let here: Sample | null = null;
   for (let index = 0; index < grid.length; index += 1) {
     const x = grid[index] as number;
     const value = f(x);
     const next = Number.isFinite(value) ? { x, value } : null;
-    if (next) noteLeast(found, next);
+    if (next) {
+      noteLeast(found, next);
+      found.greatest = Math.max(found.greatest, Math.abs(value));
+    }
     if (here && next) noteBetween(f, { left: here, right: next }, found);
     if (before && here && next) noteDip(f, { left: before, middle: here, right: next }, options, found);
     else if (here && !(before && next)) noteEnd(here, options, found);

@@ -1,3 +1,7 @@
+import { formatNumber } from '../numerics/numberWords';
+
+export { formatNumber, formatSignificant } from '../numerics/numberWords';
+
 /**
  * Quantities, the units people read them in, and how their numbers are written.
  *
@@ -61,51 +65,6 @@ const signedQuantities: ReadonlySet<Quantity> = new Set(['smallAngle', 'angleRat
 export function unitOf(quantity: Quantity, unitId?: string): DisplayUnit {
   const units: readonly DisplayUnit[] = displayUnits[quantity];
   return units.find(({ id }) => id === unitId) ?? displayUnits[quantity][0];
-}
-
-const minus = '\u2212';
-const thinSpace = '\u2009';
-
-/** Fixed digits, true minus sign, thin spaces between thousands, on request a plus; never "−0.00". */
-export function formatNumber(value: number, { digits, plus = false }: { digits: number; plus?: boolean }): string {
-  if (Number.isNaN(value)) return '–';
-  const size = Math.abs(value);
-  const text = Number.isFinite(value) ? fixed(size, digits) : '∞';
-  const isZero = !/[1-9∞]/.test(text);
-  const sign = isZero ? '' : value < 0 ? minus : plus ? '+' : '';
-  return sign + text;
-}
-
-function fixed(size: number, digits: number): string {
-  if (size >= 1e15) return scientific(size, 10);
-  const [whole = '', fraction] = size.toFixed(digits).split('.');
-  const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, thinSpace) : whole;
-  return fraction === undefined ? grouped : `${grouped}.${fraction}`;
-}
-
-/** A number of a formula: so many significant digits, a power of ten where it is very large or small. */
-export function formatSignificant(value: number, digits = 10): string {
-  if (!Number.isFinite(value)) return formatNumber(value, { digits: 0 });
-  if (value === 0) return '0';
-  const size = Math.abs(value);
-  const sign = value < 0 ? minus : '';
-  if (size < 1e-3 || size >= 1e9) return sign + scientific(size, digits);
-  return sign + trimmed(size.toPrecision(digits));
-}
-
-const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
-
-function scientific(size: number, digits: number): string {
-  const [mantissa = '', exponent = '0'] = size.toExponential(digits - 1).split('e');
-  const power = exponent
-    .replace('+', '')
-    .replace('-', '⁻')
-    .replace(/\d/g, (digit) => superscripts.charAt(Number(digit)));
-  return `${trimmed(mantissa)} × 10${power}`;
-}
-
-function trimmed(text: string): string {
-  return text.includes('.') ? text.replace(/\.?0+$/, '') : text;
 }
 
 /** Hours as hh:mm:ss, rounded to the second, 24 h wrapping to 0. */

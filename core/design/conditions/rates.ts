@@ -1,0 +1,55 @@
+/** What the conditions on rates share. */
+import type { Body } from '../../bodies/body';
+import { degPerRad, secondsPerDay } from '../../numerics/angles';
+import { formatNumber, formatSignificant } from '../../numerics/numberWords';
+import { nodeRateAt, perigeeRateAt, rateSize } from '../shapeRates';
+import type { Condition, Prepared } from './condition';
+
+/** A rate with its unit: four digits, more where it is slow. */
+export function rateWords(radPerS: number): string {
+  const degPerDay = radPerS * degPerRad * secondsPerDay;
+  const slow = degPerDay !== 0 && Math.abs(degPerDay) < 0.01;
+  return `${slow ? formatSignificant(degPerDay, 4) : formatNumber(degPerDay, { digits: 4 })} deg/day`;
+}
+
+type Wording = Pick<Condition, 'kind' | 'label' | 'formula'>;
+
+/** Ω̇ = target. */
+export function nodeCondition(radPerS: number, wording: Wording): Condition {
+  return {
+    ...wording,
+    family: 'node',
+    target: radPerS,
+    measure: nodeRateAt,
+    scale: (shape, theta) => (radPerS === 0 ? rateSize(shape) : Math.abs(radPerS) + Math.abs(nodeRateAt(shape, theta))),
+    write: rateWords,
+    quantity: 'node rate',
+    notes: [],
+  };
+}
+
+/** ω̇ = target. */
+export function perigeeCondition(radPerS: number, wording: Wording): Condition {
+  return {
+    ...wording,
+    family: 'perigee',
+    target: radPerS,
+    measure: perigeeRateAt,
+    scale: (shape) => Math.abs(radPerS) + rateSize(shape),
+    write: rateWords,
+    quantity: 'perigee rate',
+    notes: [],
+  };
+}
+
+/** Rates of node and perigee exist only with a J2. */
+export function preparedRate(body: Body, radPerS: number, make: (radPerS: number) => Condition): Prepared {
+  if (!(typeof radPerS === 'number' && Number.isFinite(radPerS))) {
+    return { ok: false, kind: 'badInput', text: `A rate has to be a number in rad/s, but it is ${String(radPerS)}.` };
+  }
+  const condition = make(radPerS);
+  if ((body.zonals[2] ?? 0) === 0) {
+    return { ok: false, kind: 'missing', text: `${condition.label} needs the J2 of ${body.name}, which is not known.` };
+  }
+  return { ok: true, condition };
+}

@@ -1,0 +1,112 @@
+/** Conditions that cannot both count, found before anything is solved. */
+import type { Body } from '../../bodies/body';
+import type { Condition } from '../conditions/condition';
+import { nodeRateOfRepeat } from '../conditions/repeat';
+import { type NoOrbit, noOrbit } from './answer';
+import { type FreeElement, freeElements } from './problem';
+
+const sameShare = 1e-12;
+
+/** The first pair of conditions on one and the same quantity, or of altitudes upside down. */
+export function conflictBetween(conditions: readonly Condition[]): NoOrbit | null {
+  for (let second = 1; second < conditions.length; second += 1) {
+    for (let first = 0; first < second; first += 1) {
+      const pair = [conditions[first] as Condition, conditions[second] as Condition] as const;
+      const problem = problemOfPair(...pair);
+      if (problem) return noOrbit(problem.kind, problem.text, [first, second]);
+    }
+  }
+  return null;
+}
+
+interface PairProblem {
+  readonly kind: 'conflict' | 'redundant';
+  readonly text: string;
+}
+
+function problemOfPair(one: Condition, other: Condition): PairProblem | null {
+  if (one.family !== other.family) return null;
+  if (one.family === 'altitude' && one.kind !== other.kind) return upsideDown(one, other);
+  if (one.family === 'period' && one.kind !== other.kind) return null;
+  const names = `${one.label} and ${inSentence(other.label)}`;
+  const size = Math.max(Math.abs(one.target), Math.abs(other.target));
+  if (Math.abs(one.target - other.target) <= sameShare * size) {
+    return { kind: 'redundant', text: `${names} ask for the same ${one.quantity}: one of them is redundant.` };
+  }
+  const values = `${one.write(one.target)} against ${other.write(other.target)}`;
+  return {
+    kind: 'conflict',
+    text: `${names} conflict: they ask for different values of the ${one.quantity}, ${values}.`,
+  };
+}
+
+function upsideDown(one: Condition, other: Condition): PairProblem | null {
+  const [perigee, apogee] = one.kind === 'perigeeAltitude' ? [one, other] : [other, one];
+  if (perigee.target <= apogee.target) return null;
+  return {
+    kind: 'conflict',
+    text: `${perigee.label} and ${inSentence(apogee.label)} conflict: perigee lies above apogee.`,
+  };
+}
+
+export function inSentence(label: string): string {
+  return label.startsWith('Sun') ? label : label.charAt(0).toLowerCase() + label.slice(1);
+}
+
+/** A repeat and a nodal period together fix the nodal day: the repeat counts as the node rate that leaves. */
+export function withoutTwoPeriods(conditions: readonly Condition[], body: Body): readonly Condition[] {
+  const period = conditions.find(({ kind }) => kind === 'nodalPeriod');
+  const closure = conditions.find(({ kind }) => kind === 'repeat');
+  if (!period || !closure || body.rotationRadPerS === null) return conditions;
+  const implied = nodeRateOfRepeat(closure, period.target, body.rotationRadPerS);
+  return conditions.map((condition) => (condition === closure ? implied : condition));
+}
+
+const elementNames: Readonly<Record<FreeElement, string>> = {
+  semiMajorAxisKm: 'semi-major axis',
+  eccentricity: 'eccentricity',
+  inclinationRad: 'inclination',
+};
+
+export function namesOf(elements: readonly FreeElement[]): string {
+  const names = elements.map((element) => elementNames[element]);
+  return names.length < 2 ? names.join('') : `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`;
+}
+
+/** Numbers of conditions and free elements that do not match, or conditions on what is held. */
+export function mismatch(conditions: readonly Condition[], free: readonly FreeElement[]): NoOrbit | null {
+  const altitudes = conditions.filter(({ family }) => family === 'altitude');
+  const frozen = conditions.find(({ family }) => family === 'frozen');
+  const shapeFree = free.filter((element) => element !== 'inclinationRad');
+  const places = (wanted: readonly Condition[]) => wanted.map((condition) => conditions.indexOf(condition));
+  if (conditions.length > free.length) {
+    const counts = `${conditions.length} conditions cannot be met by ${free.length} free ${free.length === 1 ? 'element' : 'elements'}`;
+    const held = freeElements.filter((element) => !free.includes(element));
+    const advice = held.length > 0 ? `free the ${namesOf(held)}, or drop a condition` : 'drop a condition';
+    return noOrbit('tooMany', `${counts} (${namesOf(free)}): ${advice}.`);
+  }
+  const [first, second] = altitudes;
+  if (first && shapeFree.length === 0) {
+    return noOrbit(
+      'held',
+      `${first.label} turns on semi-major axis and eccentricity, and both are held.`,
+      places([first]),
+    );
+  }
+  if (frozen && !free.includes('eccentricity')) {
+    return noOrbit('held', 'Frozen settles the eccentricity, and that is held: free it.', places([frozen]));
+  }
+  const settledShape = [...altitudes, ...(frozen ? [frozen] : [])];
+  if (first && settledShape.length > shapeFree.length) {
+    const other = second ?? (frozen as Condition);
+    const text = `${first.label} and ${inSentence(other.label)} conflict: both settle the ${namesOf(shapeFree)}.`;
+    return noOrbit('conflict', text, places(settledShape));
+  }
+  return tooFew(conditions, free);
+}
+
+function tooFew(conditions: readonly Condition[], free: readonly FreeElement[]): NoOrbit | null {
+  if (conditions.length === free.length) return null;
+  const counts = `${conditions.length === 0 ? 'No condition' : conditions.length} for ${free.length} free elements`;
+  return noOrbit('tooFew', `${counts} (${namesOf(free)}): add a condition for each, or hold an element.`);
+}
