@@ -10,20 +10,18 @@
  * Space Sci. 14, 433 (1966), from memory).
  */
 import type { Body } from '../bodies/body';
-import { highestZonalDegree, zonalForce } from '../forces/zonal';
-import { averagedRates } from '../mission/averagedRates';
-import { equinoctialFromElements, senseOf } from '../mission/equinoctial';
+import { highestZonalDegree } from '../forces/zonal';
 import { type FrozenInput, frozenCautions, frozenObstacle, surfaceKm } from './frozenChecks';
 import { type FrozenResult, type FrozenShape, refuse } from './frozenResult';
 import { nearestRoot } from './nearestRoot';
+import { perigeeMotion } from './perigeeMotion';
 
 export interface FrozenOptions {
   /** Highest degree of the zonals, 3 to 14; 14 if left out. */
   readonly toDegree?: number;
 }
 
-/** Inclination below which node and perigee are told apart at this small tilt instead; e is then about 1e-9 as well. */
-const leastTiltRad = 1e-6;
+type Motion = ReturnType<typeof perigeeMotion>;
 
 /**
  * The frozen orbit of this semi-major axis (km) and inclination (rad), mean elements, inertial equatorial frame.
@@ -40,10 +38,12 @@ export function frozenOrbit(
   if (obstacle) return obstacle;
   const degree = Math.min(toDegree, body.zonals.length - 1);
   const most = 1 - surfaceKm(body) / input.semiMajorAxisKm;
-  const root = nearestRoot(perigeeForce(body, input, degree), most);
+  const motion = perigeeMotion(body, input, degree);
+  const root = nearestRoot((x) => motion({ eCosine: 0, eSine: x }).eCosine, most);
   const hand = handShape(body, input);
   if (root.ok) {
-    return { ok: true, ...shapeOf(root.x), degree, hand, cautions: frozenCautions(body, input, degree) };
+    const stable = goesRound(motion, root.x, most);
+    return { ok: true, ...shapeOf(root.x), degree, hand, cautions: frozenCautions(body, input, { degree, stable }) };
   }
   if (root.reason === 'notConverged') {
     return refuse(
@@ -58,24 +58,15 @@ export function frozenOrbit(
   );
 }
 
-/** d(e cos ω)/dt over the mean motion at e sin ω = x, e cos ω = 0. */
-function perigeeForce(body: Body, input: FrozenInput, degree: number): (x: number) => number {
-  const { semiMajorAxisKm } = input;
-  const inclinationRad = Math.min(Math.max(input.inclinationRad, leastTiltRad), Math.PI - leastTiltRad);
-  const sense = senseOf(inclinationRad);
-  const forces = [zonalForce(body, { from: 3, to: Math.max(degree, 3) })];
-  const fillRates = averagedRates({ body, sense, oblateness: 'second', forces });
-  const circle = { semiMajorAxisKm, eccentricity: 0, inclinationRad, nodeRad: 0, perigeeRad: 0, meanAnomalyRad: 0 };
-  const values = equinoctialFromElements(circle, sense);
-  const tilt = values[4] as number;
-  const rates = new Float64Array(6);
-  return (x) => {
-    values[1] = x;
-    fillRates(rates, values, 0);
-    // With the node at 0 its rate is that of p over q; it turns what longitudes are counted from.
-    const nodeRate = (rates[3] as number) / tilt;
-    return ((rates[2] as number) + sense * x * nodeRate) / Math.sqrt(body.muKm3PerS2 / semiMajorAxisKm ** 3);
-  };
+/** Share of the room for e by which the vector is moved to see whether it comes back. */
+const nudgeShare = 1e-4;
+
+/** True where a vector beside the frozen point goes round it; false where it leaves: the rates' slopes of one sign. */
+function goesRound(motion: Motion, x: number, most: number): boolean {
+  const nudge = nudgeShare * most;
+  const across = motion({ eCosine: nudge, eSine: x }).eSine;
+  const along = motion({ eCosine: 0, eSine: x + nudge }).eCosine - motion({ eCosine: 0, eSine: x - nudge }).eCosine;
+  return across * along < 0;
 }
 
 function handShape(body: Body, { semiMajorAxisKm, inclinationRad }: FrozenInput): FrozenShape {

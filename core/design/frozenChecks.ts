@@ -81,9 +81,16 @@ function criticalDistanceDeg(inclinationRad: number): number {
   return Math.abs(folded - criticalRad) * degPerRad;
 }
 
+export interface FrozenFound {
+  readonly degree: number;
+  /** A vector beside the frozen point goes round it. */
+  readonly stable: boolean;
+}
+
 /** Sentences about an answer from zonals to `degree`. */
-export function frozenCautions(body: Body, input: FrozenInput, degree: number): readonly string[] {
+export function frozenCautions(body: Body, input: FrozenInput, { degree, stable }: FrozenFound): readonly string[] {
   const cautions: string[] = [];
+  if (!stable) cautions.push('The balance is unstable: an eccentricity slightly off drifts away instead of round it.');
   const distance = criticalDistanceDeg(input.inclinationRad);
   if (distance < doubtfulDeg) {
     cautions.push(`The critical inclination is only ${distance.toFixed(2)}° away: long-period terms are large here.`);

@@ -9,7 +9,7 @@
 
 /** Aliasing left, relative to the largest value along the orbit. */
 const tolerance = 1e-14;
-const strips = 24;
+const strips = 10;
 
 /** Points for a force that behaves like a zonal of `degree`, 0 ≤ e < 1; a multiple of 4. */
 export function averagingPoints(degree: number, eccentricity: number): number {

@@ -98,9 +98,9 @@ function sumOver(work: Workspace, values: Float64Array, jd: number): void {
 
 /** Writes a vector of the orbit plane into `motion`, in inertial components. */
 function place({ motion, basis }: Workspace, alongF: number, alongG: number, from: number): void {
-  for (let axis = 0; axis < 3; axis += 1) {
-    motion[from + axis] = alongF * (basis[axis] as number) + alongG * (basis[3 + axis] as number);
-  }
+  motion[from] = alongF * (basis[0] as number) + alongG * (basis[3] as number);
+  motion[from + 1] = alongF * (basis[1] as number) + alongG * (basis[4] as number);
+  motion[from + 2] = alongF * (basis[2] as number) + alongG * (basis[5] as number);
 }
 
 /** Adds one point's part; `c`, `s` of its true longitude, `weight` = (r/a)/points. */

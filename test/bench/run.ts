@@ -6,6 +6,11 @@ import { taskGroups } from './tasks';
 const bounds = [
   { name: 'secularRates, first order', yardstick: 'first order, inlined', times: 2 },
   { name: 'secularRates, second order', yardstick: 'second order, inlined', times: 2 },
+  // 24 points, each an acceleration and about as much again to place and project it; 108 for the ellipse.
+  { name: 'averagedRates, e 0.001', yardstick: 'zonals to 14, at a point', times: 120 },
+  { name: 'averagedRates, e 0.74', yardstick: 'zonals to 14, at a point', times: 400 },
+  // Some twenty rates; far below the 10 ms that a person would notice.
+  { name: 'frozenOrbit', yardstick: 'averagedRates, e 0.001', times: 60 },
 ] as const;
 
 /** What every row is also expressed in. */

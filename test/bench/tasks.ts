@@ -11,6 +11,7 @@ import {
   secularRates,
   stateFromMean,
 } from '../../core/index';
+import { averagedTasks } from './averagedTasks';
 import { type Columns, inlinedFirst, inlinedSecond } from './inlined';
 import type { Task } from './measure';
 import { columnsOf, fieldOf, randomOrbits } from './samples';
@@ -28,7 +29,7 @@ const twoLines = [
 export function taskGroups(): readonly (readonly Task[])[] {
   const orbits = randomOrbits();
   const columns = columnsOf(orbits);
-  return [[...inlinedTasks(columns), ...ratesTasks(orbits, columns)], otherTasks(orbits)];
+  return [[...inlinedTasks(columns), ...ratesTasks(orbits, columns)], otherTasks(orbits), averagedTasks()];
 }
 
 /** Times that a run goes through the list, so that it lasts milliseconds. */

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, expectTypeOf, it } from 'vitest';
 import { nearestRoot } from '../../../core/design/nearestRoot';
+import { perigeeMotion } from '../../../core/design/perigeeMotion';
 import { type Body, bodies, customBody, type FrozenResult, frozenOrbit, gravitySets } from '../../../core/index';
 
 const { earth, mars } = bodies;
@@ -46,6 +47,28 @@ describe('a frozen orbit', () => {
     );
   });
 
+  it('is the smallest there is: no change of sign on a fine grid nearer to the circle, at bodies of rough fields too', () => {
+    const cases = [earth, mars, bodies.moon, bodies.venus, bodies.mercury].flatMap((body) =>
+      [1.06, 1.4].flatMap((radii) => [20, 57, 75, 98, 140].map((deg) => ({ body, radii, deg }))),
+    );
+    for (const { body, radii, deg } of cases) {
+      const place = { semiMajorAxisKm: radii * body.radiusKm, inclinationRad: deg * radPerDeg };
+      const found = frozenOrbit(body, place);
+      const most = 1 - Math.max(body.radiusKm, body.equatorialRadiusKm) / place.semiMajorAxisKm;
+      const rates = perigeeMotion(body, place, 14);
+      const signs = Array.from({ length: 401 }, (_, k) => {
+        const eSine = (most * (k - 200)) / 200;
+        return { eSine, rate: rates({ eCosine: 0, eSine }).eCosine };
+      });
+      const brackets = signs.flatMap(({ eSine, rate }, k) => {
+        const next = signs[k + 1];
+        return next && rate * next.rate <= 0 ? [Math.min(Math.abs(eSine), Math.abs(next.eSine))] : [];
+      });
+      if (found.ok) expect(found.eccentricity - Math.min(...brackets)).toBeLessThanOrEqual(most / 200);
+      else expect(brackets).toEqual([]);
+    }
+  });
+
   it('is the same whichever way round the orbit is flown', () => {
     fc.assert(
       fc.property(input, (place) => {
@@ -88,6 +111,7 @@ describe('a frozen orbit', () => {
     const cautionsOf = (result: FrozenResult) => (result.ok ? result.cautions.join(' ') : refusal(result));
     expect(cautionsOf(at(7714.428, 66.039))).toMatch(/critical inclination is only 2\.60° away/);
     expect(cautionsOf(at(7000, 98, gravitySets.WGS72))).toMatch(/WGS72 has zonals to degree 4 only.*degrees 5 to 13/);
+    expect(cautionsOf(at(12_102, 59, bodies.venus))).toMatch(/balance is unstable/);
     expect(cautionsOf(at(1838, 90, bodies.moon))).toMatch(/J2 does not dominate at Moon/);
   });
 });
