@@ -21,12 +21,14 @@ export interface EntryFieldProps {
 
 export function EntryField({ field, stepSize, step, ...rest }: EntryFieldProps) {
   const { document, store } = useApp();
-  const resolution = document.resolution.value;
+  const resolution = document.entered.value;
+  const settled = document.settled.value[field];
   const bySize = stepSize === undefined ? undefined : (text: string, count: number) => stepped(text, stepSize, count);
   return (
     <NumberField
       {...rest}
-      text={document.draft.value.entry.texts[field]}
+      text={settled ?? document.draft.value.entry.texts[field]}
+      isSettled={settled !== undefined}
       error={resolution.ok ? undefined : resolution.errors[field]}
       note={resolution.notices.find((notice) => notice.field === field)?.text}
       step={step ?? bySize}

@@ -6,6 +6,7 @@ import { Choice } from '../parts/choice';
 import { useApp } from '../state/appContext';
 import { switchForm, takePaste } from '../state/entryActions';
 import { BodyFields, bodySummary, Pick } from './bodyFields';
+import { ConditionPanel } from './conditionPanel';
 import { EpochField, InclinationField, NodeField, PlaceFields, ShapeFields } from './shapeFields';
 import { StateFields, StateUnitChoice } from './stateFields';
 import { TwoLineField } from './twoLineField';
@@ -33,6 +34,7 @@ export function EntryPanel() {
       {form === 'twoLine' && <TwoLineField />}
       {form === 'state' && <StateEntry />}
       {(form === 'altitudes' || form === 'elements') && <ElementEntry />}
+      <ConditionPanel />
       <Fold title="Body and units" says={useBodySummary()} holds={bodyFieldIds}>
         <div class="field-group">
           <BodyFields />
@@ -175,7 +177,7 @@ interface FoldProps {
 /** Opens by itself where one of its fields is in error, since a message must not be folded away; never closes by itself. */
 function Fold({ title, says, holds, children }: FoldProps) {
   const { document } = useApp();
-  const resolution = document.resolution.value;
+  const resolution = document.entered.value;
   const inError = !resolution.ok && holds.some((field) => resolution.errors[field]);
   const fold = useRef<HTMLDetailsElement>(null);
   useEffect(() => {

@@ -2,6 +2,7 @@
 import { headlineOf, type Notice, type Reading, type ReadingId } from '../../core/index';
 import { later } from '../parts/later';
 import { useReadingText } from '../parts/readingText';
+import { useScrollFocus } from '../parts/useScrollFocus';
 import { useApp } from '../state/appContext';
 import { EntryPanel } from './entryPanel';
 import { PlaneSketch } from './planeSketch';
@@ -21,7 +22,7 @@ export function SizePlace() {
   const reading = document.readings.value.find(({ id }) => id === openWorking.value);
   return (
     <>
-      <section class="picture" aria-label="The orbit">
+      <section class="picture" aria-label="The orbit" ref={useScrollFocus<HTMLElement>('y')}>
         <div class="answer">
           <Headline />
           <KeyReadings />

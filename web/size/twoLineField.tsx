@@ -5,8 +5,8 @@ import { useApp } from '../state/appContext';
 
 export function TwoLineField() {
   const { document, store } = useApp();
-  const { draft, resolution } = document;
-  const error = resolution.value.ok ? undefined : resolution.value.errors.twoLine;
+  const { draft, entered } = document;
+  const error = entered.value.ok ? undefined : entered.value.errors.twoLine;
   const setText = (text: string) => document.setText('twoLine', text);
   return (
     <div class={`field field-tall${error ? ' has-error' : ''}`}>

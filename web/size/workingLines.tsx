@@ -1,4 +1,5 @@
 /** The lines of a working, each as formula and then with its numbers; what was put in, and the constants. */
+import type { ComponentChildren } from 'preact';
 import {
   formatSignificant,
   type Working,
@@ -7,6 +8,7 @@ import {
   type WorkingValue,
 } from '../../core/index';
 import { FormulaMath } from '../parts/formulaMath';
+import { useScrollFocus } from '../parts/useScrollFocus';
 
 /** Digits a pocket calculator shows. */
 const digits = 10;
@@ -97,21 +99,26 @@ function Line({ line, known, isResult }: LineProps) {
   return (
     <li class={isResult ? 'is-result' : ''}>
       <span class="working-name">{line.symbol.name}</span>
-      <p class="formula">
-        <math displaystyle>
-          <Glyph symbol={line.symbol} />
-          <mo>=</mo>
-          <FormulaMath tree={line.expr} symbolOf={(id) => <Glyph symbol={find(id).symbol} />} />
-        </math>
-      </p>
-      <p class="formula">
-        <math displaystyle>
-          <mo>=</mo>
-          <FormulaMath tree={line.expr} symbolOf={(id) => <NumberPutIn value={find(id)} />} />
-        </math>
-      </p>
+      <Formula>
+        <Glyph symbol={line.symbol} />
+        <mo>=</mo>
+        <FormulaMath tree={line.expr} symbolOf={(id) => <Glyph symbol={find(id).symbol} />} />
+      </Formula>
+      <Formula>
+        <mo>=</mo>
+        <FormulaMath tree={line.expr} symbolOf={(id) => <NumberPutIn value={find(id)} />} />
+      </Formula>
       <p class="working-value">= {valueText(line)}</p>
     </li>
+  );
+}
+
+/** A formula longer than its line scrolls in itself. */
+function Formula({ children }: { readonly children: ComponentChildren }) {
+  return (
+    <p class="formula" ref={useScrollFocus<HTMLParagraphElement>('x')}>
+      <math displaystyle>{children}</math>
+    </p>
   );
 }
 
