@@ -12,6 +12,25 @@ export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
 export { type FrozenOptions, frozenOrbit } from './design/frozen';
 export type { FrozenInput } from './design/frozenChecks';
 export type { FrozenOrbit, FrozenRefusal, FrozenResult, FrozenShape, NoFrozenOrbit } from './design/frozenResult';
+export {
+  longestCycleDays,
+  type RepeatField,
+  type RepeatProblem,
+  type RepeatReason,
+  type RepeatRequest,
+  RepeatTracksError,
+  type TrackInclination,
+} from './design/repeatProblem';
+export {
+  type RepeatChunk,
+  type RepeatSearch,
+  type RepeatTrack,
+  type RepeatTracksFound,
+  repeatTrackSearch,
+  repeatTracks,
+  type SearchedBand,
+  tryRepeatTracks,
+} from './design/repeatTracks';
 export type { Force } from './forces/force';
 export { highestZonalDegree, zonalForce } from './forces/zonal';
 export { type AveragedModel, type AveragedRates, averagedRates } from './mission/averagedRates';
@@ -64,6 +83,25 @@ export {
 } from './record/candidate';
 export { type CandidateError, lengthCaps, type ParsedCandidate, parseCandidate } from './record/candidateSchema';
 export { canonicalText } from './record/canonicalText';
+export {
+  type ConditionEntry,
+  type ConditionField,
+  type ConditionFieldWords,
+  type ConditionWords,
+  conditionFields,
+  conditionWords,
+  elementNames,
+  type SettledElement,
+  settledElements,
+} from './record/conditions/kinds';
+export {
+  type ConditionErrors,
+  conditionEntry,
+  newCondition,
+  type ReadCondition,
+  readConditions,
+} from './record/conditions/readConditions';
+export { type Settlement, settleOrbit } from './record/conditions/settleOrbit';
 export { apsisName, driftHeadline, firstOrderSentence } from './record/driftHeadline';
 export { kmPerLengthUnit } from './record/entry/shape';
 export { type EntryTags, type EntryTexts, entryFromOrbit } from './record/entryFromOrbit';

@@ -20,19 +20,23 @@ export interface NumberFieldProps {
   readonly keyboard?: 'decimal' | 'text';
   readonly placeholder?: string;
   readonly readOnly?: boolean;
+  /** A condition settles the value: it is shown, and cannot be typed. */
+  readonly isSettled?: boolean;
   readonly onText: (text: string) => void;
 }
 
-export function NumberField(props: NumberFieldProps) {
+export function NumberField({ isSettled = false, ...given }: NumberFieldProps) {
   const id = useId();
+  const props = isSettled ? { ...given, readOnly: true, step: undefined } : given;
   const { error, note } = props;
   return (
-    <div class={`field${error ? ' has-error' : ''}`}>
+    <div class={`field${error ? ' has-error' : ''}${isSettled ? ' is-settled' : ''}`}>
       <div class="field-row">
         <FieldLabel id={id} {...props} />
         <FieldInput id={id} {...props} />
-        {props.signed && <SignButton {...props} />}
+        {props.signed && !isSettled && <SignButton {...props} />}
         {props.step && <Steppers {...props} />}
+        {isSettled && <span class="field-settled">settled by condition</span>}
       </div>
       <div id={`${id}-says`} aria-live="polite">
         {error && <FieldTrouble error={error} onText={props.onText} />}

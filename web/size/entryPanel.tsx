@@ -3,14 +3,17 @@ import type { ComponentChildren } from 'preact';
 import { useEffect, useRef } from 'preact/hooks';
 import type { EntryForm, FieldId, InputFrame } from '../../core/index';
 import { Choice } from '../parts/choice';
+import { later } from '../parts/later';
 import { useApp } from '../state/appContext';
 import { switchForm, takePaste } from '../state/entryActions';
 import { BodyFields, bodySummary, Pick } from './bodyFields';
-import { ConditionPanel } from './conditionPanel';
 import { EpochField, InclinationField, NodeField, PlaceFields, ShapeFields } from './shapeFields';
 import { StateFields, StateUnitChoice } from './stateFields';
 import { TwoLineField } from './twoLineField';
 import { UnitChoices } from './unitChoices';
+
+/** Solving and its words are fetched after the first readings stand. */
+const ConditionPanel = later(async () => (await import('./conditionPanel')).ConditionPanel);
 
 const forms: readonly { readonly value: EntryForm; readonly label: string }[] = [
   { value: 'altitudes', label: 'Altitudes' },

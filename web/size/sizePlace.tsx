@@ -1,16 +1,13 @@
 /** Which orbit? The answer, its picture, the entry and the readings. */
-import { headlineOf, type Notice, type Reading, type ReadingId } from '../../core/index';
+import { headlineOf, type Reading, type ReadingId } from '../../core/index';
 import { later } from '../parts/later';
 import { useReadingText } from '../parts/readingText';
 import { useScrollFocus } from '../parts/useScrollFocus';
 import { useApp } from '../state/appContext';
 import { EntryPanel } from './entryPanel';
-import { PlaneSketch } from './planeSketch';
-import { PoleSketch } from './poleSketch';
-import { RateChart } from './rateChart';
+import { Pictures } from './pictures';
 import { ReadingsList } from './readingsList';
 import './entry.css';
-import './pictures.css';
 import './readings.css';
 import './size.css';
 
@@ -89,44 +86,6 @@ function KeyReading({ reading }: { readonly reading: Reading }) {
         {text.value} <span class="unit">{text.unit}</span>
       </dd>
     </div>
-  );
-}
-
-function Pictures() {
-  const { document } = useApp();
-  const orbit = document.orbit.value;
-  if (!orbit) return null;
-  return (
-    <div class={document.stale.value ? 'pictures is-stale' : 'pictures'}>
-      <Notices notices={document.notices.value} severity="caution" />
-      <RateChart orbit={orbit} />
-      <div class="sketches">
-        <PlaneSketch orbit={orbit} />
-        <PoleSketch orbit={orbit} />
-      </div>
-      <Notices notices={document.notices.value} severity="note" />
-    </div>
-  );
-}
-
-/** Cautions stand above the picture, notes below it. */
-function Notices({
-  notices,
-  severity,
-}: {
-  readonly notices: readonly Notice[];
-  readonly severity: Notice['severity'];
-}) {
-  const shown = notices.filter((notice) => notice.severity === severity);
-  if (shown.length === 0) return null;
-  return (
-    <ul class="notices">
-      {shown.map(({ id, text }) => (
-        <li key={id} class={`notice is-${severity}`}>
-          {text}
-        </li>
-      ))}
-    </ul>
   );
 }
 

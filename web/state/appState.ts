@@ -10,6 +10,7 @@ import type { Store } from '../store/store';
 import { type Announcer, createAnnouncer } from './announce';
 import { createDocument, type OpenCandidate, type OrbitDocument } from './document';
 import { createDrift } from './drift';
+import type { PictureId } from './picture';
 import { createPreferences, type Preferences } from './preferences';
 import { createRoute, type Route } from './route';
 import { createSaving, openedFrom, openedNew, type Saving } from './saving';
@@ -23,6 +24,7 @@ export interface AppState {
   readonly announcer: Announcer;
   readonly saving: Saving;
   readonly drift: ReadonlySignal<ClosedFormDrift | null>;
+  readonly picture: Signal<PictureId>;
   /** The reading whose working is open; null for none. */
   readonly openWorking: Signal<ReadingId | null>;
 }
@@ -54,6 +56,7 @@ export async function createAppState({ store, offline, page, newId }: AppStatePa
       document.orbit,
       computed(() => preferences.values.value.spanDays),
     ),
+    picture: signal<PictureId>('orbit'),
     openWorking: signal(null),
   };
 }

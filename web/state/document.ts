@@ -17,6 +17,8 @@ import {
   resolveOrbit,
   warningsOf,
 } from '../../core/index';
+import { type Conditions, createConditions } from './conditions';
+import { type SettledFields, settledFields } from './settledFields';
 
 /** A candidate and the saved revision it was opened from; null where it was never saved. */
 export interface OpenCandidate {
@@ -29,6 +31,12 @@ export interface OpenCandidate {
 export interface OrbitDocument {
   readonly draft: ReadonlySignal<Candidate>;
   readonly baseRevision: ReadonlySignal<number | null>;
+  /** The entry alone, whatever the conditions say. */
+  readonly entered: ReadonlySignal<Resolution>;
+  readonly conditions: Conditions;
+  /** Fields that a condition settles, with the text that each shows. */
+  readonly settled: ReadonlySignal<SettledFields>;
+  /** The entry and its conditions together. */
   readonly resolution: ReadonlySignal<Resolution>;
   /** The last orbit that the entry came to; null before there was one. */
   readonly orbit: ReadonlySignal<ResolvedOrbit | null>;
@@ -44,7 +52,7 @@ export interface OrbitDocument {
   setText(field: FieldId, text: string): void;
   setTexts(texts: Partial<Record<FieldId, string>>): void;
   setTags(tags: Partial<Omit<OrbitEntry, 'texts'>>, texts?: Partial<Record<FieldId, string>>): void;
-  setCandidate(part: Partial<Pick<Candidate, 'name' | 'notes' | 'body' | 'gravitySet'>>): void;
+  setCandidate(part: Partial<Pick<Candidate, 'name' | 'notes' | 'body' | 'gravitySet' | 'limits'>>): void;
   /** Puts an earlier draft of the same candidate back, for an undo. */
   restoreDraft(candidate: Candidate): void;
   open(next: OpenCandidate): void;
@@ -52,17 +60,24 @@ export interface OrbitDocument {
   markSaved(candidate: Candidate, revision: number): void;
 }
 
+const loadSettler = async () => (await import('./settler')).settle;
+
 export function createDocument(initial: OpenCandidate): OrbitDocument {
   const draft = signal(initial.candidate);
   const baseRevision = signal(initial.baseRevision);
   const savedText = signal(initial.savedText);
-  const resolution = computed(() => resolveOrbit(draft.value));
+  const entered = computed(() => resolveOrbit(draft.value));
+  const conditions = createConditions(draft, entered, loadSettler);
+  const { resolution } = conditions;
   const orbit = lastGoodOrbit(draft, resolution);
   const readings = computed(() => (orbit.value ? readingsOf(orbit.value) : []));
 
   return {
     draft,
     baseRevision,
+    entered,
+    conditions,
+    settled: computed(() => settledFields(conditions.settlement.value, draft.value.entry)),
     resolution,
     orbit,
     readings,

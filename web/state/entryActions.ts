@@ -8,6 +8,7 @@ import {
   type EntryForm,
   entryFromOrbit,
   type FieldId,
+  type KeplerianElements,
   kmPerLengthUnit,
   type NodeForm,
   type OrbitEntry,
@@ -18,11 +19,16 @@ import type { OrbitDocument } from './document';
 
 type Tags = Partial<Omit<OrbitEntry, 'texts'>>;
 
+/** What conditions have settled, else what was typed. */
+function orbitAtHand({ resolution, entered }: OrbitDocument) {
+  return resolution.value.ok ? resolution.value : entered.value;
+}
+
 /** Sets tags and rewrites the fields so that the orbit stays the same; answers why the texts could not follow. */
 function retag(document: OrbitDocument, tags: Tags): string | null {
   const { entry } = document.draft.value;
   const { form, ...rest } = { ...entry, ...tags };
-  const resolution = document.resolution.value;
+  const resolution = orbitAtHand(document);
   const written = resolution.ok ? entryFromOrbit(resolution.orbit, form, rest) : null;
   if (written?.ok) {
     document.setTags(tags, written.texts);
@@ -101,4 +107,21 @@ export function takePaste(document: OrbitDocument, text: string): PasteOutcome {
   document.setTags({ form: 'state', stateUnit }, { x, y, z, vx, vy, vz, ...epoch });
   const unit = stateUnit === 'm' ? 'm and m/s' : 'km and km/s';
   return { said: `Read as a state vector in ${unit}. Check the unit, the axes and the epoch.` };
+}
+
+/**
+ * Writes some mean elements into the entry, the others staying as they are: a point taken on a chart, a track from the
+ * list. A state vector or two-line set cannot hold them, so the entry goes over to altitudes. False where there is no orbit yet.
+ */
+export function takeElements(document: OrbitDocument, elements: Partial<KeplerianElements>): boolean {
+  const resolution = orbitAtHand(document);
+  if (!resolution.ok) return false;
+  const { form, texts: _, ...tags } = document.draft.value.entry;
+  const typed = form === 'state' || form === 'twoLine' ? 'altitudes' : form;
+  const frame = tags.frame === 'earthFixed' ? 'meanOfDate' : tags.frame;
+  const orbit = { ...resolution.orbit, mean: { ...resolution.orbit.mean, ...elements } };
+  const written = entryFromOrbit(orbit, typed, { ...tags, frame });
+  if (!written.ok) return false;
+  document.setTags({ form: typed, frame }, written.texts);
+  return true;
 }

@@ -1,6 +1,6 @@
 /** The node seen from above the north pole, with the Sun where the epoch is known, and where both go. */
-import { meanSunRightAscensionRad, type ResolvedOrbit, secondsPerDay, secularRates } from '../../core/index';
-import { arcPath, arcSpanDays, arrowHead, type Point, squarePath } from './drawing';
+import { meanSunRightAscensionRad, type ResolvedOrbit, secondsPerDay, secularRates } from '../../../core/index';
+import { arcPath, arcSpanDays, arrowHead, type Point, squarePath } from '../../parts/drawing';
 
 const size = 240;
 const centre: Point = [size / 2, size / 2];

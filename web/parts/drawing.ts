@@ -1,4 +1,4 @@
-/** Shapes and scales for the hand-made drawings of this place. */
+/** Shapes and scales for the drawings made by hand. */
 
 export type Point = readonly [number, number];
 

@@ -8,10 +8,10 @@ import {
   ratesOverInclination,
   type Theory,
   unitOf,
-} from '../../core/index';
-import { useWidth } from '../parts/useWidth';
-import { useApp } from '../state/appContext';
-import { diamondPath, linePath, niceTicks, squarePath } from './drawing';
+} from '../../../core/index';
+import { diamondPath, linePath, niceTicks, squarePath } from '../../parts/drawing';
+import { useWidth } from '../../parts/useWidth';
+import { useApp } from '../../state/appContext';
 
 const height = 240;
 const inset = { left: 58, right: 12, top: 10, bottom: 44 };

@@ -1,7 +1,7 @@
 /** The orbit in its plane, to scale, the line of nodes level, with where perigee goes. */
-import { degPerRad, formatQuantity, type ResolvedOrbit, secondsPerDay, secularRates } from '../../core/index';
-import { useApp } from '../state/appContext';
-import { arcPath, arcSpanDays, arrowHead, diamondPath, type Point, squarePath } from './drawing';
+import { degPerRad, formatQuantity, type ResolvedOrbit, secondsPerDay, secularRates } from '../../../core/index';
+import { arcPath, arcSpanDays, arrowHead, diamondPath, type Point, squarePath } from '../../parts/drawing';
+import { useApp } from '../../state/appContext';
 
 const size = 240;
 const centre: Point = [size / 2, size / 2];

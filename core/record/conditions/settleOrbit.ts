@@ -1,0 +1,55 @@
+/**
+ * Lets the conditions of a candidate settle its elements, starting from the orbit as typed.
+ *
+ * Each condition settles one element; the others are held as typed. What comes out is one orbit with the
+ * elements that were settled, or the reason why there is none, at the condition that is in the way.
+ */
+import { solveOrbit } from '../../design/solveOrbit';
+import type { MeanElements } from '../../orbit/elements';
+import type { Candidate } from '../candidate';
+import type { ResolvedOrbit } from '../resolved';
+import { elementNames, type SettledElement } from './kinds';
+import { type ReadCondition, readConditions } from './readConditions';
+
+export type Settlement =
+  | {
+      readonly ok: true;
+      readonly conditions: readonly ReadCondition[];
+      readonly orbit: ResolvedOrbit;
+      readonly settled: readonly SettledElement[];
+      /** Every orbit that meets the conditions, the one taken among them. */
+      readonly all: readonly MeanElements[];
+      /** What was changed in reading the wishes, in words. */
+      readonly notes: readonly string[];
+    }
+  | {
+      readonly ok: false;
+      readonly conditions: readonly ReadCondition[];
+      /** Why no orbit meets the conditions, in words with the numbers; empty where a field is in the way. */
+      readonly message: string;
+      /** The nearest thing that exists. */
+      readonly nearest: MeanElements | null;
+    };
+
+/** Settles the conditions of a candidate whose entry came to `start`. */
+export function settleOrbit(candidate: Candidate, start: ResolvedOrbit): Settlement {
+  const conditions = readConditions(candidate);
+  const readable = conditions.flatMap((each) => (each.ok ? [each] : []));
+  if (readable.length < conditions.length) return { ok: false, conditions, message: '', nearest: null };
+  const settled = readable.map(({ entry }) => entry.settles);
+  const twice = settled.find((element, index) => settled.indexOf(element) !== index);
+  if (twice !== undefined) {
+    const message = `Two conditions settle ${elementNames[twice]}; let one of them settle another element.`;
+    return { ok: false, conditions, message, nearest: null };
+  }
+  const result = solveOrbit({
+    body: start.body,
+    theory: 'second',
+    start: start.mean,
+    free: settled,
+    conditions: readable.map(({ condition }) => condition),
+  });
+  if (!result.ok) return { ok: false, conditions, message: result.reason.text, nearest: result.nearest ?? null };
+  const orbit = { ...start, mean: result.mean };
+  return { ok: true, conditions, orbit, settled, all: result.all, notes: result.notes };
+}

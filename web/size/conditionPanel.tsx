@@ -1,0 +1,72 @@
+/** Wishes stated as conditions, what each settles, and what came of them. */
+import {
+  type ConditionEntry,
+  conditionWords,
+  newCondition,
+  type ReadCondition,
+  readConditions,
+  type Settlement,
+} from '../../core/index';
+import { useApp } from '../state/appContext';
+import { ConditionRow } from './conditionRow';
+import { Solutions } from './solutions';
+import './conditions.css';
+
+export function ConditionPanel() {
+  const { document } = useApp();
+  const candidate = document.draft.value;
+  const settlement = document.conditions.settlement.value;
+  const conditions = settlement?.conditions ?? readConditions(candidate);
+  return (
+    <section class="conditions" aria-label="Conditions">
+      {conditions.map((condition, place) => (
+        // A condition has no name of its own; its place is what it is known by.
+        <ConditionRow key={`${place}${condition.entry?.kind}`} condition={condition} place={place} />
+      ))}
+      <AddCondition conditions={conditions} />
+      <Outcome settlement={settlement} />
+    </section>
+  );
+}
+
+type Kind = ConditionEntry['kind'];
+
+function AddCondition({ conditions }: { readonly conditions: readonly ReadCondition[] }) {
+  const { document, store } = useApp();
+  const present = conditions.flatMap(({ entry }) => (entry ? [entry] : []));
+  // Taking the same wish twice would be refused; a rate or an altitude of another body plane is added from the Book.
+  const offered = (Object.keys(conditionWords) as Kind[]).filter(
+    (kind) => kind !== 'sameNodeRate' && !present.some((entry) => entry.kind === kind),
+  );
+  return (
+    <label class="add-condition">
+      <span class="hidden-visually">Add a condition</span>
+      <select
+        value=""
+        disabled={store.tabs.editorElsewhere.value}
+        onChange={(event) => {
+          const { value } = event.currentTarget;
+          event.currentTarget.value = '';
+          if (value) document.conditions.add(newCondition(value as Kind, present));
+        }}
+      >
+        <option value="">+ condition</option>
+        {offered.map((kind) => (
+          <option key={kind} value={kind}>
+            {conditionWords[kind].label}
+          </option>
+        ))}
+      </select>
+    </label>
+  );
+}
+
+function Outcome({ settlement }: { readonly settlement: Settlement | null }) {
+  if (!settlement) return null;
+  return (
+    <div class="condition-outcome" role="status">
+      {!settlement.ok && settlement.message && <p class="condition-message">{settlement.message}</p>}
+      <Solutions settlement={settlement} />
+    </div>
+  );
+}

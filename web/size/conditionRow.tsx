@@ -1,0 +1,103 @@
+/** One condition: its numbers, the element it settles, and its message. */
+import {
+  type ConditionEntry,
+  type ConditionFieldWords,
+  conditionWords,
+  elementNames,
+  type ReadCondition,
+  type SettledElement,
+  settledElements,
+} from '../../core/index';
+import { NumberField } from '../parts/numberField';
+import { stepped } from '../parts/stepping';
+import { useApp } from '../state/appContext';
+
+interface RowProps {
+  readonly condition: ReadCondition;
+  readonly place: number;
+}
+
+export function ConditionRow({ condition, place }: RowProps) {
+  const { document, store } = useApp();
+  const { entry } = condition;
+  const blocked = store.tabs.editorElsewhere.value;
+  return (
+    <div class="condition">
+      <div class="condition-head">
+        <span class="condition-name">{entry ? conditionName(entry) : 'Unknown condition'}</span>
+        {entry && <Settles entry={entry} place={place} />}
+        <button
+          type="button"
+          class="plain"
+          disabled={blocked}
+          aria-label={`Drop the condition ${entry ? conditionWords[entry.kind].label : ''}`}
+          onClick={() => document.conditions.remove(place)}
+        >
+          ×
+        </button>
+      </div>
+      {entry && <ConditionFields entry={entry} place={place} condition={condition} />}
+      {!condition.ok && condition.message && <p class="condition-message">{condition.message}</p>}
+    </div>
+  );
+}
+
+function conditionName({ kind, texts }: ConditionEntry): string {
+  const { label } = conditionWords[kind];
+  return kind === 'sameNodeRate' ? `${label} ${texts.of ?? 'the other orbit'}` : label;
+}
+
+interface EntryProps {
+  readonly entry: ConditionEntry;
+  readonly place: number;
+}
+
+function Settles({ entry, place }: EntryProps) {
+  const { document } = useApp();
+  return (
+    <select
+      class="condition-settles"
+      aria-label={`What ${conditionName(entry)} settles`}
+      value={entry.settles}
+      onChange={(event) =>
+        document.conditions.change(place, { ...entry, settles: event.currentTarget.value as SettledElement })
+      }
+    >
+      {settledElements.map((element) => (
+        <option key={element} value={element}>
+          settles {elementNames[element].replace('the ', '')}
+        </option>
+      ))}
+    </select>
+  );
+}
+
+function ConditionFields({ entry, place, condition }: EntryProps & { readonly condition: ReadCondition }) {
+  const { document } = useApp();
+  const { lengthUnit } = document.draft.value.entry;
+  const { fields } = conditionWords[entry.kind];
+  if (fields.length === 0) return null;
+  return (
+    <div class="field-group">
+      {fields.map((words) => (
+        <NumberField
+          key={words.field}
+          label={words.label}
+          text={entry.texts[words.field] ?? ''}
+          unit={words.unit === 'length' ? lengthUnit : words.unit}
+          error={condition.ok ? undefined : condition.errors[words.field]}
+          step={stepOf(words)}
+          signed={words.signed ?? false}
+          onText={(text) =>
+            document.conditions.change(place, { ...entry, texts: { ...entry.texts, [words.field]: text } })
+          }
+        />
+      ))}
+    </div>
+  );
+}
+
+function stepOf({ stepSize }: ConditionFieldWords) {
+  if (stepSize === undefined) return undefined;
+  return (text: string, count: number) => stepped(text, stepSize, count);
+}
