@@ -3,7 +3,6 @@ import {
   type ConditionEntry,
   type ConditionFieldWords,
   conditionWords,
-  elementNames,
   type ReadCondition,
   type SettledElement,
   settledElements,
@@ -52,6 +51,13 @@ interface EntryProps {
   readonly place: number;
 }
 
+/** The trade's symbols: short enough to stand beside the condition's name. */
+const elementSymbols: Readonly<Record<SettledElement, string>> = {
+  semiMajorAxisKm: 'a',
+  eccentricity: 'e',
+  inclinationRad: 'i',
+};
+
 function Settles({ entry, place }: EntryProps) {
   const { document } = useApp();
   return (
@@ -65,7 +71,7 @@ function Settles({ entry, place }: EntryProps) {
     >
       {settledElements.map((element) => (
         <option key={element} value={element}>
-          settles {elementNames[element].replace('the ', '')}
+          settles {elementSymbols[element]}
         </option>
       ))}
     </select>
