@@ -7,6 +7,10 @@ import { offlineWorker } from './web/build/offlineWorker.ts';
 
 const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
 
+/** Fetched when a condition, a chart or the book asks for it. */
+const onDemand =
+  /[\\/]core[\\/](design|forces|mission[\\/](averagedRates|equinoctial|gaussAverage|oblateness|orbitBasis)|numerics[\\/](bracket|linear|newton|roots)|record[\\/]conditions[\\/]settleOrbit)/;
+
 export default defineConfig({
   root: `${root}/web`,
   // Relative, so that the folder works below any path of any static host.
@@ -29,7 +33,17 @@ export default defineConfig({
     rolldownOptions: {
       // Core is pure: importing its table of contents needs none of the files that are not used from it.
       treeshake: { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] },
-      output: { codeSplitting: { groups: [{ name: 'shared', minShareCount: 2 }] } },
+      output: {
+        codeSplitting: {
+          // Else what solving needs of the rest would come with it, and the first page would load solving.
+          includeDependenciesRecursively: false,
+          groups: [
+            // Solving serves several places, none of them at the first page.
+            { name: 'design', test: onDemand, priority: 2 },
+            { name: 'shared', minShareCount: 2, priority: 1 },
+          ],
+        },
+      },
     },
   },
   preview: { headers: { 'Content-Security-Policy': contentSecurityPolicy } },

@@ -1,5 +1,5 @@
 /** The one line by which an orbit is known in a list. */
-import { type Candidate, fingerprint, formatNumber, resolveOrbit, unitOf } from '../../core/index';
+import { type Candidate, fingerprint, formatNumber, resolveOrbit, settleOrbit, unitOf } from '../../core/index';
 
 export interface SummarisedOrbit {
   readonly kind: 'orbit';
@@ -24,13 +24,18 @@ export function orbitSummary(candidate: Candidate): OrbitSummary {
     const [first] = Object.values(resolution.errors);
     return { kind: 'unsettled', message: first?.message ?? 'The entry does not come to an orbit yet.' };
   }
-  const { body, mean } = resolution.orbit;
+  const settlement = candidate.conditions.length > 0 ? settleOrbit(candidate, resolution.orbit) : null;
+  if (settlement?.ok === false) {
+    return { kind: 'unsettled', message: settlement.message || 'A condition cannot be read yet.' };
+  }
+  const orbit = settlement?.orbit ?? resolution.orbit;
+  const { body, mean } = orbit;
   return {
     kind: 'orbit',
     perigeeAltitudeKm: mean.semiMajorAxisKm * (1 - mean.eccentricity) - body.equatorialRadiusKm,
     apogeeAltitudeKm: mean.semiMajorAxisKm * (1 + mean.eccentricity) - body.equatorialRadiusKm,
     inclinationRad: mean.inclinationRad,
-    fingerprint: fingerprint(resolution.orbit),
+    fingerprint: fingerprint(orbit),
     bodyName: body.name,
     isEarth: candidate.body === 'earth',
   };
