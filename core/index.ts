@@ -9,6 +9,7 @@ export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from
 export { meanSiderealTimeRad } from './bodies/siderealTime';
 export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
 export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
+export type { OrbitCondition } from './design/conditions/registry';
 export { type FrozenOptions, frozenOrbit } from './design/frozen';
 export type { FrozenInput } from './design/frozenChecks';
 export type { FrozenOrbit, FrozenRefusal, FrozenResult, FrozenShape, NoFrozenOrbit } from './design/frozenResult';
@@ -31,6 +32,9 @@ export {
   type SearchedBand,
   tryRepeatTracks,
 } from './design/repeatTracks';
+export type { NoOrbit, NoOrbitReason, ReasonKind, SolvedOrbit, SolveResult } from './design/solve/answer';
+export type { FreeElement } from './design/solve/problem';
+export { type SolveInput, solveOrbit } from './design/solveOrbit';
 export type { Force } from './forces/force';
 export { highestZonalDegree, zonalForce } from './forces/zonal';
 export { type AveragedModel, type AveragedRates, averagedRates } from './mission/averagedRates';

@@ -23,6 +23,8 @@ export interface ShapeRates {
   readonly latitude0: number;
   readonly latitude2: number;
   readonly latitude4: number;
+  /** The size that rates of node and perigee have at this shape, rad/s. */
+  readonly size: number;
 }
 
 export interface Shape {
@@ -30,30 +32,64 @@ export interface Shape {
   readonly eccentricity: number;
 }
 
+const slantRad = Math.PI / 4;
+const poleRad = Math.PI / 2;
+
 /** Rates of a shape (km); errors as `secularRates`. */
-export function shapeRates(body: Body, theory: Theory, { semiMajorAxisKm, eccentricity }: Shape): ShapeRates {
-  const at = (inclinationRad: number): SecularRates =>
-    secularRates(body, meanAt({ semiMajorAxisKm, eccentricity }, inclinationRad), theory);
-  const equator = at(0);
-  const slant = at(Math.PI / 4);
-  const pole = at(Math.PI / 2);
+export function shapeRates(body: Body, theory: Theory, shape: Shape): ShapeRates {
+  const equator = secularRates(body, meanAt(shape, 0), theory);
+  const pole = secularRates(body, meanAt(shape, poleRad), theory);
+  // First order has no fourth powers: halfway in θ² is the mean of both ends.
+  const slant = theory === 'first' ? halfway(equator, pole) : secularRates(body, meanAt(shape, slantRad), theory);
   // Ω̇/θ is c₁ + c₃θ²: at θ² = 1 and θ² = ½.
-  const slantNode = slant.nodeRadPerS * Math.SQRT2;
-  const node3 = 2 * (equator.nodeRadPerS - slantNode);
-  const latitude = (rates: SecularRates) => rates.perigeeRadPerS + rates.meanAnomalyRadPerS;
-  const [perigee2, perigee4] = evenTerms(equator.perigeeRadPerS, slant.perigeeRadPerS, pole.perigeeRadPerS);
-  const [latitude2, latitude4] = evenTerms(latitude(equator), latitude(slant), latitude(pole));
+  const node3 = 2 * (equator.nodeRadPerS - slant.nodeRadPerS * Math.SQRT2);
+  const perigee4 = quartic(equator.perigeeRadPerS, slant.perigeeRadPerS, pole.perigeeRadPerS);
+  const latitude0 = latitudeOf(pole);
+  const latitude4 = quartic(latitudeOf(equator), latitudeOf(slant), latitude0);
   return {
-    semiMajorAxisKm,
-    eccentricity,
+    semiMajorAxisKm: shape.semiMajorAxisKm,
+    eccentricity: shape.eccentricity,
     node1: equator.nodeRadPerS - node3,
     node3,
     perigee0: pole.perigeeRadPerS,
-    perigee2,
+    perigee2: equator.perigeeRadPerS - pole.perigeeRadPerS - perigee4,
     perigee4,
-    latitude0: latitude(pole),
-    latitude2,
+    latitude0,
+    latitude2: latitudeOf(equator) - latitude0 - latitude4,
     latitude4,
+    size: Math.abs(equator.nodeRadPerS),
+  };
+}
+
+/** The same, true at one inclination (rad) only, for a third of the work: for searches that hold it. */
+export function shapeRatesAt(body: Body, theory: Theory, shape: Shape, inclinationRad: number): ShapeRates {
+  const rates = secularRates(body, meanAt(shape, inclinationRad), theory);
+  const { semiMajorAxisKm: a, eccentricity: e } = shape;
+  const ratio = body.radiusKm / (a * (1 - e * e));
+  return {
+    semiMajorAxisKm: a,
+    eccentricity: e,
+    node1: rates.nodeRadPerS / Math.cos(inclinationRad),
+    node3: 0,
+    perigee0: rates.perigeeRadPerS,
+    perigee2: 0,
+    perigee4: 0,
+    latitude0: latitudeOf(rates),
+    latitude2: 0,
+    latitude4: 0,
+    size: 1.5 * Math.sqrt(body.muKm3PerS2 / a / a / a) * Math.abs(body.zonals[2] ?? 0) * ratio * ratio,
+  };
+}
+
+function latitudeOf(rates: SecularRates): number {
+  return rates.perigeeRadPerS + rates.meanAnomalyRadPerS;
+}
+
+function halfway(one: SecularRates, other: SecularRates): SecularRates {
+  return {
+    nodeRadPerS: one.nodeRadPerS * Math.SQRT1_2,
+    perigeeRadPerS: (one.perigeeRadPerS + other.perigeeRadPerS) / 2,
+    meanAnomalyRadPerS: (one.meanAnomalyRadPerS + other.meanAnomalyRadPerS) / 2,
   };
 }
 
@@ -61,11 +97,9 @@ function meanAt({ semiMajorAxisKm, eccentricity }: Shape, inclinationRad: number
   return { semiMajorAxisKm, eccentricity, inclinationRad, nodeRad: 0, perigeeRad: 0, meanAnomalyRad: 0 };
 }
 
-/** b and c of a + bθ² + cθ⁴ from its values at θ² = 1, ½ and 0. */
-function evenTerms(one: number, half: number, zero: number): readonly [number, number] {
-  const whole = one - zero;
-  const part = half - zero;
-  return [4 * part - whole, 2 * whole - 4 * part];
+/** c of a + bθ² + cθ⁴ from its values at θ² = 1, ½ and 0. */
+function quartic(one: number, half: number, zero: number): number {
+  return 2 * (one - zero) - 4 * (half - zero);
 }
 
 /** rad/s at θ = cos i. */
@@ -83,9 +117,4 @@ export function perigeeRateAt({ perigee0, perigee2, perigee4 }: ShapeRates, thet
 export function latitudeRateAt({ latitude0, latitude2, latitude4 }: ShapeRates, theta: number): number {
   const theta2 = theta * theta;
   return latitude0 + theta2 * (latitude2 + theta2 * latitude4);
-}
-
-/** The size that rates of node and perigee have at this shape, rad/s: the node's at the equator. */
-export function rateSize({ node1, node3 }: ShapeRates): number {
-  return Math.abs(node1 + node3);
 }

@@ -2,13 +2,14 @@
 import type { Body } from '../../bodies/body';
 import { degPerRad, secondsPerDay } from '../../numerics/angles';
 import { formatNumber, formatSignificant } from '../../numerics/numberWords';
-import { nodeRateAt, perigeeRateAt, rateSize } from '../shapeRates';
+import { nodeRateAt, perigeeRateAt } from '../shapeRates';
 import type { Condition, Prepared } from './condition';
 
 /** A rate with its unit: four digits, more where it is slow. */
 export function rateWords(radPerS: number): string {
+  if (radPerS === 0) return '0 deg/day';
   const degPerDay = radPerS * degPerRad * secondsPerDay;
-  const slow = degPerDay !== 0 && Math.abs(degPerDay) < 0.01;
+  const slow = Math.abs(degPerDay) < 0.01;
   return `${slow ? formatSignificant(degPerDay, 4) : formatNumber(degPerDay, { digits: 4 })} deg/day`;
 }
 
@@ -21,7 +22,7 @@ export function nodeCondition(radPerS: number, wording: Wording): Condition {
     family: 'node',
     target: radPerS,
     measure: nodeRateAt,
-    scale: (shape, theta) => (radPerS === 0 ? rateSize(shape) : Math.abs(radPerS) + Math.abs(nodeRateAt(shape, theta))),
+    scale: (shape, theta) => (radPerS === 0 ? shape.size : Math.abs(radPerS) + Math.abs(nodeRateAt(shape, theta))),
     write: rateWords,
     quantity: 'node rate',
     notes: [],
@@ -35,7 +36,7 @@ export function perigeeCondition(radPerS: number, wording: Wording): Condition {
     family: 'perigee',
     target: radPerS,
     measure: perigeeRateAt,
-    scale: (shape) => Math.abs(radPerS) + rateSize(shape),
+    scale: (shape) => Math.abs(radPerS) + shape.size,
     write: rateWords,
     quantity: 'perigee rate',
     notes: [],

@@ -24,27 +24,30 @@ export function shapeAtAxis(problem: Problem, question: AxisQuestion): ShapeRate
   const { condition, eccentricity, theta } = question;
   const lowest = Math.log((searchShare * floorKm(problem.body)) / ((1 - eccentricity) * (1 + eccentricity)));
   const highest = Math.log(ceilingKm(problem.body));
-  let shape: ShapeRates | null = null;
-  const logAt = (x: number): number => {
-    shape = ratesOf(problem, { semiMajorAxisKm: Math.exp(x), eccentricity });
-    return shape ? Math.atanh(residualOf(condition, shape, theta(shape))) : Number.NaN;
+  const at = (x: number): Trial | null => {
+    const shape = ratesOf(problem, { semiMajorAxisKm: Math.exp(x), eccentricity });
+    if (!shape) return null;
+    const value = Math.atanh(residualOf(condition, shape, theta(shape)));
+    return Number.isFinite(value) ? { x, value, shape } : null;
   };
-  // Half a unit below the range the power law still holds, which is all that a first step needs.
-  let x = Math.min(highest, Math.max(lowest, Math.log(question.guessKm)));
-  let value = logAt(x);
-  let before = x + firstChange;
-  let valueBefore = logAt(before);
-  for (let step = 0; step < maxSteps; step += 1) {
-    const change = (-value * (x - before)) / (value - valueBefore);
-    if (value === 0 || Math.abs(change) < 2e-16 * Math.abs(x)) break;
-    [before, valueBefore] = [x, value];
-    x = Math.min(highest + 0.1, Math.max(lowest - 0.1, x + change));
-    value = logAt(x);
-    if (!Number.isFinite(value)) return null;
-    if (Math.abs(value) < 1e-15 || x === before) break;
+  // A tenth below the range the power law still holds, which is all that a first step needs.
+  let here = at(Math.min(highest, Math.max(lowest, Math.log(question.guessKm))));
+  let before = here && at(here.x + firstChange);
+  for (let step = 0; step < maxSteps && here && before && Math.abs(here.value) > 1e-15; step += 1) {
+    const change = (-here.value * (here.x - before.x)) / (here.value - before.value);
+    const x = Math.min(highest + 0.1, Math.max(lowest - 0.1, here.x + change));
+    if (x === here.x || Math.abs(change) < 2e-16 * Math.abs(x)) break;
+    before = here;
+    here = at(x);
   }
-  shape = ratesOf(problem, { semiMajorAxisKm: Math.exp(x), eccentricity });
-  return Math.abs(value) < 1e-11 && shape && isInside(problem, shape) ? shape : null;
+  return here && Math.abs(here.value) < 1e-11 && isInside(problem, here.shape) ? here.shape : null;
+}
+
+interface Trial {
+  /** ln a */
+  readonly x: number;
+  readonly value: number;
+  readonly shape: ShapeRates;
 }
 
 function isInside({ body }: Problem, shape: ShapeRates): boolean {

@@ -1,14 +1,13 @@
 /** Why there is no orbit, in words with the numbers, and the nearest thing that exists. */
-import { formatNumber } from '../../numerics/numberWords';
 import type { Condition } from '../conditions/condition';
-import { nodeRateAt, type ShapeRates } from '../shapeRates';
 import { type NoOrbit, noOrbit } from './answer';
-import { shapeAtAxis } from './axis';
+import { beyondPole } from './beyondPole';
 import { inSentence, namesOf } from './conflicts';
-import { floorKm, isInDomain, meanOf, type Point, type Problem, parameterKm, ratesOf, residualsAt } from './problem';
+import { floorKm, isInDomain, meanOf, type Point, type Problem, parameterKm, pointOf, residualsAt } from './problem';
 import { type ReachedPoint, reachOf } from './reach';
 import type { Division } from './search';
 import type { Settlement } from './settle';
+import { eccentricityText, kmText } from './words';
 
 export interface Failure {
   readonly problem: Problem;
@@ -22,14 +21,20 @@ export function explained(failure: Failure): NoOrbit {
   const labels = problem.conditions.map(({ label }, place) => (place === 0 ? label : inSentence(label))).join(', ');
   if (holdsEverywhere) return everywhere(problem, holdsEverywhere);
   const reached = reachOf(failure.problem, failure.division);
-  const nearest = nearestPoint(problem, [...settlement.rejected, ...reached]);
+  const beyond = beyondPole(failure);
+  const nearest = nearestPoint(problem, [
+    ...settlement.rejected,
+    ...reached,
+    ...(beyond?.points ?? []),
+    ...circles(failure),
+  ]);
   const withNearest = (answer: NoOrbit): NoOrbit =>
     nearest ? { ...answer, nearest: meanOf(problem, nearest) } : answer;
   if (settlement.inDoubt) {
     const text = `${labels}: the search did not converge. There may be an orbit that meets them; try another start.`;
     return withNearest(noOrbit('didNotConverge', text));
   }
-  const sentence = shapeless(failure) ?? beyondPole(failure) ?? belowSurface(failure) ?? outOfReach(failure, reached);
+  const sentence = shapeless(failure) ?? beyond?.text ?? belowSurface(failure) ?? outOfReach(failure, reached);
   return withNearest(noOrbit('noSolution', sentence ?? `${labels}: no orbit meets them.`));
 }
 
@@ -52,49 +57,21 @@ function shapeless({ problem, division }: Failure): string | null {
   const altitude = problem.conditions.find(({ family }) => family === 'altitude');
   const { semiMajorAxisKm: a, eccentricity: e } = problem.start;
   if (altitude?.eccentricityAt && !problem.free.includes('semiMajorAxisKm')) {
-    const wanted = formatNumber(altitude.eccentricityAt(a), { digits: 4 });
-    return `${altitude.label} with a semi-major axis of ${km(a)} would need an eccentricity of ${wanted}; it has to be from 0 to below 1.`;
+    const wanted = eccentricityText(altitude.eccentricityAt(a));
+    return `${altitude.label} with a semi-major axis of ${kmText(a)} would need an eccentricity of ${wanted}; it has to be from 0 to below 1.`;
   }
   if (altitude) return `${altitude.label} leaves no orbit outside ${problem.body.name}.`;
   if (problem.free.includes('semiMajorAxisKm')) {
-    return `At an eccentricity of ${formatNumber(e, { digits: 4 })} every orbit outside ${problem.body.name} is larger than is looked for.`;
+    return `At an eccentricity of ${eccentricityText(e)} every orbit outside ${problem.body.name} is larger than is looked for.`;
   }
-  return `A semi-major axis of ${km(a)} lies inside ${problem.body.name}, whose radius is ${km(floorKm(problem.body))}.`;
+  return `A semi-major axis of ${kmText(a)} lies inside ${problem.body.name}, whose radius is ${kmText(floorKm(problem.body))}.`;
 }
 
-/** The shape is there, but no inclination turns the node that fast. */
-function beyondPole(failure: Failure): string | null {
-  const { problem, division, settlement } = failure;
-  const node = division.thetaFrom?.family === 'node' ? division.thetaFrom : null;
-  if (!node) return null;
-  for (const point of settlement.rejected) {
-    const shape = ratesOf(problem, point);
-    if (!shape || Math.abs(point.theta) < 1 || parameterKm(point) < floorKm(problem.body) * 0.999) continue;
-    const cosine = node.target / nodeRateAt(shape, 1);
-    if (!(Math.abs(cosine) > 1)) continue;
-    const at = `at a mean altitude of ${km(altitudeKm(problem, shape))} and e ${eccentricityText(shape.eccentricity)}`;
-    return `cos i would have to be ${formatNumber(cosine, { digits: 2 + Math.max(0, Math.ceil(-Math.log10(Math.abs(cosine) - 1)) - 1) })} ${at}; ${limit(problem, { node, shape, side: Math.sign(cosine) })}`;
-  }
-  return null;
-}
-
-interface LimitQuestion {
-  readonly node: Condition;
-  readonly shape: ShapeRates;
-  readonly side: number;
-}
-
-/** How far out, at this eccentricity, the node still turns so fast at i = 0 or 180°. */
-function limit(problem: Problem, { node, shape, side }: LimitQuestion): string {
-  const { eccentricity, semiMajorAxisKm } = shape;
-  const question = { condition: node, eccentricity, theta: () => side, guessKm: semiMajorAxisKm };
-  const last = shapeAtAxis(problem, question);
-  const orbits = `${eccentricity < 1e-3 ? 'circular' : `e ${eccentricityText(eccentricity)}`} orbits`;
-  const kindOf = node.kind === 'sunSynchronous' ? 'Sun-synchronous' : `of ${node.write(node.target)}`;
-  const named = node.kind === 'sunSynchronous' ? `${kindOf} ${orbits}` : `${orbits} ${kindOf}`;
-  if (!last || parameterKm(last) < floorKm(problem.body)) return `there are no ${named} above the surface.`;
-  const named2 = node.kind === 'sunSynchronous' && eccentricity < 1e-3 ? 'circular Sun-synchronous orbits' : named;
-  return `${named2} end at a mean altitude of ${km(altitudeKm(problem, last))}.`;
+/** Where an altitude asks for an e below 0, the circle is nearest. */
+function circles({ problem, division }: Failure): readonly Point[] {
+  if (division.shapes.kind === 'line' || problem.free.includes('semiMajorAxisKm')) return [];
+  const tie = problem.conditions.find(({ family }) => family === 'altitude')?.eccentricityAt;
+  return tie && tie(problem.start.semiMajorAxisKm) < 0 ? [{ ...pointOf(problem), eccentricity: 0 }] : [];
 }
 
 /** All conditions hold, but inside the body. */
@@ -104,8 +81,8 @@ function belowSurface({ problem, settlement }: Failure): string | null {
     return residuals?.every((value) => Math.abs(value) < 1e-9) && !isInDomain(problem.body, point);
   });
   if (!inside || parameterKm(inside) >= floorKm(problem.body)) return null;
-  const size = `a mean a of ${km(inside.semiMajorAxisKm)} and e ${eccentricityText(inside.eccentricity)}`;
-  return `It would take ${size}, whose p = a(1 − e²) of ${km(parameterKm(inside))} is less than the radius of ${problem.body.name}, ${km(floorKm(problem.body))}.`;
+  const size = `a mean a of ${kmText(inside.semiMajorAxisKm)} and e ${eccentricityText(inside.eccentricity)}`;
+  return `It would take ${size}, whose p = a(1 − e²) of ${kmText(parameterKm(inside))} is less than the radius of ${problem.body.name}, ${kmText(floorKm(problem.body))}.`;
 }
 
 /** The range of the quantity sought, over all that meets the other conditions. */
@@ -131,16 +108,4 @@ function nearestPoint(problem: Problem, points: readonly Point[]): Point | null 
     if (size < least) [best, least] = [point, size];
   }
   return best;
-}
-
-function altitudeKm({ body }: Problem, { semiMajorAxisKm }: { readonly semiMajorAxisKm: number }): number {
-  return semiMajorAxisKm - body.equatorialRadiusKm;
-}
-
-function km(value: number): string {
-  return `${formatNumber(value, { digits: 0 })} km`;
-}
-
-function eccentricityText(eccentricity: number): string {
-  return formatNumber(eccentricity, { digits: 4 });
 }

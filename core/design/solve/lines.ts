@@ -21,8 +21,10 @@ export type Shapes =
   | { readonly kind: 'single'; readonly shapes: readonly ShapeRates[] }
   | { readonly kind: 'line'; readonly line: Line };
 
-const samples = 48;
-const planeSamples = 64;
+/** Rates are powers of a: few samples of ln a show every turn. */
+const axisSamples = 28;
+const samples = 40;
+const planeSamples = 48;
 
 /** `density` samples more finely: 1 finds nearly everything, more is for what it missed. */
 export function shapesLeft(problem: Problem, density = 1): Shapes {
@@ -84,7 +86,7 @@ function axisLine(problem: Problem, density: number): Line {
   const low = Math.log((searchShare * floorKm(problem.body)) / ((1 - eccentricity) * (1 + eccentricity)));
   const high = Math.log(ceilingKm(problem.body));
   return {
-    grid: low < high ? evenGrid(low, high, density * samples) : noGrid,
+    grid: low < high ? evenGrid(low, high, density * axisSamples) : noGrid,
     shapeAt: (s) => ratesOf(problem, { semiMajorAxisKm: Math.exp(s), eccentricity }),
     spent: null,
   };

@@ -2,7 +2,7 @@
 import type { Body } from '../../bodies/body';
 import type { MeanElements, Theory } from '../../orbit/elements';
 import { type Condition, residualOf } from '../conditions/condition';
-import { type Shape, type ShapeRates, shapeRates } from '../shapeRates';
+import { type Shape, type ShapeRates, shapeRates, shapeRatesAt } from '../shapeRates';
 
 export const freeElements = ['semiMajorAxisKm', 'eccentricity', 'inclinationRad'] as const;
 export type FreeElement = (typeof freeElements)[number];
@@ -55,9 +55,10 @@ export function isInDomain(body: Body, point: Point): boolean {
 }
 
 /** The rates of a shape, or null where there are none. */
-export function ratesOf({ body, theory }: Problem, shape: Shape): ShapeRates | null {
+export function ratesOf({ body, theory, free, start }: Problem, shape: Shape): ShapeRates | null {
   const { semiMajorAxisKm: a, eccentricity: e } = shape;
   if (!(a > 0 && a < Infinity && e >= 0 && e < 1)) return null;
+  if (!free.includes('inclinationRad')) return shapeRatesAt(body, theory, shape, start.inclinationRad);
   return shapeRates(body, theory, shape);
 }
 

@@ -5,7 +5,7 @@ import { type Condition, residualOf } from '../conditions/condition';
 import type { ShapeRates } from '../shapeRates';
 import { type ThetaRule, thetaBranches } from './inclinations';
 import { type Line, type Shapes, shapesLeft } from './lines';
-import { type Point, type Problem, pointOf } from './problem';
+import { floorKm, type Point, type Problem, pointOf, ratesOf, searchShare } from './problem';
 
 export interface Search {
   /** Where the search says all conditions hold; still to be checked, since branches run on beyond their ends. */
@@ -42,7 +42,16 @@ export function dividedProblem(problem: Problem, density = 1): Division {
   const thetaFrom =
     rest.find(({ family }) => family === 'node') ?? rest.find(({ family }) => family === 'perigee') ?? null;
   const sought = rest.find((condition) => condition !== thetaFrom) ?? null;
-  return { shapes, thetaFrom, rules: thetaFrom ? thetaBranches(thetaFrom) : [], sought };
+  return { shapes, thetaFrom, rules: thetaFrom ? branchesOf(problem, thetaFrom) : [], sought };
+}
+
+/** Near the floor, and there more than anywhere, J4 may bend the rates so that further branches exist. */
+const probes = [0, 0.5, 0.9];
+
+function branchesOf(problem: Problem, condition: Condition): readonly ThetaRule[] {
+  const low = searchShare * floorKm(problem.body);
+  const shapes = probes.map((e) => ratesOf(problem, { semiMajorAxisKm: low / (1 - e * e), eccentricity: e }));
+  return thetaBranches(condition).filter((rule) => shapes.some((shape) => shape && !Number.isNaN(rule(shape))));
 }
 
 export function search(division: Division): Search {
@@ -70,7 +79,10 @@ const thetaGrid = Float64Array.from({ length: 41 }, (_, k) => -Math.cos((Math.PI
 /** One shape: θ follows from a rate's branches, from a period by a search over all θ, or is held. */
 function searchInclination({ rules, thetaFrom, sought }: Division, shape: ShapeRates, found: Gathered): void {
   if (thetaFrom || !sought) {
-    for (const theta of rules) found.candidates.push(pointAt(shape, theta));
+    for (const theta of rules) {
+      const point = pointAt(shape, theta);
+      if (!Number.isNaN(point.theta)) found.candidates.push(point);
+    }
     return;
   }
   const residual = (theta: number) => residualOf(sought, shape, theta);
