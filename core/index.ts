@@ -9,10 +9,12 @@ export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from
 export { meanSiderealTimeRad } from './bodies/siderealTime';
 export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
 export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
+export type { Cycle } from './design/closingOrbit';
 export type { OrbitCondition } from './design/conditions/registry';
 export { type FrozenOptions, frozenOrbit } from './design/frozen';
 export type { FrozenInput } from './design/frozenChecks';
 export type { FrozenOrbit, FrozenRefusal, FrozenResult, FrozenShape, NoFrozenOrbit } from './design/frozenResult';
+export { type NearestRepeat, type NearestRequest, type NearestResult, nearestRepeats } from './design/nearestRepeats';
 export {
   longestCycleDays,
   type RepeatField,
@@ -35,11 +37,34 @@ export {
 export type { NoOrbit, NoOrbitReason, ReasonKind, SolvedOrbit, SolveResult } from './design/solve/answer';
 export type { FreeElement } from './design/solve/problem';
 export { type SolveInput, solveOrbit } from './design/solveOrbit';
+export { type CycleResult, readCycle } from './design/trackCycle';
+export {
+  type CrossingOptions,
+  type EquatorCrossing,
+  equatorCrossings,
+  type Neighbour,
+  type SubCycle,
+  type TrackPattern,
+  type TrackStep,
+  trackPattern,
+  trackStepOf,
+} from './design/trackPattern';
+export {
+  closedFromLatitude,
+  greatestLatitudeRad,
+  type SwathFit,
+  swathFit,
+  type TrackGrid,
+  type TrackSpacing,
+  trackSpacingAt,
+} from './design/trackSpacing';
 export type { Force } from './forces/force';
 export { highestZonalDegree, zonalForce } from './forces/zonal';
 export { type AveragedModel, type AveragedRates, averagedRates } from './mission/averagedRates';
 export { type ClosedFormDrift, closedFormDrift, type DriftLines } from './mission/closedFormDrift';
 export { elementsFromEquinoctial, equinoctialFromElements, type Sense, senseOf } from './mission/equinoctial';
+export type { GroundLine } from './mission/groundLines';
+export { type GroundTrack, type GroundTrackProblem, type GroundTrackRequest, groundTrack } from './mission/groundTrack';
 export { degPerRad, radPerDeg, secondsPerDay, twoPi, wrapPi, wrapTwoPi } from './numerics/angles';
 export type { KeplerianElements, MeanElements, OsculatingElements, StateVector, Theory } from './orbit/elements';
 export {
