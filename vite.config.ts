@@ -11,6 +11,9 @@ const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
 const onDemand =
   /[\\/]core[\\/](design|forces|mission[\\/](averagedRates|equinoctial|gaussAverage|oblateness|orbitBasis)|numerics[\\/](bracket|linear|newton|roots)|record[\\/]conditions[\\/]settleOrbit)/;
 
+// Core is pure: importing its table of contents needs none of the files that are not used from it.
+const pureCore = { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] };
+
 export default defineConfig({
   root: `${root}/web`,
   // Relative, so that the folder works below any path of any static host.
@@ -23,6 +26,7 @@ export default defineConfig({
     contentSecurityPolicyTag(),
     offlineWorker({ entry: `${root}/web/offline/serviceWorker.ts`, fileName: 'serviceWorker.js' }),
   ],
+  worker: { format: 'es', rolldownOptions: { treeshake: pureCore } },
   build: {
     outDir: `${root}/dist`,
     emptyOutDir: true,
@@ -31,8 +35,7 @@ export default defineConfig({
     modulePreload: { polyfill: false },
     // What several places share is one file: fewer requests, and it packs better than many small ones.
     rolldownOptions: {
-      // Core is pure: importing its table of contents needs none of the files that are not used from it.
-      treeshake: { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] },
+      treeshake: pureCore,
       output: {
         codeSplitting: {
           // Else what solving needs of the rest would come with it, and the first page would load solving.

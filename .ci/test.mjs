@@ -12,7 +12,10 @@ const bin = (name) => `${root}node_modules/.bin/${name}`;
 
 /** A stage fails if one of its commands does. A `report` holds counts; a stage without one counts only if it fails. */
 const stages = [
-  { name: 'types', commands: ['core', 'web', 'web/offline', 'web/build', 'test'].map((part) => ['tsc', '-p', part]) },
+  {
+    name: 'types',
+    commands: ['core', 'web', 'web/offline', 'web/work', 'web/build', 'test'].map((part) => ['tsc', '-p', part]),
+  },
   { name: 'lint', commands: [['biome', 'check', '--error-on-warnings']] },
   { name: 'unused', commands: [['knip']] },
   vitest('unit'),

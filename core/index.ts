@@ -15,6 +15,7 @@ export { type FrozenOptions, frozenOrbit } from './design/frozen';
 export type { FrozenInput } from './design/frozenChecks';
 export type { FrozenOrbit, FrozenRefusal, FrozenResult, FrozenShape, NoFrozenOrbit } from './design/frozenResult';
 export { type NearestRepeat, type NearestRequest, type NearestResult, nearestRepeats } from './design/nearestRepeats';
+export { neighbourDays } from './design/neighbourDays';
 export {
   longestCycleDays,
   type RepeatField,
@@ -141,8 +142,22 @@ export type { TwoLineError } from './record/formats/twoLineFields';
 export { type Expr, evaluate, mapSymbols, symbolsIn, type Values } from './record/formula';
 export { formulaText } from './record/formulaText';
 export { type HeadlineSpan, headlineOf } from './record/headline';
+export {
+  knownLimits,
+  type Limit,
+  type LimitBound,
+  type LimitEntry,
+  type LimitMargin,
+  limitMargins,
+  marginLeft,
+  type ReadLimit,
+  readLimits,
+} from './record/limits';
+export { violatesAt } from './record/limitsAt';
+export { brokenText, convertedText, limitInUnit, limitText, marginText, storedLimitText } from './record/limitWords';
 export { type Migration, migrateCandidate } from './record/migrate';
 export { type NumberReading, type NumberResult, readNumber } from './record/numberText';
+export { type FieldReader, fieldReader } from './record/readFields';
 export type { Doubt } from './record/readings/doubt';
 export type {
   Alternate,
@@ -151,11 +166,22 @@ export type {
   ReadingLevel,
   ReadingMark,
   ReadingPoint,
+  ReadingSpec,
   Sensitivities,
 } from './record/readings/reading';
-export { type AbsentReading, absentReadings, readingsOf } from './record/readings/readings';
+export { type AbsentReading, absentReadings, readingSpec, readingsOf } from './record/readings/readings';
 export type { FieldError, FieldErrors, Notice, Resolution, ResolvedOrbit } from './record/resolved';
 export { resolveOrbit } from './record/resolveOrbit';
+export { limitCrossings, pointAt, type Sweep, type SweepRequest, sweepReading } from './record/sweep';
+export { sweepSentence } from './record/sweepHeadline';
+export {
+  type SweptElement,
+  type SweptWords,
+  startingRange,
+  sweptChanges,
+  sweptElements,
+  sweptWords,
+} from './record/sweptElements';
 export {
   type DisplayUnit,
   displayUnits,

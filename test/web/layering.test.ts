@@ -72,6 +72,9 @@ const forbidden = [
   ['web/main.tsx', 'workbox-window'],
   ['web/store/a.ts', 'workbox-core'],
   ['web/state/a.ts', 'node:fs'],
+  ['web/work/a.ts', '../state/document'],
+  ['web/work/a.ts', 'preact'],
+  ['web/size/a.tsx', 'comlink'],
   ['test/web/a.test.ts', '../../core/orbit/kepler'],
 ] as const;
 
@@ -88,6 +91,10 @@ const allowed = [
   ['web/store/a.ts', 'idb'],
   ['web/parts/plot.ts', 'uplot'],
   ['web/offline/a.ts', 'workbox-window'],
+  ['web/work/a.ts', 'comlink'],
+  ['web/work/a.ts', './searchTracks'],
+  ['web/work/a.ts', '../../core/index'],
+  ['web/size/a.tsx', '../work/work'],
   ['test/web/a.test.ts', '../../core/index'],
 ] as const;
 
