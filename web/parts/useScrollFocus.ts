@@ -7,14 +7,19 @@ export function useScrollFocus<Box extends HTMLElement>(axis: 'x' | 'y'): RefObj
   useEffect(() => {
     const element = box.current;
     if (!element) return;
-    const watcher = new ResizeObserver(() => look(element, axis));
-    watcher.observe(element);
-    return () => watcher.disconnect();
+    const sizes = new ResizeObserver(() => look(element, axis));
+    const watch = () => {
+      for (const each of [element, ...element.children]) sizes.observe(each);
+    };
+    // Parts that are fetched later come without a render of whoever holds the box.
+    const children = new MutationObserver(watch);
+    children.observe(element, { childList: true });
+    watch();
+    return () => {
+      sizes.disconnect();
+      children.disconnect();
+    };
   }, [axis]);
-  // After every render too: what is in the box changes its scroll, but not its size.
-  useEffect(() => {
-    if (box.current) look(box.current, axis);
-  });
   return box;
 }
 
