@@ -1,6 +1,6 @@
 /** How far a search for repeat tracks can reach: the surface, the last Sun-synchronous orbit, and sheer number. */
 import { coprimePairs } from '../numerics/integers';
-import { formatNumber } from '../numerics/numberWords';
+import { formatNumber, formatSignificant } from '../numerics/numberWords';
 import type { Band, BandCell } from './bandCells';
 import { kilometres, mostTracks, type RepeatProblem, type RepeatRequest, repeatProblem } from './repeatProblem';
 import { sunSynchronousAt } from './trackCurve';
@@ -16,7 +16,7 @@ export function clearBand({ body, eccentricity, minAltitudeKm, maxAltitudeKm }: 
 
 export function belowSurface({ body, eccentricity }: RepeatRequest, { lowKm }: Band): RepeatProblem {
   const from = kilometres(lowKm - body.equatorialRadiusKm);
-  const text = `With e ${eccentricity} perigee clears the surface of ${body.name} only from a mean altitude of ${from} up: the band lies below.`;
+  const text = `With e ${formatSignificant(eccentricity)} perigee clears the surface of ${body.name} only from a mean altitude of ${from} up: the band lies below.`;
   return repeatProblem('belowSurface', 'maxAltitudeKm', text);
 }
 
@@ -62,8 +62,8 @@ export function noOrbits(request: RepeatRequest, { lowKm }: Band): RepeatProblem
   const here = `At a mean altitude of ${kilometres(lowKm - radiusKm)} cos i would have to be ${cosine}`;
   const lastKm = lastSunSynchronousKm(request, radiusKm / (1 - eccentricity), lowKm);
   const end = lastKm
-    ? `Sun-synchronous orbits of e ${eccentricity} end at a mean altitude of ${kilometres(lastKm - radiusKm)}.`
-    : `No orbit above the surface of ${body.name} is Sun-synchronous at e ${eccentricity}.`;
+    ? `Sun-synchronous orbits of e ${formatSignificant(eccentricity)} end at a mean altitude of ${kilometres(lastKm - radiusKm)}.`
+    : `No orbit above the surface of ${body.name} is Sun-synchronous at e ${formatSignificant(eccentricity)}.`;
   return repeatProblem('noSunSynchronous', 'inclination', `${here}. ${end}`);
 }
 

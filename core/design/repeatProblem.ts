@@ -1,5 +1,6 @@
 /** What a search for repeat ground tracks is asked, and what keeps it from being answered. */
 import type { Body } from '../bodies/body';
+import { radPerDeg } from '../numerics/angles';
 import { formatNumber, formatSignificant } from '../numerics/numberWords';
 import type { Theory } from '../orbit/elements';
 
@@ -98,12 +99,12 @@ export function problemOfShape({ eccentricity, inclination }: ShapeAndInclinatio
     return repeatProblem(
       'badInput',
       'eccentricity',
-      `Eccentricity has to be from 0 to below 1, not ${written(eccentricity)}.`,
+      `Eccentricity has to be from 0 to below 1${notThis(eccentricity)}.`,
     );
   }
   if (inclination.kind === 'fixed' && !(inclination.rad >= 0 && inclination.rad <= Math.PI)) {
-    const degrees = formatNumber((inclination.rad * 180) / Math.PI, { digits: 4 });
-    return repeatProblem('badInput', 'inclination', `Inclination has to be from 0° to 180°, not ${degrees}°.`);
+    const given = notThis(inclination.rad / radPerDeg, '°');
+    return repeatProblem('badInput', 'inclination', `Inclination has to be from 0° to 180°${given}.`);
   }
   return null;
 }
@@ -128,12 +129,13 @@ function problemOfBand({ body, minAltitudeKm: low, maxAltitudeKm: high }: Repeat
 /** A cycle length in days: whole, from 1 to the longest. */
 export function problemOfCycle(field: RepeatField, days: number): RepeatProblem | null {
   if (Number.isInteger(days) && days >= 1 && days <= longestCycleDays) return null;
-  const text = `The longest cycle has to be a whole number of days from 1 to ${longestCycleDays}, not ${written(days)}.`;
+  const text = `The longest cycle has to be a whole number of days from 1 to ${longestCycleDays}${notThis(days)}.`;
   return repeatProblem('badInput', field, text);
 }
 
-function written(value: number): string {
-  return Number.isFinite(value) ? formatSignificant(value) : 'a value without an end or a meaning';
+/** What was given instead, where it is a number at all. */
+function notThis(value: number, unit = ''): string {
+  return Number.isFinite(value) ? `, not ${formatSignificant(value)}${unit}` : '';
 }
 
 export function kilometres(km: number): string {
