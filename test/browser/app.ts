@@ -91,6 +91,8 @@ export async function unfold(page: Page, title: RegExp): Promise<void> {
 export const reading = (page: Page, label: string): Locator =>
   page.locator('.reading', { has: page.locator('.reading-label', { hasText: new RegExp(`^${label}$`) }) });
 
+export const textOf = async (locator: Locator): Promise<string> => (await locator.textContent()) ?? '';
+
 const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 
 /** The number in a text of the page: true minus, thin spaces, a power of ten, the unit behind. */
@@ -107,7 +109,7 @@ export function numberIn(text: string): number {
 }
 
 export async function readingNumber(page: Page, label: string): Promise<number> {
-  return numberIn(await reading(page, label).locator('.reading-value').innerText());
+  return numberIn(await textOf(reading(page, label).locator('.reading-value')));
 }
 
 /** Everything the list of readings says, for a comparison before and after. */

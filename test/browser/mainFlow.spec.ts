@@ -32,6 +32,7 @@ import {
   select,
   startBrowser,
   status,
+  textOf,
 } from './app';
 import { type StaticServer, startServer } from './server';
 import { watch } from './watch';
@@ -130,7 +131,7 @@ async function readDrift(page: Page, { first, second }: Expected): Promise<void>
     const row = page.getByRole('table', { name: /^At the cursor/ }).getByRole('row', { name: /^Node/ });
     const [node = '', firstOrder = ''] = await row.getByRole('cell').allInnerTexts();
     // Long drifts are told in turns.
-    const unit = (await row.innerText()).includes('turns') ? 360 : 1;
+    const unit = (await textOf(row)).includes('turns') ? 360 : 1;
     expect(Math.abs(numberIn(node) * unit - degPerDay(second.nodeRadPerS) * days)).toBeLessThan(0.005 * unit ** 0.5);
     expect(Math.abs(numberIn(firstOrder) * unit - degPerDay(first.nodeRadPerS) * days)).toBeLessThan(
       0.005 * unit ** 0.5,
@@ -142,7 +143,7 @@ async function readDrift(page: Page, { first, second }: Expected): Promise<void>
 async function findAgain(context: BrowserContext, page: Page, name: string): Promise<void> {
   await go(page, 'size');
   const before = await readingTexts(page);
-  const letters = await page.locator('.fingerprint').innerText();
+  const letters = await textOf(page.locator('.fingerprint'));
   await context.close();
   await server.stop();
 
