@@ -9,8 +9,28 @@ export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from
 export { meanSiderealTimeRad } from './bodies/siderealTime';
 export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
 export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
+export { type ChartCondition, type ChartCurve, chartCurve } from './design/chartCurves';
+export { type ChartLine, type ChartWindow, chartLine } from './design/chartLines';
+export { chartRepeats, type RepeatRoom } from './design/chartRepeats';
+export {
+  type ChartFloor,
+  type ChartShape,
+  chartFloor,
+  chartShapeOf,
+  eccentricityAt,
+} from './design/chartShape';
+export {
+  type ChartPoint,
+  type ChartScale,
+  crossingNear,
+  footOn,
+  type Snapped,
+  type SnapRequest,
+  snapPoint,
+} from './design/chartSnap';
 export type { Cycle } from './design/closingOrbit';
 export type { OrbitCondition } from './design/conditions/registry';
+export { type ConditionWorking, conditionWorkings, type WorkingsInput } from './design/conditionWorkings';
 export { type FrozenOptions, frozenOrbit } from './design/frozen';
 export type { FrozenInput } from './design/frozenChecks';
 export type { FrozenOrbit, FrozenRefusal, FrozenResult, FrozenShape, NoFrozenOrbit } from './design/frozenResult';
@@ -173,7 +193,7 @@ export { type AbsentReading, absentReadings, readingSpec, readingsOf } from './r
 export type { FieldError, FieldErrors, Notice, Resolution, ResolvedOrbit } from './record/resolved';
 export { resolveOrbit } from './record/resolveOrbit';
 export { limitCrossings, pointAt, type Sweep, type SweepRequest, sweepReading } from './record/sweep';
-export { sweepSentence } from './record/sweepHeadline';
+export { placeText, type SweepWriting, shortText, sweepSentence } from './record/sweepHeadline';
 export {
   type SweptElement,
   type SweptWords,
@@ -190,6 +210,7 @@ export {
   formatQuantity,
   formatSignificant,
   type Quantity,
+  signedQuantities,
   unitOf,
 } from './record/units';
 export { smallEccentricity, warningsOf } from './record/warnings';

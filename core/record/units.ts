@@ -59,7 +59,7 @@ export const displayUnits = {
 export type Quantity = keyof typeof displayUnits;
 
 /** Quantities whose sign means a direction, so that a plus is written too. */
-const signedQuantities: ReadonlySet<Quantity> = new Set(['smallAngle', 'angleRate', 'localTimeDrift']);
+export const signedQuantities: ReadonlySet<Quantity> = new Set(['smallAngle', 'angleRate', 'localTimeDrift']);
 
 /** The unit with that id where the quantity has it, else the first. */
 export function unitOf(quantity: Quantity, unitId?: string): DisplayUnit {

@@ -40,6 +40,11 @@ const specs: readonly ReadingSpec[] = [...driftReadings, ...nodeReadings, ...tim
   (one, other) => shownOrder[one.id] - shownOrder[other.id],
 );
 
+/** How the reading of that name is worked out; undefined for a name that this version does not know. */
+export function readingSpec(id: unknown): ReadingSpec | undefined {
+  return specs.find((spec) => spec.id === id);
+}
+
 /** All readings the orbit has, at the given level; what a lacking epoch, day or year rules out is in `absentReadings`. */
 export function readingsOf(orbit: ReadingPoint, theory: Theory = 'second'): Reading[] {
   const heights = heightValues(orbit);
