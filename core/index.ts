@@ -29,6 +29,7 @@ export {
   snapPoint,
 } from './design/chartSnap';
 export type { Cycle } from './design/closingOrbit';
+export { type ConditionWorking, conditionWorkings, type WorkingsInput } from './design/conditionWorkings';
 export type { OrbitCondition } from './design/conditions/registry';
 export { type ConditionWorking, conditionWorkings, type WorkingsInput } from './design/conditionWorkings';
 export { type FrozenOptions, frozenOrbit } from './design/frozen';

@@ -39,7 +39,8 @@ export function solveOrbit(input: SolveInput): SolveResult {
   const conditions = withoutTwoPeriods(prepared, input.body);
   const implied = conditions === prepared ? null : conflictBetween(conditions);
   if (implied) return implied;
-  const problem: Problem = { ...input, conditions };
+  const { body, theory, start, free } = input;
+  const problem: Problem = { body, theory, start, free, conditions };
   const frozen = conditions.find(({ family }) => family === 'frozen');
   const found = frozen ? frozenSolutions(problem, frozen, solvedPoints) : plainSolutions(problem);
   if (!found.ok) return found;

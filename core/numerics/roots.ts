@@ -22,14 +22,17 @@ export interface RootOptions {
   readonly touching: number;
 }
 
+interface Sample {
+  readonly x: number;
+  readonly value: number;
+}
+
 interface Gathered {
   readonly roots: number[];
-  least: { x: number; value: number } | null;
+  least: Sample | null;
   greatest: number;
   unresolved: number;
 }
-
-type Sample = { readonly x: number; readonly value: number };
 
 /** Roots in rising order of the grid. */
 export function rootsOnGrid(f: (x: number) => number, grid: ArrayLike<number>, options: RootOptions): GridRoots {
@@ -44,17 +47,19 @@ export function rootsOnGrid(f: (x: number) => number, grid: ArrayLike<number>, o
       noteLeast(found, next);
       found.greatest = Math.max(found.greatest, Math.abs(value));
     }
-    if (here && next) noteBetween(f, { left: here, right: next }, found);
-    if (before && here && next) noteDip(f, { left: before, middle: here, right: next }, options, found);
-    else if (here && !(before && next)) noteEnd(here, options, found);
-    [before, here] = [here, next];
+    if (here && next && here.value * next.value < 0) noteBetween(f, { left: here, right: next }, found);
+    if (before && here && next) {
+      if (isLow(before, here, next)) noteDip(f, { left: before, middle: here, right: next }, options, found);
+    } else if (here) noteEnd(here, options, found);
+    before = here;
+    here = next;
   }
   if (here) noteEnd(here, options, found);
   return { ...found, roots: found.roots.sort((p, q) => p - q) };
 }
 
 function noteLeast(found: Gathered, sample: Sample): void {
-  if (!found.least || Math.abs(sample.value) < Math.abs(found.least.value)) found.least = { ...sample };
+  if (!found.least || Math.abs(sample.value) < Math.abs(found.least.value)) found.least = sample;
 }
 
 function noteBetween(
@@ -62,7 +67,6 @@ function noteBetween(
   { left, right }: { left: Sample; right: Sample },
   found: Gathered,
 ): void {
-  if (left.value === 0 || left.value * right.value >= 0) return;
   const result = rootInBracket(f, { low: left.x, high: right.x, atLow: left.value, atHigh: right.value });
   if (result.ok) {
     found.roots.push(result.x);
@@ -81,15 +85,21 @@ interface Dip {
   readonly right: Sample;
 }
 
+/** Zero itself, or nearer to it than both neighbours on the same side. */
+function isLow(left: Sample, middle: Sample, right: Sample): boolean {
+  const size = Math.abs(middle.value);
+  if (size === 0) return true;
+  if (left.value * middle.value <= 0 || right.value * middle.value <= 0) return false;
+  return size <= Math.abs(left.value) && size <= Math.abs(right.value);
+}
+
 function noteDip(f: (x: number) => number, dip: Dip, options: RootOptions, found: Gathered): void {
   const { left, middle, right } = dip;
   if (middle.value === 0) {
     found.roots.push(middle.x);
     return;
   }
-  const size = Math.abs(middle.value);
-  if (left.value * middle.value <= 0 || right.value * middle.value <= 0) return;
-  if (size > Math.abs(left.value) || size > Math.abs(right.value) || !mayReachZero(dip)) return;
+  if (!mayReachZero(dip)) return;
   const bottom = bottomOfDip(f, dip);
   if (!bottom) return;
   noteLeast(found, bottom);

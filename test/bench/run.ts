@@ -1,5 +1,7 @@
 /** `npm run bench`: times as a table, and an exit code that says whether the bounds held. */
 import { measure, type Timing } from './measure';
+import { repeatLimits } from './repeatTasks';
+import { solveLimits } from './solveTasks';
 import { taskGroups } from './tasks';
 
 /** `name` may take at most `times` as long as `yardstick`: one call, its checks and its result object included. */
@@ -29,7 +31,7 @@ function table(timings: readonly Timing[]): readonly string[] {
     return [name, nsPerCall.toFixed(nsPerCall < 1000 ? 1 : 0), multiple.toFixed(multiple < 100 ? 2 : 0)] as const;
   });
   const line = ([name, ns, multiple]: readonly [string, string, string]) =>
-    `${name.padEnd(28)}${ns.padStart(12)}${multiple.padStart(28)}`;
+    `${name.padEnd(34)}${ns.padStart(12)}${multiple.padStart(28)}`;
   return [line(['median of 15', 'ns a call', '× first order, inlined']), ...rows.map(line)];
 }
 
@@ -40,5 +42,11 @@ for (const { name, yardstick, times } of bounds) {
   const ratio = nsOf(timings, name) / nsOf(timings, yardstick);
   const holds = ratio <= times;
   console.log(`${holds ? 'holds ' : 'BROKEN'}  ${name}: ${ratio.toFixed(2)} × ${yardstick}, at most ${times}`);
+  if (!holds) process.exitCode = 1;
+}
+for (const { name, microseconds } of [...solveLimits, ...repeatLimits]) {
+  const taken = nsOf(timings, name) / 1000;
+  const holds = taken <= microseconds;
+  console.log(`${holds ? 'holds ' : 'BROKEN'}  ${name}: ${taken.toFixed(1)} µs, at most ${microseconds}`);
   if (!holds) process.exitCode = 1;
 }

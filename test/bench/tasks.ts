@@ -14,7 +14,9 @@ import {
 import { averagedTasks } from './averagedTasks';
 import { type Columns, inlinedFirst, inlinedSecond } from './inlined';
 import type { Task } from './measure';
+import { repeatTasks } from './repeatTasks';
 import { columnsOf, fieldOf, randomOrbits } from './samples';
+import { solveTasks } from './solveTasks';
 
 const earth = gravitySets.EGM2008;
 
@@ -29,7 +31,13 @@ const twoLines = [
 export function taskGroups(): readonly (readonly Task[])[] {
   const orbits = randomOrbits();
   const columns = columnsOf(orbits);
-  return [[...inlinedTasks(columns), ...ratesTasks(orbits, columns)], otherTasks(orbits), averagedTasks()];
+  return [
+    [...inlinedTasks(columns), ...ratesTasks(orbits, columns)],
+    otherTasks(orbits),
+    averagedTasks(),
+    solveTasks(),
+    repeatTasks(),
+  ];
 }
 
 /** Times that a run goes through the list, so that it lasts milliseconds. */

@@ -16,9 +16,11 @@ export function rateWords(radPerS: number): string {
 type Wording = Pick<Condition, 'kind' | 'label' | 'formula'>;
 
 /** Ω̇ = target. */
-export function nodeCondition(radPerS: number, wording: Wording): Condition {
+export function nodeCondition(radPerS: number, { kind, label, formula }: Wording): Condition {
   return {
-    ...wording,
+    kind,
+    label,
+    formula,
     family: 'node',
     target: radPerS,
     measure: nodeRateAt,
@@ -30,9 +32,11 @@ export function nodeCondition(radPerS: number, wording: Wording): Condition {
 }
 
 /** ω̇ = target. */
-export function perigeeCondition(radPerS: number, wording: Wording): Condition {
+export function perigeeCondition(radPerS: number, { kind, label, formula }: Wording): Condition {
   return {
-    ...wording,
+    kind,
+    label,
+    formula,
     family: 'perigee',
     target: radPerS,
     measure: perigeeRateAt,

@@ -3,10 +3,20 @@ import type { Condition } from '../conditions/condition';
 import { type NoOrbit, noOrbit } from './answer';
 import { beyondPole } from './beyondPole';
 import { inSentence, namesOf } from './conflicts';
-import { floorKm, isInDomain, meanOf, type Point, type Problem, parameterKm, pointOf, residualsAt } from './problem';
+import {
+  floorKm,
+  isInDomain,
+  largestResidual,
+  meanOf,
+  type Point,
+  type Problem,
+  parameterKm,
+  pointOf,
+  residualsAt,
+} from './problem';
 import { type ReachedPoint, reachOf } from './reach';
 import type { Division } from './search';
-import type { Settlement } from './settle';
+import { type Settlement, suspicious } from './settle';
 import { eccentricityText, kmText } from './words';
 
 export interface Failure {
@@ -30,7 +40,7 @@ export function explained(failure: Failure): NoOrbit {
   ]);
   const withNearest = (answer: NoOrbit): NoOrbit =>
     nearest ? { ...answer, nearest: meanOf(problem, nearest) } : answer;
-  if (settlement.inDoubt) {
+  if (settlement.inDoubt || (nearest && largestResidual(problem, nearest) < suspicious)) {
     const text = `${labels}: the search did not converge. There may be an orbit that meets them; try another start.`;
     return withNearest(noOrbit('didNotConverge', text));
   }

@@ -75,7 +75,9 @@ function needed<T>(hint: T | undefined): T {
 }
 
 function evenGrid(low: number, high: number, count: number): Float64Array {
-  return Float64Array.from({ length: count + 1 }, (_, k) => low + ((high - low) * k) / count);
+  const grid = new Float64Array(count + 1);
+  for (let k = 0; k <= count; k += 1) grid[k] = low + ((high - low) * k) / count;
+  return grid;
 }
 
 const noGrid = new Float64Array(0);

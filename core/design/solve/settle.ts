@@ -14,9 +14,9 @@ export interface Settlement {
 /** Residuals that a solution may have; in doubles, 1e-15 to 1e-13 is usual. */
 const accepted = 1e-11;
 /** A residual this small away from a solution means that one is near, or that the search failed beside it. */
-const suspicious = 1e-7;
-/** cos i this far beyond ±1 is rounding. */
-const edge = 1e-11;
+export const suspicious = 1e-7;
+/** cos i this far beyond ±1 may be rounding, where the conditions hardly tell one orbit from the next; they judge. */
+const edge = 1e-7;
 
 export function settled(problem: Problem, found: Search): Settlement {
   const solutions: Point[] = [];

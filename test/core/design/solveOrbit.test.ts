@@ -3,6 +3,7 @@ import { bodies } from '../../../core/bodies/bodies';
 import { customBody } from '../../../core/bodies/customBody';
 import { gravitySets } from '../../../core/bodies/earth';
 import type { OrbitCondition } from '../../../core/design/conditions/registry';
+import { conditionWorkings } from '../../../core/design/conditionWorkings';
 import { frozenOrbit } from '../../../core/design/frozen';
 import { type SolveInput, solveOrbit } from '../../../core/design/solveOrbit';
 import { periods } from '../../../core/orbit/periods';
@@ -117,6 +118,20 @@ describe('solveOrbit', () => {
       start: { ...start, eccentricity: 0.2, inclinationRad: 98.6 / degPerRad },
     });
     expect(notes.join()).toMatch(/perigee is 50\d\.\d km below the surface/);
+  });
+});
+
+describe('conditionWorkings', () => {
+  it('shows what has to hold, what was asked and what the orbit has', () => {
+    const conditions = [sun, track(143, 10), perigee(700), { kind: 'frozen' }] as const;
+    const { mean } = orbitOf({ free: ['semiMajorAxisKm', 'inclinationRad'], conditions: [sun, track(143, 10)] });
+    const [node, closure, height, frozen] = conditionWorkings({ body: earth, theory: 'second', mean, conditions });
+    expect(node).toMatchObject({ formula: 'Ω̇ = 2π / year', asked: '0.9856 deg/day', reached: '0.9856 deg/day' });
+    expect(Math.abs(node?.residual ?? 1)).toBeLessThan(1e-12);
+    expect(closure).toMatchObject({ label: 'Repeat of 143 revolutions in 10 days', asked: closure?.reached });
+    expect(height).toMatchObject({ quantity: 'perigee altitude', asked: '700.000 km' });
+    expect(height?.residual).toBeCloseTo((mean.semiMajorAxisKm - 6378.137 - 700) / 7078.137, 12);
+    expect(frozen?.residual).toBeLessThan(0);
   });
 });
 
