@@ -13,7 +13,7 @@ import { useScrollFocus } from '../parts/useScrollFocus';
 /** Digits a pocket calculator shows. */
 const digits = 10;
 
-const unitText = (unit: string): string => (unit === 'deg' ? '°' : unit);
+const unitText = (unit: string): string => unit.replace(/^deg(?=\/|$)/, '°');
 
 function valueText({ symbol, value }: WorkingValue): string {
   const unit = unitText(symbol.unit);
