@@ -23,13 +23,13 @@ export {
   type ChartPoint,
   type ChartScale,
   crossingNear,
+  distancePx,
   footOn,
   type Snapped,
   type SnapRequest,
   snapPoint,
 } from './design/chartSnap';
 export type { Cycle } from './design/closingOrbit';
-export { type ConditionWorking, conditionWorkings, type WorkingsInput } from './design/conditionWorkings';
 export type { OrbitCondition } from './design/conditions/registry';
 export { type ConditionWorking, conditionWorkings, type WorkingsInput } from './design/conditionWorkings';
 export { type FrozenOptions, frozenOrbit } from './design/frozen';
@@ -175,7 +175,15 @@ export {
   readLimits,
 } from './record/limits';
 export { violatesAt } from './record/limitsAt';
-export { brokenText, convertedText, limitInUnit, limitText, marginText, storedLimitText } from './record/limitWords';
+export {
+  convertedText,
+  type LimitsJudged,
+  limitInUnit,
+  limitsSentence,
+  limitText,
+  marginText,
+  storedLimitText,
+} from './record/limitWords';
 export { type Migration, migrateCandidate } from './record/migrate';
 export { type NumberReading, type NumberResult, readNumber } from './record/numberText';
 export { type FieldReader, fieldReader } from './record/readFields';

@@ -38,15 +38,42 @@ function sizeText(quantity: Quantity, size: number, unitId: string | undefined):
   return formatNumber(shown, { digits: Math.min(digits, Math.max(0, 2 - leading)) });
 }
 
-/** Such as "2 limits broken: Node rate, Perigee altitude."; empty where none is. */
-export function brokenText(
-  margins: readonly LimitMargin[],
+/** What is known of the limits of an orbit. */
+export interface LimitsJudged {
+  readonly read: readonly ReadLimit[];
+  readonly margins: readonly LimitMargin[];
+}
+
+/**
+ * Such as "2 limits broken: Node rate, Perigee altitude. 1 limit not judged: Local time of the ascending node.": what is wrong
+ * with limits, with each reading's label at this body; empty where nothing is.
+ */
+export function limitsSentence(
+  { read, margins }: LimitsJudged,
   readings: readonly Pick<Reading, 'id' | 'label'>[],
 ): string {
+  const labelOf = (entry: LimitEntry | null) =>
+    readings.find(({ id }) => id === entry?.reading)?.label ??
+    readingSpec(entry?.reading)?.label ??
+    'a reading of another version';
   const broken = margins.filter(({ state }) => state === 'broken');
-  if (broken.length === 0) return '';
-  const labels = new Set(broken.map(({ entry }) => readings.find(({ id }) => id === entry.reading)?.label ?? ''));
-  return `${broken.length} ${broken.length === 1 ? 'limit' : 'limits'} broken: ${[...labels].join(', ')}.`;
+  const judged = new Set(margins.map(({ place }) => place));
+  const others = read.filter(({ place }) => !judged.has(place));
+  return [
+    ...counted(
+      'broken',
+      broken.map(({ entry }) => labelOf(entry)),
+    ),
+    ...counted(
+      'not judged',
+      others.map(({ entry }) => labelOf(entry)),
+    ),
+  ].join(' ');
+}
+
+function counted(what: string, labels: readonly string[]): string[] {
+  if (labels.length === 0) return [];
+  return [`${labels.length} ${labels.length === 1 ? 'limit' : 'limits'} ${what}: ${[...new Set(labels)].join(', ')}.`];
 }
 
 /** A limit as it stands in the record, whether or not it can be read: "Perigee altitude at most 600 km". */
@@ -55,7 +82,7 @@ export function storedLimitText(stored: Readonly<Record<string, unknown>>): stri
   const spec = readingSpec(reading);
   if (!spec) return 'a limit of another version';
   const { symbol } = unitOf(spec.quantity, String(unit));
-  return `${spec.label} ${bound === 'atLeast' ? 'at least' : 'at most'} ${String(text) || 'empty'} ${symbol}`.trim();
+  return `${spec.label} ${bound === 'atLeast' ? 'at least' : 'at most'} ${String(text) || 'empty'} ${symbol.replace(/^deg\b/, '°')}`.trim();
 }
 
 /** The same limit typed in another unit of its reading; a text that is no number stays as it is typed. */

@@ -1,5 +1,5 @@
 /** What a revision changed, field by field, in words. */
-import { type Candidate, type FieldId, fieldIds, type OrbitEntry } from '../../core/index';
+import { type Candidate, type FieldId, fieldIds, type OrbitEntry, storedLimitText } from '../../core/index';
 import { bodyLabels, fieldLabels, fieldsInUse, formLabels, frameLabels, nodeLabels } from './fieldLabels';
 
 const arrow = (label: string, before: string, after: string): string[] =>
@@ -15,7 +15,7 @@ export function changesBetween(before: Candidate, after: Candidate): string[] {
     ...textChanges(before, after),
     ...notesChange(before.notes, after.notes),
     ...roomChange('Conditions', before.conditions, after.conditions),
-    ...roomChange('Limits', before.limits, after.limits),
+    ...limitChanges(before.limits, after.limits),
     ...roomChange('Plans', before.plans, after.plans),
   ];
 }
@@ -57,6 +57,16 @@ function notesChange(before: string, after: string): string[] {
   if (before === after) return [];
   if (!before) return ['Notes added'];
   return [after ? 'Notes rewritten' : 'Notes taken out'];
+}
+
+/** Limits that went and came; one that was changed did both. */
+function limitChanges(before: Candidate['limits'], after: Candidate['limits']): string[] {
+  const texts = (limits: Candidate['limits']) => limits.map(storedLimitText);
+  const [old, now] = [texts(before), texts(after)];
+  const gone = old.filter((text) => !now.includes(text)).map((text) => `Limit taken out: ${text}`);
+  const come = now.filter((text) => !old.includes(text)).map((text) => `Limit set: ${text}`);
+  const said = [...gone, ...come];
+  return said.length > 0 ? said : roomChange('Limits', before, after);
 }
 
 const roomChange = (label: string, before: unknown, after: unknown): string[] =>

@@ -1,6 +1,6 @@
 /** The readings: value large, what would change it small, the working behind a tap. */
 import { useEffect, useRef } from 'preact/hooks';
-import type { Reading } from '../../core/index';
+import { marginText, type Reading } from '../../core/index';
 import { doubtText, quantityText, roundedText, usePreferredUnit, useReadingText } from '../parts/readingText';
 import { useApp } from '../state/appContext';
 
@@ -57,9 +57,27 @@ function ReadingRow({ reading }: { readonly reading: Reading }) {
         </span>
         <Sensitivity reading={reading} />
         <Order reading={reading} />
+        <Margins reading={reading} />
         {reading.remark && <span class="reading-remark">{reading.remark}</span>}
       </button>
     </li>
+  );
+}
+
+/** What is left of each limit of this reading; a broken one has its mark and its word. */
+function Margins({ reading }: { readonly reading: Reading }) {
+  const { document } = useApp();
+  const unit = usePreferredUnit()(reading.quantity);
+  const margins = document.limits.margins.value.filter(({ entry }) => entry.reading === reading.id);
+  if (margins.length === 0) return null;
+  return (
+    <span class="reading-margins">
+      {margins.map((margin) => (
+        <span key={margin.place} class={`margin is-${margin.state}`}>
+          {marginText(margin, unit)}
+        </span>
+      ))}
+    </span>
   );
 }
 

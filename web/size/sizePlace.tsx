@@ -1,5 +1,5 @@
 /** Which orbit? The answer, its picture, the entry and the readings. */
-import { headlineOf, type Reading, type ReadingId } from '../../core/index';
+import { headlineOf, limitsSentence, type Reading, type ReadingId } from '../../core/index';
 import { later } from '../parts/later';
 import { useReadingText } from '../parts/readingText';
 import { useScrollFocus } from '../parts/useScrollFocus';
@@ -22,6 +22,7 @@ export function SizePlace() {
       <section class="picture" aria-label="The orbit" ref={useScrollFocus<HTMLElement>('y')}>
         <div class="answer">
           <Headline />
+          <BrokenLimits />
           <KeyReadings />
         </div>
         {orbit && reading ? <WorkingView orbit={orbit} reading={reading} /> : <Pictures />}
@@ -54,6 +55,14 @@ function Headline() {
       ))}
     </h1>
   );
+}
+
+/** Only what is wrong: limits that are kept stand at their readings. */
+function BrokenLimits() {
+  const { document } = useApp();
+  const { read, margins } = document.limits;
+  const text = limitsSentence({ read: read.value, margins: margins.value }, document.readings.value);
+  return <div role="status">{text && <p class="limits-broken">{text}</p>}</div>;
 }
 
 type Span = ReturnType<typeof headlineOf>[number];

@@ -3,6 +3,7 @@ import { useEffect, useRef } from 'preact/hooks';
 import { type Reading, type ResolvedOrbit, type Working, workingOf } from '../../core/index';
 import { doubtText, quantityText, usePreferredUnit, useReadingText } from '../parts/readingText';
 import { useApp } from '../state/appContext';
+import { LimitFields } from './limitFields';
 import { WorkingLines, WorkingTables } from './workingLines';
 import './working.css';
 
@@ -32,6 +33,7 @@ export function WorkingView({ orbit, reading }: { readonly orbit: ResolvedOrbit;
         </button>
       </header>
       <OtherUnits reading={reading} />
+      <LimitFields reading={reading} />
       <WorkingTables working={working} />
       <WorkingLines
         title={working.secondLines.length > 0 ? 'First order, J2 alone' : 'Line by line'}

@@ -18,6 +18,7 @@ import {
   warningsOf,
 } from '../../core/index';
 import { type Conditions, createConditions } from './conditions';
+import { createLimits, type Limits } from './limits';
 import { type SettledFields, settledFields } from './settledFields';
 
 /** A candidate and the saved revision it was opened from; null where it was never saved. */
@@ -34,6 +35,7 @@ export interface OrbitDocument {
   /** The entry alone, whatever the conditions say. */
   readonly entered: ReadonlySignal<Resolution>;
   readonly conditions: Conditions;
+  readonly limits: Limits;
   /** Fields that a condition settles, with the text that each shows. */
   readonly settled: ReadonlySignal<SettledFields>;
   /** The entry and its conditions together. */
@@ -52,7 +54,7 @@ export interface OrbitDocument {
   setText(field: FieldId, text: string): void;
   setTexts(texts: Partial<Record<FieldId, string>>): void;
   setTags(tags: Partial<Omit<OrbitEntry, 'texts'>>, texts?: Partial<Record<FieldId, string>>): void;
-  setCandidate(part: Partial<Pick<Candidate, 'name' | 'notes' | 'body' | 'gravitySet' | 'limits'>>): void;
+  setCandidate(part: Partial<Pick<Candidate, 'name' | 'notes' | 'body' | 'gravitySet'>>): void;
   /** Puts an earlier draft of the same candidate back, for an undo. */
   restoreDraft(candidate: Candidate): void;
   open(next: OpenCandidate): void;
@@ -77,6 +79,7 @@ export function createDocument(initial: OpenCandidate): OrbitDocument {
     baseRevision,
     entered,
     conditions,
+    limits: createLimits(draft, readings),
     settled: computed(() => settledFields(conditions.settlement.value, draft.value.entry)),
     resolution,
     orbit,

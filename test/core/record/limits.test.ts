@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { knownLimits, type LimitEntry, limitMargins, readLimits } from '../../../core/record/limits';
-import { brokenText, limitInUnit, limitText, marginText, storedLimitText } from '../../../core/record/limitWords';
+import { limitInUnit, limitsSentence, limitText, marginText, storedLimitText } from '../../../core/record/limitWords';
 import { readingsOf } from '../../../core/record/readings/readings';
 import { candidateWith, resolved } from './candidates';
 
@@ -34,10 +34,20 @@ describe('a limit', () => {
     expect(over.state).toBe('broken');
     expect(marginText(over, 'km')).toBe('limit ≤ 600: over by 3.20');
     expect(marginText(margin({ bound: 'atLeast', text: '590' }), 'km')).toBe('limit ≥ 590: under by 15.0');
-    expect(brokenText([over, margin({ text: '500' })], readings)).toBe(
+  });
+
+  it('is said where something is wrong with it, and only there', () => {
+    const said = (...limits: Readonly<Record<string, unknown>>[]) => {
+      const stored = read(...limits);
+      return limitsSentence({ read: stored, margins: limitMargins(stored, readings) }, readings);
+    };
+    expect(said(limit({}))).toBe('');
+    expect(said(limit({ reading: 'apogeeAltitude' }), limit({ text: '500' }))).toBe(
       '2 limits broken: Apogee altitude, Perigee altitude.',
     );
-    expect(brokenText([margin({})], readings)).toBe('');
+    expect(
+      said(limit({ text: 'x' }), limit({ reading: 'localTimeAscending', text: '10:30' }), { reading: 'betaAngle' }),
+    ).toBe('3 limits not judged: Perigee altitude, Local time of the ascending node, a reading of another version.');
   });
 
   it('that the reading meets to the last digit shown is kept, and said', () => {

@@ -55,4 +55,18 @@ describe('changes between two revisions', () => {
       'Plans changed',
     ]);
   });
+
+  it('says which limits were set and taken out', () => {
+    const high = { reading: 'perigeeAltitude', bound: 'atMost', text: '600', unit: 'km' };
+    const low = { reading: 'nodeRate', bound: 'atLeast', text: '0,9', unit: 'deg/day' };
+    const limited: Candidate = { ...before, limits: [high] };
+    expect(changesBetween(limited, { ...before, limits: [low] })).toEqual([
+      'Limit taken out: Perigee altitude at most 600 km',
+      'Limit set: Node rate at least 0,9 °/day',
+    ]);
+    expect(changesBetween(limited, { ...before, limits: [high] })).toEqual([]);
+    expect(changesBetween({ ...before, limits: [high, low] }, { ...before, limits: [low, high] })).toEqual([
+      'Limits changed',
+    ]);
+  });
 });
