@@ -1,9 +1,10 @@
 /** Which repeat tracks a chart names: the shortest cycles of the window, as many as there is room for. */
+
 import type { Body } from '../bodies/body';
+import { coprime } from '../numerics/integers';
 import { type ChartCurve, chartCurve } from './chartCurves';
 import type { ChartWindow } from './chartLines';
 import { type ChartShape, chartFloor, eccentricityAt } from './chartShape';
-import { greatestCommonDivisor } from './conditions/repeat';
 import { latitudeRateAt, nodeRateAt, shapeRatesAt } from './shapeRates';
 
 export interface RepeatRoom {
@@ -32,7 +33,7 @@ export function chartRepeats(body: Body, shape: ChartShape, window: ChartWindow,
   for (let days = 1; days <= longestDays && (days <= usualDays || taken.length < enough); days += 1) {
     for (let revolutions = Math.ceil(slowest * days); revolutions <= fastest * days; revolutions += 1) {
       if (taken.length >= room.most) return taken.map(({ curve }) => curve);
-      if (revolutions < 1 || greatestCommonDivisor(revolutions, days) > 1) continue;
+      if (revolutions < 1 || !coprime(revolutions, days)) continue;
       const curve = chartCurve(body, shape, { kind: 'repeat', revolutions, days });
       const km = curve?.altitudeAt?.(window.fromRad) ?? Number.NaN;
       if (curve && isFree(km)) taken.push({ curve, km });

@@ -51,6 +51,7 @@ export function solveTasks(): readonly Task[] {
       { kind: 'repeat', revolutions: 2, days: 1 },
       perigee(index),
     ]),
+    solving('solve 3: Sun, repeat, frozen', low, all, (index) => [sun, track(index % 30), { kind: 'frozen' }]),
     solving('solve 3: node, still, period', steep, all, (index) => [
       { kind: 'nodeRate', radPerS: -3e-8 },
       still,

@@ -1,4 +1,5 @@
 import { twoPi } from '../../numerics/angles';
+import { commonDivisor } from '../../numerics/integers';
 import { formatNumber } from '../../numerics/numberWords';
 import { latitudeRateAt, nodeRateAt, type ShapeRates } from '../shapeRates';
 import type { Condition, ConditionContext, Prepared } from './condition';
@@ -22,7 +23,7 @@ export function repeat({ revolutions, days }: RepeatInput, { body }: ConditionCo
     const text = `A repeat ground track needs the rotation of ${body.name}, which ${spin === null ? 'is not known' : 'is zero'}.`;
     return { ok: false, kind: 'missing', text };
   }
-  const common = greatestCommonDivisor(revolutions, days);
+  const common = commonDivisor(revolutions, days);
   return {
     ok: true,
     condition: closing({ revolutions: revolutions / common, days: days / common, common }, spin, body),
@@ -58,17 +59,11 @@ function closing(track: Track, spin: number, body: ConditionContext['body']): Co
     target,
     measure,
     scale: (shape, theta) => target + measure(shape, theta),
-    write: (value) => `${formatNumber(value, { digits: 6 })} revolutions a nodal day`,
-    quantity: 'pace',
+    write: (value) => `${formatNumber(value, { digits: 6 })} a nodal day`,
+    quantity: 'number of revolutions',
     notes: common > 1 ? [reduced] : [],
     axisGuessKm: Math.cbrt(body.muKm3PerS2 / (target * spin) ** 2),
   };
-}
-
-export function greatestCommonDivisor(first: number, second: number): number {
-  let [a, b] = [first, second];
-  while (b !== 0) [a, b] = [b, a % b];
-  return a;
 }
 
 /** A repeat at a nodal period leaves one length for the nodal day, and with it one node rate. */

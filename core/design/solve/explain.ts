@@ -4,6 +4,7 @@ import { type NoOrbit, noOrbit } from './answer';
 import { beyondPole } from './beyondPole';
 import { inSentence, namesOf } from './conflicts';
 import {
+  ceilingKm,
   floorKm,
   isInDomain,
   largestResidual,
@@ -44,7 +45,7 @@ export function explained(failure: Failure): NoOrbit {
     const text = `${labels}: the search did not converge. There may be an orbit that meets them; try another start.`;
     return withNearest(noOrbit('didNotConverge', text));
   }
-  const sentence = shapeless(failure) ?? beyond?.text ?? belowSurface(failure) ?? outOfReach(failure, reached);
+  const sentence = shapeless(failure) ?? beyond?.text ?? outside(failure) ?? outOfReach(failure, reached);
   return withNearest(noOrbit('noSolution', sentence ?? `${labels}: no orbit meets them.`));
 }
 
@@ -84,15 +85,22 @@ function circles({ problem, division }: Failure): readonly Point[] {
   return tie && tie(problem.start.semiMajorAxisKm) < 0 ? [{ ...pointOf(problem), eccentricity: 0 }] : [];
 }
 
-/** All conditions hold, but inside the body. */
-function belowSurface({ problem, settlement }: Failure): string | null {
-  const inside = settlement.rejected.find((point) => {
-    const residuals = residualsAt(problem, point);
-    return residuals?.every((value) => Math.abs(value) < 1e-9) && !isInDomain(problem.body, point);
+/** All conditions hold, but inside the body, or farther out than is looked for. */
+function outside({ problem, settlement }: Failure): string | null {
+  const { body, free } = problem;
+  const point = settlement.rejected.find((one) => {
+    const residuals = residualsAt(problem, one);
+    return residuals?.every((value) => Math.abs(value) < 1e-9) && !isInDomain(body, one);
   });
-  if (!inside || parameterKm(inside) >= floorKm(problem.body)) return null;
-  const size = `a mean a of ${kmText(inside.semiMajorAxisKm)} and e ${eccentricityText(inside.eccentricity)}`;
-  return `It would take ${size}, whose p = a(1 − e²) of ${kmText(parameterKm(inside))} is less than the radius of ${problem.body.name}, ${kmText(floorKm(problem.body))}.`;
+  if (!point || Math.abs(point.theta) > 1) return null;
+  const { semiMajorAxisKm: a, eccentricity: e } = point;
+  const least = `the radius of ${body.name}, ${kmText(floorKm(body))}`;
+  const isShapeHeld = !free.includes('semiMajorAxisKm') && !free.includes('eccentricity');
+  const size = `a mean a of ${kmText(a)} and e ${eccentricityText(e)}`;
+  const opening = isShapeHeld ? `The orbit has ${size}` : `It would take ${size}`;
+  if (a > ceilingKm(body))
+    return `${opening}: more than ${kmText(ceilingKm(body))}, a thousand radii, is not looked at.`;
+  return `${opening}, whose p = a(1 − e²) of ${kmText(parameterKm(point))} is less than ${least}.`;
 }
 
 /** The range of the quantity sought, over all that meets the other conditions. */

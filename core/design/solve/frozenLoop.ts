@@ -4,6 +4,8 @@
  * The frozen e hardly moves with a and i, and a and i hardly move with so small an e: solve the other conditions at an
  * e, take the frozen e there, and repeat. Each turn gains three digits or so.
  */
+import { degPerRad } from '../../numerics/angles';
+import { formatNumber } from '../../numerics/numberWords';
 import type { MeanElements } from '../../orbit/elements';
 import type { Condition } from '../conditions/condition';
 import { type NoOrbit, noOrbit } from './answer';
@@ -71,9 +73,9 @@ function frozenText(
   { converged, text }: { converged: boolean; text: string },
   { semiMajorAxisKm, theta }: Point,
 ): string {
-  const degrees = ((Math.acos(Math.min(1, Math.max(-1, theta))) * 180) / Math.PI).toFixed(3);
+  const degrees = formatNumber(Math.acos(Math.min(1, Math.max(-1, theta))) * degPerRad, { digits: 3 });
   const said = converged ? '' : ' (the search did not converge)';
-  return `Frozen at a ${semiMajorAxisKm.toFixed(3)} km and i ${degrees}°: ${text}${said}.`;
+  return `Frozen at a ${formatNumber(semiMajorAxisKm, { digits: 3 })} km and i ${degrees}°: ${text}${said}.`;
 }
 
 function nearestTo({ semiMajorAxisKm, theta }: Point, points: readonly Point[]): Point {

@@ -7,7 +7,7 @@ import type { Condition } from '../conditions/condition';
 import type { Shape, ShapeRates } from '../shapeRates';
 import { shapeAtAxis } from './axis';
 import type { ThetaRule } from './inclinations';
-import { ceilingKm, floorKm, type Problem, ratesOf, searchShare } from './problem';
+import { ceilingKm, floorKm, type Problem, ratesOf } from './problem';
 
 export interface Line {
   readonly grid: Float64Array;
@@ -26,18 +26,24 @@ const axisSamples = 28;
 const samples = 40;
 const planeSamples = 48;
 
-/** `density` samples more finely: 1 finds nearly everything, more is for what it missed. */
-export function shapesLeft(problem: Problem, density = 1): Shapes {
+export interface Sampling {
+  /** 1 finds nearly everything, more is for what it missed. */
+  readonly density: number;
+  /** Lines run down to p = this share of the floor. */
+  readonly share: number;
+}
+
+export function shapesLeft(problem: Problem, sampling: Sampling): Shapes {
   const { start, free, conditions } = problem;
   const axisFree = free.includes('semiMajorAxisKm');
   const eccentricityFree = free.includes('eccentricity');
   const [first, second] = conditions.filter(({ family }) => family === 'altitude');
   if (!axisFree && !eccentricityFree) return single(problem, start);
   if (first && second) return single(problem, betweenApsides(first, second));
-  if (first && axisFree && eccentricityFree) return { kind: 'line', line: altitudeLine(problem, first, density) };
+  if (first && axisFree && eccentricityFree) return { kind: 'line', line: altitudeLine(problem, first, sampling) };
   if (first) return single(problem, tiedByAltitude(problem, first, axisFree));
-  if (axisFree && eccentricityFree) return { kind: 'line', line: planeLine(problem, density) };
-  return { kind: 'line', line: axisFree ? axisLine(problem, density) : eccentricityLine(problem, density) };
+  if (axisFree && eccentricityFree) return { kind: 'line', line: planeLine(problem, sampling) };
+  return { kind: 'line', line: axisFree ? axisLine(problem, sampling) : eccentricityLine(problem, sampling) };
 }
 
 function single(problem: Problem, shape: Shape): Shapes {
@@ -83,9 +89,9 @@ function evenGrid(low: number, high: number, count: number): Float64Array {
 const noGrid = new Float64Array(0);
 
 /** e held: even in ln a, as rates are powers of a. */
-function axisLine(problem: Problem, density: number): Line {
+function axisLine(problem: Problem, { density, share }: Sampling): Line {
   const { eccentricity } = problem.start;
-  const low = Math.log((searchShare * floorKm(problem.body)) / ((1 - eccentricity) * (1 + eccentricity)));
+  const low = Math.log((share * floorKm(problem.body)) / ((1 - eccentricity) * (1 + eccentricity)));
   const high = Math.log(ceilingKm(problem.body));
   return {
     grid: low < high ? evenGrid(low, high, density * axisSamples) : noGrid,
@@ -95,9 +101,9 @@ function axisLine(problem: Problem, density: number): Line {
 }
 
 /** a held: e up to where p is the search's floor. */
-function eccentricityLine(problem: Problem, density: number): Line {
+function eccentricityLine(problem: Problem, { density, share }: Sampling): Line {
   const { semiMajorAxisKm } = problem.start;
-  const square = 1 - (searchShare * floorKm(problem.body)) / semiMajorAxisKm;
+  const square = 1 - (share * floorKm(problem.body)) / semiMajorAxisKm;
   return {
     grid: square > 0 ? evenGrid(0, Math.sqrt(square), density * samples) : noGrid,
     shapeAt: (s) => ratesOf(problem, { semiMajorAxisKm, eccentricity: s }),
@@ -106,8 +112,8 @@ function eccentricityLine(problem: Problem, density: number): Line {
 }
 
 /** Perigee or apogee held. For perigee the line runs over ln a, for apogee over e. */
-function altitudeLine(problem: Problem, altitude: Condition, density: number): Line {
-  const floor = searchShare * floorKm(problem.body);
+function altitudeLine(problem: Problem, altitude: Condition, { density, share }: Sampling): Line {
+  const floor = share * floorKm(problem.body);
   const radiusKm = needed(altitude.axisKmAt)(0);
   if (altitude.kind === 'apogeeAltitude') {
     const shapeAt = (s: number) => ratesOf(problem, { semiMajorAxisKm: radiusKm / (1 + s), eccentricity: s });
@@ -133,7 +139,7 @@ export function settlingAxis(conditions: readonly Condition[]): Condition | null
 }
 
 /** a and e both open: e runs, closer together towards 1, and a follows. */
-function planeLine(problem: Problem, density: number): Line {
+function planeLine(problem: Problem, { density }: Sampling): Line {
   const spent = settlingAxis(problem.conditions);
   if (!spent) return { grid: noGrid, shapeAt: () => null, spent };
   const guess = { km: spent.axisGuessKm ?? 2 * floorKm(problem.body) };

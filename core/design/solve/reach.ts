@@ -11,9 +11,11 @@ export interface ReachedPoint extends Point {
 }
 
 const inclinations = 91;
+/** Down to the floor itself, where most quantities have their extremes. */
+const sampling = { density: 4, share: 1 };
 
 export function reachOf(problem: Problem, division: Division): readonly ReachedPoint[] {
-  const shapes = shapesLeft(problem);
+  const shapes = shapesLeft(problem, sampling);
   const points: ReachedPoint[] = [];
   const condition = division.sought ?? division.thetaFrom;
   const add = (shape: ShapeRates, theta: number) => {

@@ -31,7 +31,7 @@ const touching = 2e-13;
 const zeroEverywhere = 1e-11;
 
 export function dividedProblem(problem: Problem, density = 1): Division {
-  const shapes = shapesLeft(problem, density);
+  const shapes = shapesLeft(problem, { density, share: searchShare });
   const spent = shapes.kind === 'line' ? shapes.line.spent : null;
   const rest = problem.conditions.filter((condition) => condition.family !== 'altitude' && condition !== spent);
   const { theta } = pointOf(problem);

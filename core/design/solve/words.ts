@@ -5,7 +5,7 @@ export function kmText(km: number): string {
 }
 
 export function eccentricityText(eccentricity: number): string {
-  return formatNumber(eccentricity, { digits: 4 });
+  return eccentricity === 0 ? '0' : formatNumber(eccentricity, { digits: 4 });
 }
 
 /** A cosine beyond ±1, with as many digits as tell it from ±1. */

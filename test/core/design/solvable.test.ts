@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { solveOrbit } from '../../../core/design/solveOrbit';
+import type { MeanElements } from '../../../core/orbit/elements';
 import { missOf, type Solvable, seeded, solvableProblem } from './solvable';
 
 const count = 2000;
@@ -68,3 +69,39 @@ function isNear({ truth }: Solvable, mean: { semiMajorAxisKm: number; eccentrici
     Math.abs(mean.inclinationRad - truth.inclinationRad) < 1e-3
   );
 }
+
+/** Where solutions of one free element may lie: p from the radius up, a to a thousand radii. */
+function denseGrid({ body, start, free }: Solvable): readonly MeanElements[] {
+  const count = 20_000;
+  const [element] = free;
+  const floor = Math.min(body.radiusKm, body.equatorialRadiusKm);
+  const { semiMajorAxisKm: a, eccentricity: e } = start;
+  return Array.from({ length: count + 1 }, (_, k) => {
+    const share = k / count;
+    if (element === 'inclinationRad') return { ...start, inclinationRad: Math.PI * share };
+    if (element === 'eccentricity') return { ...start, eccentricity: Math.sqrt(Math.max(0, 1 - floor / a)) * share };
+    const lowest = floor / (1 - e * e);
+    return { ...start, semiMajorAxisKm: lowest * ((1000 * floor) / lowest) ** share };
+  });
+}
+
+describe('all solutions', () => {
+  it('of one condition are as many as a dense grid shows changes of sign', () => {
+    const random = seeded(65_537);
+    let compared = 0;
+    while (compared < 150) {
+      const problem = solvableProblem(random);
+      const [condition] = problem.conditions;
+      if (problem.free.length > 1 || !condition) continue;
+      const signs = denseGrid(problem).map((mean) =>
+        Math.sign(missOf(problem.body, problem.theory, mean, condition, true)),
+      );
+      // Solutions at the very ends of the grid change no sign on it.
+      if (problem.truth.eccentricity === 0 && problem.free[0] === 'eccentricity') continue;
+      const changes = signs.filter((sign, k) => k > 0 && sign !== signs[k - 1]).length;
+      const answer = solveOrbit(problem);
+      expect(answer.ok && answer.all.length, JSON.stringify(problem.conditions)).toBe(changes);
+      compared += 1;
+    }
+  });
+});

@@ -28,9 +28,20 @@ export function seeded(seed: number): () => number {
 }
 
 /** How far a mean orbit misses a condition, as a share of what is asked for (of its size where that is zero). */
-export function missOf(body: Body, theory: Theory, mean: MeanElements, condition: OrbitCondition): number {
+export function missOf(
+  body: Body,
+  theory: Theory,
+  mean: MeanElements,
+  condition: OrbitCondition,
+  signed = false,
+): number {
+  const miss = signedMiss(body, theory, mean, condition);
+  return signed ? miss : Math.abs(miss);
+}
+
+function signedMiss(body: Body, theory: Theory, mean: MeanElements, condition: OrbitCondition): number {
   const rates = secularRates(body, mean, theory);
-  const share = (value: number, wanted: number) => Math.abs(value - wanted) / Math.abs(wanted);
+  const share = (value: number, wanted: number) => (value - wanted) / Math.abs(wanted);
   const surface = body.equatorialRadiusKm;
   switch (condition.kind) {
     case 'sunSynchronous':
@@ -41,7 +52,7 @@ export function missOf(body: Body, theory: Theory, mean: MeanElements, condition
     case 'perigeeRate':
       return share(rates.perigeeRadPerS, condition.radPerS);
     case 'perigeeStationary':
-      return Math.abs(rates.perigeeRadPerS / secularRates(body, { ...mean, inclinationRad: 0 }, theory).perigeeRadPerS);
+      return rates.perigeeRadPerS / secularRates(body, { ...mean, inclinationRad: 0 }, theory).perigeeRadPerS;
     case 'nodalPeriod':
       return share(periods(body, mean, theory).nodalS, condition.s);
     case 'repeat': {
