@@ -14,6 +14,8 @@ export interface NumberFieldProps {
   readonly unit?: string;
   readonly error?: FieldError | undefined;
   readonly note?: string | undefined;
+  /** The note warns: it is set apart from a hint. */
+  readonly noteIsCaution?: boolean;
   /** The text some steps on, or null where the text cannot be stepped. */
   readonly step?: ((text: string, count: number) => string | null) | undefined;
   readonly signed?: boolean;
@@ -23,6 +25,8 @@ export interface NumberFieldProps {
   /** A condition settles the value: it is shown, and cannot be typed. */
   readonly isSettled?: boolean;
   readonly onText: (text: string) => void;
+  /** In place of `onText` where stepping moves more than this field. */
+  readonly onStep?: ((text: string) => void) | undefined;
 }
 
 export function NumberField({ isSettled = false, ...given }: NumberFieldProps) {
@@ -40,7 +44,7 @@ export function NumberField({ isSettled = false, ...given }: NumberFieldProps) {
       </div>
       <div id={`${id}-says`} aria-live="polite">
         {error && <FieldTrouble error={error} onText={props.onText} />}
-        {!error && note && <p class="field-note">{note}</p>}
+        {!error && note && <p class={props.noteIsCaution ? 'field-note is-caution' : 'field-note'}>{note}</p>}
       </div>
     </div>
   );
@@ -48,10 +52,10 @@ export function NumberField({ isSettled = false, ...given }: NumberFieldProps) {
 
 type PartProps = NumberFieldProps & { readonly id: string };
 
-function FieldLabel({ id, label, labelControl, text, step, onText, readOnly }: PartProps) {
+function FieldLabel({ id, label, labelControl, text, step, onText, onStep, readOnly }: PartProps) {
   const drag = useDragSteps((count) => {
     const next = readOnly ? null : step?.(text, count);
-    if (next !== null && next !== undefined) onText(next);
+    if (next !== null && next !== undefined) (onStep ?? onText)(next);
   });
   if (labelControl) return <div class="field-label">{labelControl}</div>;
   return (
@@ -73,13 +77,14 @@ function FieldInput({
   placeholder,
   readOnly,
   onText,
+  onStep,
 }: PartProps) {
   const onKeyDown = (event: KeyboardEvent) => {
     const direction = { ArrowUp: 1, ArrowDown: -1 }[event.key];
     if (direction === undefined || !step || readOnly) return;
     event.preventDefault();
     const next = step(text, event.shiftKey ? direction * 10 : direction);
-    if (next !== null) onText(next);
+    if (next !== null) (onStep ?? onText)(next);
   };
   return (
     <span class="field-value">
@@ -114,7 +119,7 @@ function SignButton({ label, text, readOnly, onText }: NumberFieldProps) {
       disabled={readOnly}
       aria-label={`Turn the sign of ${label}`}
       // The field keeps the focus, so that the keypad stays.
-      onPointerDown={(event) => event.preventDefault()}
+      onMouseDown={(event) => event.preventDefault()}
       onClick={() => onText(signTurned(text))}
     >
       ±
@@ -122,10 +127,10 @@ function SignButton({ label, text, readOnly, onText }: NumberFieldProps) {
   );
 }
 
-function Steppers({ label, text, step, readOnly, onText }: NumberFieldProps) {
+function Steppers({ label, text, step, readOnly, onText, onStep }: NumberFieldProps) {
   const stepBy = (count: number) => () => {
     const next = step?.(text, count);
-    if (next !== null && next !== undefined) onText(next);
+    if (next !== null && next !== undefined) (onStep ?? onText)(next);
   };
   const down = useRepeat(stepBy(-1));
   const up = useRepeat(stepBy(1));

@@ -18,6 +18,8 @@ export function useRepeat(step: () => void) {
     timer.current = setTimeout(again, pauseMs);
   };
   return {
+    // A field that is being typed in keeps the focus, and the keyboard stays.
+    onMouseDown: (event: Event) => event.preventDefault(),
     onPointerDown: () => {
       repeated.current = false;
       stop();

@@ -12,6 +12,10 @@ export interface EntryFieldProps {
   readonly unit?: string;
   /** Step of the buttons and the drag, in the field's unit. */
   readonly stepSize?: number;
+  /** Stepping stops here; what is typed is judged by the reader of the entry. */
+  readonly within?: readonly [number, number];
+  /** What else a step moves, given the field's new text. */
+  readonly alongside?: (text: string) => Partial<Record<FieldId, string>>;
   /** In place of `stepSize` where the text is no plain number. */
   readonly step?: (text: string, count: number) => string | null;
   readonly signed?: boolean;
@@ -19,21 +23,25 @@ export interface EntryFieldProps {
   readonly placeholder?: string;
 }
 
-export function EntryField({ field, stepSize, step, ...rest }: EntryFieldProps) {
+export function EntryField({ field, stepSize, within, step, alongside, ...rest }: EntryFieldProps) {
   const { document, store } = useApp();
   const resolution = document.entered.value;
   const settled = document.settled.value[field];
-  const bySize = stepSize === undefined ? undefined : (text: string, count: number) => stepped(text, stepSize, count);
+  const notice = resolution.notices.find((each) => each.field === field);
+  const bySize =
+    stepSize === undefined ? undefined : (text: string, count: number) => stepped(text, stepSize, count, within);
   return (
     <NumberField
       {...rest}
       text={settled ?? document.draft.value.entry.texts[field]}
       isSettled={settled !== undefined}
       error={resolution.ok ? undefined : resolution.errors[field]}
-      note={resolution.notices.find((notice) => notice.field === field)?.text}
+      note={notice?.text}
+      noteIsCaution={notice?.severity === 'caution'}
       step={step ?? bySize}
       readOnly={store.tabs.editorElsewhere.value}
       onText={(text) => document.setText(field, text)}
+      onStep={alongside && ((text) => document.setTexts({ ...alongside(text), [field]: text }))}
     />
   );
 }

@@ -4,6 +4,7 @@ import { useEffect, useRef } from 'preact/hooks';
 import type { EntryForm, FieldId, InputFrame } from '../../core/index';
 import { Choice } from '../parts/choice';
 import { later } from '../parts/later';
+import { useTyping } from '../parts/useTyping';
 import { useApp } from '../state/appContext';
 import { switchForm, takePaste } from '../state/entryActions';
 import { BodyFields, bodySummary, Pick } from './bodyFields';
@@ -25,8 +26,14 @@ const forms: readonly { readonly value: EntryForm; readonly label: string }[] = 
 export function EntryPanel() {
   const { document } = useApp();
   const { form } = document.draft.value.entry;
+  const { box, isTyping } = useTyping<HTMLElement>();
   return (
-    <section class="entry" aria-label="The orbit as you have it" onPasteCapture={usePaste()}>
+    <section
+      ref={box}
+      class={isTyping ? 'entry is-typing' : 'entry'}
+      aria-label="The orbit as you have it"
+      onPasteCapture={usePaste()}
+    >
       <Choice
         label="Form of the entry"
         name="form"
@@ -77,6 +84,7 @@ function usePaste() {
     announcer.say({
       text: outcome.said,
       tone: 'note',
+      untilEdited: true,
       ...(document.draft.value === before ? {} : { action: { label: 'Undo', run: undo } }),
     });
   };

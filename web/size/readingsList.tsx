@@ -1,6 +1,6 @@
 /** The readings: value large, what would change it small, the working behind a tap. */
 import { useEffect, useRef } from 'preact/hooks';
-import { marginText, type Reading } from '../../core/index';
+import { kmPerLengthUnit, marginText, type Reading } from '../../core/index';
 import { doubtText, quantityText, roundedText, usePreferredUnit, useReadingText } from '../parts/readingText';
 import { useApp } from '../state/appContext';
 
@@ -96,11 +96,13 @@ function useFocusAfter(isOpen: boolean) {
 /** What one more kilometre, hundredth of a degree or thousandth of e would do. */
 function Sensitivity({ reading }: { readonly reading: Reading }) {
   const unitId = usePreferredUnit()(reading.quantity);
+  const { lengthUnit } = useApp().preferences.values.value;
   const sensitivities = reading.sensitivities();
   if (!sensitivities) return null;
   const { perKm, perHundredthDegree, perThousandth } = sensitivities;
+  const kmPerUnit = kmPerLengthUnit({ lengthUnit });
   const parts = [
-    { value: perKm, per: '1 km' },
+    { value: perKm * kmPerUnit, per: `1 ${lengthUnit}` },
     { value: perHundredthDegree, per: '0.01°' },
     { value: perThousandth, per: '0.001 e' },
   ].map(({ value, per }) => `+${per} ${roundedText(reading.quantity, value, { unitId, plus: true })}`);

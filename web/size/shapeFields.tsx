@@ -1,4 +1,5 @@
 /** The fields of the forms that type elements: shape, inclination, node. */
+import { readNumber } from '../../core/index';
 import { steppedClock } from '../parts/stepping';
 import { useApp } from '../state/appContext';
 import { switchNodeForm } from '../state/entryActions';
@@ -6,22 +7,42 @@ import { EntryField } from './entryField';
 
 export function ShapeFields() {
   const { document } = useApp();
-  const { form, lengthUnit } = document.draft.value.entry;
+  const { form, lengthUnit, texts } = document.draft.value.entry;
   return form === 'altitudes' ? (
     <>
-      <EntryField field="perigeeAltitude" label="Perigee altitude" unit={lengthUnit} stepSize={1} signed />
-      <EntryField field="apogeeAltitude" label="Apogee altitude" unit={lengthUnit} stepSize={1} signed />
+      <EntryField
+        field="perigeeAltitude"
+        label="Perigee altitude"
+        unit={lengthUnit}
+        stepSize={1}
+        signed
+        alongside={(text) => (isBelow(texts.apogeeAltitude, text) ? { apogeeAltitude: text } : {})}
+      />
+      <EntryField
+        field="apogeeAltitude"
+        label="Apogee altitude"
+        unit={lengthUnit}
+        stepSize={1}
+        signed
+        alongside={(text) => (isBelow(text, texts.perigeeAltitude) ? { perigeeAltitude: text } : {})}
+      />
     </>
   ) : (
     <>
       <EntryField field="semiMajorAxis" label="Semi-major axis" unit={lengthUnit} stepSize={1} />
-      <EntryField field="eccentricity" label="Eccentricity" stepSize={0.0001} />
+      <EntryField field="eccentricity" label="Eccentricity" stepSize={0.0001} within={[0, 0.9999]} />
     </>
   );
 }
 
+/** A step that would pass the other apsis takes it along, so that a circle is raised by one finger. */
+function isBelow(low: string, high: string): boolean {
+  const [one, other] = [readNumber(low), readNumber(high)];
+  return one.ok && other.ok && one.value < other.value;
+}
+
 export function InclinationField() {
-  return <EntryField field="inclination" label="Inclination" unit="°" stepSize={0.01} />;
+  return <EntryField field="inclination" label="Inclination" unit="°" stepSize={0.01} within={[0, 180]} />;
 }
 
 /** Trade terms, short enough to stand as a label. */

@@ -2,12 +2,15 @@
 import { lengthCaps } from '../../core/index';
 import { FieldTrouble } from '../parts/numberField';
 import { useApp } from '../state/appContext';
+import { typeTwoLine } from '../state/entryActions';
 
 export function TwoLineField() {
   const { document, store } = useApp();
   const { draft, entered } = document;
-  const error = entered.value.ok ? undefined : entered.value.errors.twoLine;
-  const setText = (text: string) => document.setText('twoLine', text);
+  const text = draft.value.entry.texts.twoLine;
+  // An empty field is a place to paste, not yet a mistake.
+  const error = entered.value.ok || text.trim() === '' ? undefined : entered.value.errors.twoLine;
+  const setText = (text: string) => typeTwoLine(document, text);
   return (
     <div class={`field field-tall${error ? ' has-error' : ''}`}>
       <label class="field-label" for="two-line">
@@ -26,7 +29,7 @@ export function TwoLineField() {
         aria-describedby="two-line-says"
         placeholder="Paste both lines; a name line may stand above."
         readOnly={store.tabs.editorElsewhere.value}
-        value={draft.value.entry.texts.twoLine}
+        value={text}
         onInput={(event) => setText(event.currentTarget.value)}
       />
       <div id="two-line-says" aria-live="polite">

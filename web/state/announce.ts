@@ -5,6 +5,8 @@ export interface Announcement {
   readonly text: string;
   readonly tone: 'note' | 'caution';
   readonly action?: { readonly label: string; readonly run: () => void };
+  /** True where the action puts back a draft: once something else is typed, it would undo that too. */
+  readonly untilEdited?: boolean;
 }
 
 export interface Announcer {

@@ -12,6 +12,7 @@ import {
   kmPerLengthUnit,
   type NodeForm,
   type OrbitEntry,
+  parseTle,
   readNumber,
   readStateText,
 } from '../../core/index';
@@ -39,13 +40,22 @@ function retag(document: OrbitDocument, tags: Tags): string | null {
 }
 
 export function switchForm(document: OrbitDocument, form: EntryForm): void {
-  const { entry, body } = document.draft.value;
+  const { entry } = document.draft.value;
   if (form === entry.form) return;
   batch(() => {
     // Elements know no Earth-fixed axes; the numbers are rewritten in axes of date.
-    const frame = entry.frame === 'earthFixed' || entry.form === 'twoLine' ? 'meanOfDate' : entry.frame;
+    const isRewritten = entry.form === 'twoLine' && orbitAtHand(document).ok;
+    const frame = entry.frame === 'earthFixed' || isRewritten ? 'meanOfDate' : entry.frame;
     retag(document, { form, frame });
-    if (form === 'twoLine' && body === 'earth') document.setCandidate({ gravitySet: 'WGS72' });
+  });
+}
+
+/** A set that can be read brings the gravity set it was made with; a visit to the form changes nothing. */
+export function typeTwoLine(document: OrbitDocument, text: string): void {
+  batch(() => {
+    document.setText('twoLine', text);
+    const { body, gravitySet } = document.draft.value;
+    if (body === 'earth' && gravitySet !== 'WGS72' && parseTle(text).ok) document.setCandidate({ gravitySet: 'WGS72' });
   });
 }
 
@@ -94,7 +104,7 @@ export function takePaste(document: OrbitDocument, text: string): PasteOutcome {
   if (twoLinePattern.test(text)) {
     batch(() => {
       switchForm(document, 'twoLine');
-      document.setText('twoLine', text);
+      typeTwoLine(document, text);
     });
     return { said: 'Read as two-line elements.' };
   }

@@ -54,6 +54,10 @@ export function createSaving(parts: SavingParts): Saving {
       document.markSaved(candidate, outcome.entry.revision);
       store.draft.note({ candidate: document.draft.value, baseRevision: outcome.entry.revision });
       status.value = { kind: 'saved', revision: outcome.entry.revision, atIso: outcome.entry.savedAtIso };
+      if (document.stale.value) {
+        const text = 'Saved as typed, though it does not come to an orbit yet: see the messages at the fields.';
+        announcer.say({ text, tone: 'note', untilEdited: true });
+      }
       return true;
     }
     status.value = { kind: 'failed', message: outcome.message };
@@ -104,6 +108,7 @@ async function discardChanges({ store, document, announcer }: SavingParts): Prom
   announcer.say({
     text: `Back to revision ${revision}.`,
     tone: 'note',
+    untilEdited: true,
     action: {
       label: 'Undo',
       run: () => document.open({ ...openedFrom(base.candidate, revision), candidate: typed }),

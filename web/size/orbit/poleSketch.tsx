@@ -29,7 +29,9 @@ export function PoleSketch({ orbit }: { readonly orbit: ResolvedOrbit }) {
         {hasSun && <circle class="sketch-sun" cx={centre[0]} cy={centre[1] - sunReach} r={6.5} />}
         <NodeLine angle={mean.nodeRad + turn} by={nodePerDay * days} />
         <text class="sketch-note of-node" x={size - 2} y={size - 6} text-anchor="end">
-          node in {days === 1 ? 'a day' : `${days} days`}
+          {Math.abs(nodePerDay * days) > 0.01
+            ? `node in ${days === 1 ? 'a day' : `${days} days`}`
+            : 'node stands still'}
         </text>
       </svg>
     </figure>

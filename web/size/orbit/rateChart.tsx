@@ -58,6 +58,8 @@ interface Frame {
   readonly x: (inclinationRad: number) => number;
   readonly y: (radPerS: number) => number;
   readonly ticks: readonly number[];
+  /** Decimals that tell the ticks apart. */
+  readonly digits: number;
   readonly perCore: number;
 }
 
@@ -65,10 +67,12 @@ function chartFrame({ nodeRadPerS, perigeeRadPerS }: RateCurves, width: number, 
   const largest = Math.max(...nodeRadPerS.map(Math.abs), ...perigeeRadPerS.map(Math.abs)) * perCore * 1.06 || 1;
   const plotWidth = width - inset.left - inset.right;
   const middle = inset.top + (height - inset.top - inset.bottom) / 2;
+  const ticks = niceTicks(-largest, largest, 5);
   return {
     x: (inclinationRad) => inset.left + (plotWidth * inclinationRad) / Math.PI,
     y: (radPerS) => middle - ((middle - inset.top) * radPerS * perCore) / largest,
-    ticks: niceTicks(-largest, largest, 5),
+    ticks,
+    digits: Math.max(0, Math.min(8, -Math.floor(Math.log10((ticks[1] ?? 1) - (ticks[0] ?? 0))))),
     perCore,
   };
 }
@@ -90,12 +94,12 @@ function Axes({ frame, width }: { readonly frame: Frame; readonly width: number 
           <g key={tick}>
             <path class={tick === 0 ? 'chart-zero' : 'chart-grid'} d={`M${inset.left} ${y}H${width - inset.right}`} />
             <text x={inset.left - 8} y={y} dy="0.35em" text-anchor="end">
-              {formatNumber(tick, { digits: Number.isInteger(tick) ? 0 : 1, plus: true })}
+              {formatNumber(tick, { digits: frame.digits, plus: true })}
             </text>
           </g>
         );
       })}
-      {[0, 30, 60, 90, 120, 150, 180].map((deg) => (
+      {(width < 440 ? [0, 60, 120, 180] : [0, 30, 60, 90, 120, 150, 180]).map((deg) => (
         <g key={deg}>
           <path class="chart-tick" d={`M${frame.x(deg / degPerRad)} ${bottom}v6`} />
           <text x={frame.x(deg / degPerRad)} y={bottom + 21} text-anchor={deg === 180 ? 'end' : 'middle'}>
@@ -121,6 +125,8 @@ function SunRate({ orbit, frame, width }: SunProps) {
   const { yearDays } = orbit.body;
   if (yearDays === null) return null;
   const y = frame.y((2 * Math.PI) / (yearDays * 86_400));
+  // Off the chart where rates are slower than the Sun's.
+  if (y < inset.top + 16) return null;
   return (
     <g class="chart-sun">
       <path d={`M${inset.left} ${y}H${width - inset.right}`} />

@@ -1,0 +1,44 @@
+/**
+ * Whether a text is being typed into in some box, so that the page can make room for the on-screen keyboard.
+ *
+ * The end is held back while a finger is down: a page that moved between the touch and the click would take the tap
+ * away from the button under the finger.
+ */
+import { useEffect, useRef, useState } from 'preact/hooks';
+
+const isText = (target: EventTarget | null): boolean =>
+  target instanceof HTMLTextAreaElement || (target instanceof HTMLInputElement && target.type !== 'radio');
+
+export function useTyping<Box extends HTMLElement>() {
+  const box = useRef<Box>(null);
+  const [isTyping, setTyping] = useState(false);
+  useEffect(() => {
+    const element = box.current;
+    if (!element) return;
+    let fingerIsDown = false;
+    const look = () => setTyping(isText(document.activeElement) && element.contains(document.activeElement));
+    // After the click that ends the touch.
+    const later = () => setTimeout(() => !fingerIsDown && look());
+    const down = () => {
+      fingerIsDown = true;
+    };
+    const up = () => {
+      fingerIsDown = false;
+      later();
+    };
+    const onOut = () => later();
+    element.addEventListener('focusin', look);
+    element.addEventListener('focusout', onOut);
+    document.addEventListener('pointerdown', down, true);
+    document.addEventListener('pointerup', up, true);
+    document.addEventListener('pointercancel', up, true);
+    return () => {
+      element.removeEventListener('focusin', look);
+      element.removeEventListener('focusout', onOut);
+      document.removeEventListener('pointerdown', down, true);
+      document.removeEventListener('pointerup', up, true);
+      document.removeEventListener('pointercancel', up, true);
+    };
+  }, []);
+  return { box, isTyping };
+}
