@@ -43,6 +43,7 @@ export async function createAppState({ store, offline, page, newId }: AppStatePa
   const preferences = createPreferences(store.settings);
   const saving = createSaving({ store, document, announcer, newId });
   keepDraft(store, document);
+  expireUndo(document, announcer);
   followHandOver(store, document);
   return {
     store,
@@ -89,6 +90,20 @@ function keepDraft(store: Store, document: OrbitDocument): void {
     if (candidate === known) return;
     known = candidate;
     store.draft.note({ candidate, baseRevision });
+  });
+}
+
+/** An undo that puts a draft back goes when something else has been typed: it would undo that too. */
+function expireUndo(document: OrbitDocument, announcer: Announcer): void {
+  let said = announcer.current.peek();
+  let draftThen = document.draft.peek();
+  effect(() => {
+    const current = announcer.current.value;
+    const draft = document.draft.value;
+    if (current === said && current?.untilEdited && draft !== draftThen) announcer.dismiss();
+    if (current === said) return;
+    said = current;
+    draftThen = draft;
   });
 }
 
