@@ -159,6 +159,7 @@ export { type EntryTags, type EntryTexts, entryFromOrbit } from './record/entryF
 export { fingerprint, fingerprintAlphabet, fingerprintLine } from './record/fingerprint';
 export { readStateText, type StateTextResult } from './record/formats/stateText';
 export { parseTle, type TwoLineElements, type TwoLineResult } from './record/formats/twoLine';
+export { twoLineSetIn } from './record/formats/twoLineColumns';
 export type { TwoLineError } from './record/formats/twoLineFields';
 export { type Expr, evaluate, mapSymbols, symbolsIn, type Values } from './record/formula';
 export { formulaText } from './record/formulaText';
@@ -175,15 +176,8 @@ export {
   readLimits,
 } from './record/limits';
 export { violatesAt } from './record/limitsAt';
-export {
-  convertedText,
-  type LimitsJudged,
-  limitInUnit,
-  limitsSentence,
-  limitText,
-  marginText,
-  storedLimitText,
-} from './record/limitWords';
+export { convertedText, limitInUnit } from './record/limitUnits';
+export { type LimitsJudged, limitsSentence, limitText, marginText } from './record/limitWords';
 export { type Migration, migrateCandidate } from './record/migrate';
 export { type NumberReading, type NumberResult, readNumber } from './record/numberText';
 export { type FieldReader, fieldReader } from './record/readFields';
@@ -201,6 +195,7 @@ export type {
 export { type AbsentReading, absentReadings, readingSpec, readingsOf } from './record/readings/readings';
 export type { FieldError, FieldErrors, Notice, Resolution, ResolvedOrbit } from './record/resolved';
 export { resolveOrbit } from './record/resolveOrbit';
+export { storedLimitText } from './record/storedLimitText';
 export { limitCrossings, pointAt, type Sweep, type SweepRequest, sweepReading } from './record/sweep';
 export { placeText, type SweepWriting, shortText, sweepSentence } from './record/sweepHeadline';
 export {

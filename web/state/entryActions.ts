@@ -8,6 +8,7 @@ import {
   type EntryForm,
   entryFromOrbit,
   type FieldId,
+  type InputFrame,
   type KeplerianElements,
   kmPerLengthUnit,
   type NodeForm,
@@ -15,6 +16,8 @@ import {
   parseTle,
   readNumber,
   readStateText,
+  type StateTextResult,
+  twoLineSetIn,
 } from '../../core/index';
 import type { OrbitDocument } from './document';
 
@@ -85,7 +88,6 @@ export function switchBody(document: OrbitDocument, body: BodyId): void {
   });
 }
 
-const twoLinePattern = /^\s*1 .{20,}[\r\n]+\s*2 /m;
 const longestPaste = 20_000;
 
 export type PasteOutcome = 'notOurs' | { readonly said: string };
@@ -101,22 +103,39 @@ export function takePaste(document: OrbitDocument, text: string): PasteOutcome {
       said: `That paste is ${size}; an orbit is six numbers or two lines of 69 characters. Nothing was changed.`,
     };
   }
-  if (twoLinePattern.test(text)) {
+  const set = twoLineSetIn(text);
+  if (set !== null) {
     batch(() => {
       switchForm(document, 'twoLine');
-      typeTwoLine(document, text);
+      typeTwoLine(document, set);
     });
     return { said: 'Read as two-line elements.' };
   }
   const state = readStateText(text);
-  if (!state.ok) return 'notOurs';
+  if (state.ok) return takeState(document, state);
+  // A field of one number has no use for a mail; the lines of a set have a field that says what is wrong with them.
+  const isMail = text.length > 30 && (text.match(/\d+(?:[.,]\d+)?/g) ?? []).length >= 6;
+  if (!isMail || document.draft.value.entry.form === 'twoLine') return 'notOurs';
+  return { said: `${state.message} Nothing was changed.` };
+}
+
+const frameNames: Readonly<Record<InputFrame, string>> = {
+  meanOfDate: 'mean equator and equinox of date',
+  j2000: 'J2000',
+  teme: 'TEME',
+  earthFixed: 'Earth-fixed axes',
+};
+
+function takeState(document: OrbitDocument, state: Extract<StateTextResult, { ok: true }>): PasteOutcome {
   const [x = '', y = '', z = '', vx = '', vy = '', vz = ''] = state.numbers;
   const { entry } = document.draft.value;
   const stateUnit = state.unitGuess ?? entry.stateUnit;
+  const frame = state.frameGuess ?? entry.frame;
   const epoch = state.epochText === undefined ? {} : { epoch: state.epochText };
-  document.setTags({ form: 'state', stateUnit }, { x, y, z, vx, vy, vz, ...epoch });
-  const unit = stateUnit === 'm' ? 'm and m/s' : 'km and km/s';
-  return { said: `Read as a state vector in ${unit}. Check the unit, the axes and the epoch.` };
+  document.setTags({ form: 'state', stateUnit, frame }, { x, y, z, vx, vy, vz, ...epoch });
+  const read = `Read as a state vector in ${stateUnit === 'm' ? 'm and m/s' : 'km and km/s'}`;
+  const axes = state.frameGuess === undefined ? 'Axes not named: check them' : `Axes: ${frameNames[frame]}. Check them`;
+  return { said: `${read}. ${axes}, the unit and the epoch.` };
 }
 
 /**

@@ -18,7 +18,7 @@ export interface FoundLines {
 }
 
 export function findLines(text: string): FoundLines {
-  const lines = splitLines(text);
+  const lines = linesOfSet(splitLines(text));
   const first = lines[0] ?? '';
   const named = hasName(lines);
   const body = (named ? lines.slice(1) : lines).map((line) => restoreColumns(line.toUpperCase()));
@@ -28,6 +28,30 @@ export function findLines(text: string): FoundLines {
     line2: body[1] ?? null,
     surplus: Math.max(0, body.length - 2),
   };
+}
+
+/** Number of the line, catalogue number, class or inclination, and most of a line. */
+const beginnings = [/^1 +[\dA-Z]{1,5} ?[A-Z]? .{30}/i, /^2 +[\dA-Z]{1,5} +\d.{30}/i] as const;
+
+/** With a text around the set, a mail, the two lines alone, where there is one set only; else all lines. */
+function linesOfSet(lines: readonly string[]): readonly string[] {
+  if (lines.length < 3) return lines;
+  const [start, ...others] = setStarts(lines);
+  if (start === undefined || others.length > 0) return lines;
+  const isNamed = start === 1 && lines.length === 3;
+  return isNamed ? lines : lines.slice(start, start + 2);
+}
+
+function setStarts(lines: readonly string[]): readonly number[] {
+  return lines.flatMap((line, index) =>
+    beginnings[0].test(line) && beginnings[1].test(lines[index + 1] ?? '') ? [index] : [],
+  );
+}
+
+/** The two-line set in a text, without other lines around it; null where there is none. */
+export function twoLineSetIn(text: string): string | null {
+  const lines = splitLines(text);
+  return setStarts(lines).length === 0 ? null : linesOfSet(lines).join('\n');
 }
 
 /** A set has a name line if its first two lines are not the numbered ones. */
@@ -45,6 +69,8 @@ function splitLines(text: string): readonly string[] {
     .replace(/[\u2010-\u2013\u2212]/g, '-')
     .split(/[\r\n\u2028\u2029]+/)
     .map((line) => line.replace(/[\s\u200b\ufeff]/g, ' ').trim())
+    // As mails quote.
+    .map((line) => line.replace(/^(?:> ?)+/, ''))
     .filter((line) => line !== '');
   // Both lines run together, as some pages copy them.
   const joined = lines.length === 1 ? /^(1 .{67})\s*(2 .{67})$/.exec(lines[0] ?? '') : null;

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { parseTle, type TwoLineElements } from '../../../../core/record/formats/twoLine';
+import { twoLineSetIn } from '../../../../core/record/formats/twoLineColumns';
 import { catalogText, twoLineSets, withChecksum } from '../../../external/twoLineSets';
 
 const line1 = withChecksum('1 70001U 27001A   27080.43750000  .00016717  00000-0  10270-3 0    9');
@@ -96,6 +97,25 @@ describe('a well-formed set', () => {
   it('accepts blank drag fields and counts', () => {
     const blank = edit(edit(edit(line1, 45, '        '), 54, '        '), 63, '      ');
     expect(read(`${blank}\n${line2}`).bstar).toBe(0);
+  });
+});
+
+describe('a set in a mail', () => {
+  const mail = `Hi,\nhere it is, 2 lines:\n\n${set}\n\nbye, call 030 123456`;
+  it('is found between the other lines, quoted or not', () => {
+    expect(read(mail)).toEqual(read(set));
+    expect(read(mail.replace(/^/gm, '> '))).toEqual(read(set));
+    expect(twoLineSetIn(mail)).toBe(set);
+  });
+
+  it('keeps its name line where there is nothing else', () => {
+    expect(read(`SKERRY 1\n${set}`).name).toBe('SKERRY 1');
+    expect(twoLineSetIn(`SKERRY 1\n${set}`)).toBe(`SKERRY 1\n${set}`);
+  });
+
+  it('is not chosen among several, nor seen where there is none', () => {
+    expect(messages(`One\n${set}\ntwo\n${set}`)).not.toBe('');
+    expect(twoLineSetIn('1 7078.1\n2 -12.5\n3 300')).toBeNull();
   });
 });
 
