@@ -7,6 +7,12 @@ import { offlineWorker } from './web/build/offlineWorker.ts';
 
 const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
 
+/** What conditions are called and how they are read: none of it is needed for an orbit that has none. */
+const conditions = /[\\/]core[\\/]record[\\/]conditions[\\/](kinds|readConditions)/;
+
+/** Fetched with the first plot; what draws into the canvas comes after it. */
+const plots = /[\\/]web[\\/]parts[\\/](plot(?!Canvas|Ink)|usePlotCanvas|useCursorDrag|useHeights)/;
+
 /** Fetched when a condition, a chart or the book asks for it. */
 const onDemand =
   /[\\/]core[\\/](design|forces|mission[\\/](averagedRates|equinoctial|gaussAverage|oblateness|orbitBasis)|numerics[\\/](bracket|linear|newton|roots)|record[\\/]conditions[\\/]settleOrbit)/;
@@ -43,6 +49,9 @@ export default defineConfig({
           groups: [
             // Solving serves several places, none of them at the first page.
             { name: 'design', test: onDemand, priority: 2 },
+            { name: 'conditions', test: conditions, priority: 2 },
+            { name: 'plots', test: plots, priority: 2 },
+            { name: 'drawing', test: /[\\/]web[\\/]parts[\\/]drawing/, priority: 2 },
             { name: 'shared', minShareCount: 2, priority: 1 },
           ],
         },

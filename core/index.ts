@@ -8,6 +8,7 @@ export { isoFromJulianDate, type JulianDateResult, julianDateFromIso, seriesSpan
 export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from './bodies/precession';
 export { meanSiderealTimeRad } from './bodies/siderealTime';
 export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
+export { type SunAt, type SunModel, type SunSeen, sunSeenFrom } from './bodies/sunSeenFrom';
 export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
 export { type ChartCondition, type ChartCurve, chartCurve } from './design/chartCurves';
 export { type ChartLine, type ChartWindow, chartLine } from './design/chartLines';

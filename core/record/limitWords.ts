@@ -1,6 +1,5 @@
 /** Limits in words, the same on the screen, in the book and on paper. */
 import type { LimitEntry, LimitMargin, ReadLimit } from './limits';
-import { readNumber } from './numberText';
 import type { Reading } from './readings/reading';
 import { readingSpec } from './readings/readings';
 import { formatClock, formatNumber, formatSignificant, type Quantity, unitOf } from './units';
@@ -76,31 +75,8 @@ function counted(what: string, labels: readonly string[]): string[] {
   return [`${labels.length} ${labels.length === 1 ? 'limit' : 'limits'} ${what}: ${[...new Set(labels)].join(', ')}.`];
 }
 
-/** A limit as it stands in the record, whether or not it can be read: "Perigee altitude at most 600 km". */
-export function storedLimitText(stored: Readonly<Record<string, unknown>>): string {
-  const { reading, bound, text, unit } = stored;
-  const spec = readingSpec(reading);
-  if (!spec) return 'a limit of another version';
-  const { symbol } = unitOf(spec.quantity, String(unit));
-  return `${spec.label} ${bound === 'atLeast' ? 'at least' : 'at most'} ${String(text) || 'empty'} ${symbol.replace(/^deg\b/, '°')}`.trim();
-}
-
-/** The same limit typed in another unit of its reading; a text that is no number stays as it is typed. */
-export function limitInUnit(entry: LimitEntry, unitId: string): LimitEntry {
-  const quantity = quantityOf(entry);
-  const [from, to] = [unitOf(quantity, entry.unit), unitOf(quantity, unitId)];
-  return { ...entry, unit: to.id, text: convertedText(entry.text, to.perCore / from.perCore) };
-}
-
-/** A typed number times a factor, with the decimal comma where it was typed with one; any other text as it is. */
-export function convertedText(text: string, factor: number): string {
-  const number = readNumber(text);
-  if (!number.ok || factor === 1) return text;
-  const plain = String(Number((number.value * factor).toPrecision(10)));
-  return text.includes(',') && !text.includes('.') ? plain.replace('.', ',') : plain;
-}
-
-function quantityOf({ reading }: LimitEntry): Quantity {
+/** Throws for a reading that this version does not know: `readLimits` gives no entry then. */
+export function quantityOf({ reading }: Pick<LimitEntry, 'reading'>): Quantity {
   const spec = readingSpec(reading);
   if (!spec) throw new Error(`Expected a known reading, got ${reading}`);
   return spec.quantity;

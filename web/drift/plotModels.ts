@@ -51,7 +51,7 @@ function changePlot(change: Change, { drift, time, spanText, isRound }: PlotInpu
     title: `${change.title}${weak ? ' (means little at this e)' : ''}, ${change.unit.name} from the start`,
     hue: look.hue,
     caption: changeCaption(change, spanText),
-    model: modelOf(drift, time, lines, { smallest, hasTimeLabels: false }),
+    model: modelOf(drift, time, lines, { smallest, hasXLabels: false }),
     valueText: (sample) => ordersText(change, sample),
   };
 }
@@ -71,7 +71,7 @@ function differencePlot({ drift, time, spanText, isRound, apsis }: PlotInputs): 
     title: 'Second order minus first, degrees',
     hue: 'ink',
     caption: differenceCaption(drift, difference, spanText),
-    model: modelOf(drift, time, lines, { smallest: smallestRange.degrees, hasTimeLabels: true }),
+    model: modelOf(drift, time, lines, { smallest: smallestRange.degrees, hasXLabels: true }),
     valueText: (sample) => differenceText(difference, sample),
   };
 }
@@ -80,16 +80,17 @@ function modelOf(
   { days }: ClosedFormDrift,
   time: TimeSpan,
   lines: readonly PlotLine[],
-  { smallest, hasTimeLabels }: { readonly smallest: number; readonly hasTimeLabels: boolean },
+  { smallest, hasXLabels }: { readonly smallest: number; readonly hasXLabels: boolean },
 ): PlotModel {
   return {
-    days,
+    x: days,
     lines,
     range: valueRange(
       lines.map(({ values }) => values),
       smallest,
     ),
-    timeTicks: (most) => timeTicks(time, most),
-    hasTimeLabels,
+    xTicks: (most) => timeTicks(time, most),
+    hasXLabels,
+    isSigned: true,
   };
 }

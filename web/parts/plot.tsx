@@ -1,6 +1,6 @@
 /**
- * One plot of a stack: a canvas for lines and axes, and above it the cursor, the marks and labels at
- * line ends. It is a slider for keyboard and screen reader: its value is the moment of the cursor.
+ * One plot, alone or of a stack: a canvas for lines and axes, and above it the cursor, the bounds, the marks and
+ * labels at line ends. It is a slider for keyboard and screen reader: its value is the place of the cursor.
  */
 import { useRef } from 'preact/hooks';
 import { sampleAfterKey } from './plotCursor';
@@ -16,7 +16,7 @@ export interface PlotProps {
   readonly model: PlotModel;
   /** Index of the sample that the cursor stands on. */
   readonly sample: number;
-  /** The cursor's moment, and the values there, in words. */
+  /** Where the cursor stands, such as a moment, and the values there, in words. */
   readonly momentText: string;
   readonly valueText: string;
   readonly onSample: (sample: number) => void;
@@ -26,7 +26,7 @@ export function Plot({ name, model, sample, momentText, valueText, onSample }: P
   const host = useRef<HTMLDivElement>(null);
   const area = useRef<HTMLDivElement>(null);
   const failed = usePlotCanvas({ host, area }, model);
-  const last = model.days.length - 1;
+  const last = model.x.length - 1;
   const drag = useCursorDrag(last, onSample);
   const onKeyDown = (event: KeyboardEvent) => {
     const next = event.altKey || event.ctrlKey || event.metaKey ? null : sampleAfterKey(event.key, sample, last);
@@ -36,7 +36,7 @@ export function Plot({ name, model, sample, momentText, valueText, onSample }: P
   };
   if (failed) return <p class="plot-failed">Not drawn, since this browser cannot: the tables hold the same values.</p>;
   return (
-    <div class={`plot${model.hasTimeLabels ? ' has-time' : ''}`}>
+    <div class={`plot${model.hasXLabels ? ' has-x' : ''}`}>
       <div class="plot-canvas" ref={host} aria-hidden="true" />
       <div
         class="plot-area"
@@ -51,7 +51,9 @@ export function Plot({ name, model, sample, momentText, valueText, onSample }: P
         onKeyDown={onKeyDown}
         {...drag}
       >
-        <div class="plot-zero" style={{ bottom: percent(heightIn(model.range, 0)) }} />
+        <Levels model={model} />
+        <Zero model={model} />
+        <OwnPoint model={model} />
         <Cursor model={model} sample={sample} momentText={momentText} />
         <LineEnds model={model} />
       </div>
@@ -63,26 +65,53 @@ const percent = (part: number): string => `${part * 100}%`;
 const valueAt = (line: PlotLine, sample: number): number => line.values[sample] ?? 0;
 
 function Cursor({ model, sample, momentText }: Pick<PlotProps, 'model' | 'sample' | 'momentText'>) {
-  const left = percent(sample / (model.days.length - 1));
+  const left = percent(sample / (model.x.length - 1));
   return (
     <div class="plot-cursor" style={{ left }}>
-      {model.lines.map((line) => (
-        <i
-          key={line.id}
-          class={`plot-dot mark-${line.hue} is-${line.pattern}`}
-          style={{ bottom: percent(heightIn(model.range, valueAt(line, sample))) }}
-        />
-      ))}
-      {model.hasTimeLabels && <span class="plot-moment">{momentText}</span>}
+      {model.lines
+        .filter((line) => isDrawn(model, valueAt(line, sample)))
+        .map((line) => (
+          <i
+            key={line.id}
+            class={`plot-dot mark-${line.hue} is-${line.pattern}`}
+            style={{ bottom: percent(heightIn(model.range, valueAt(line, sample))) }}
+          />
+        ))}
+      {model.hasXLabels && <span class="plot-moment">{momentText}</span>}
     </div>
   );
 }
 
-/** Marks where the lines end, and beside them what each line is. */
+const isDrawn = ({ range }: PlotModel, value: number): boolean => value >= range.least && value <= range.greatest;
+
+function Zero({ model }: { readonly model: PlotModel }) {
+  if (!isDrawn(model, 0)) return null;
+  return <div class="plot-zero" style={{ bottom: percent(heightIn(model.range, 0)) }} />;
+}
+
+/** Bounds, each with the side beyond it hatched. */
+function Levels({ model }: { readonly model: PlotModel }) {
+  return model.levels?.map(({ id, at, beyond }) => {
+    const height = Math.max(0, Math.min(1, heightIn(model.range, at)));
+    const box = beyond === 'above' ? { top: 0, bottom: percent(height) } : { bottom: 0, top: percent(1 - height) };
+    return <div key={id} class={`plot-beyond is-${beyond}${isDrawn(model, at) ? ' has-edge' : ''}`} style={box} />;
+  });
+}
+
+function OwnPoint({ model }: { readonly model: PlotModel }) {
+  const [first, last] = [model.x[0] ?? 0, model.x[model.x.length - 1] ?? 1];
+  const { point } = model;
+  if (!point || !(point.x >= first && point.x <= last) || !isDrawn(model, point.value)) return null;
+  const left = percent((point.x - first) / (last - first));
+  return <i class="plot-own" style={{ left, bottom: percent(heightIn(model.range, point.value)) }} />;
+}
+
+/** Marks where the lines end, and beside them what each line is; the same for the bounds across the plot. */
 function LineEnds({ model }: { readonly model: PlotModel }) {
   const ends = useRef<HTMLDivElement>(null);
   const { heightPx, linePx } = useHeights(ends);
-  const parts = model.lines.map((line) => heightIn(model.range, valueAt(line, line.values.length - 1)));
+  const levels = (model.levels ?? []).filter(({ at }) => isDrawn(model, at));
+  const parts = [...model.lines.map(lastValue), ...levels.map(({ at }) => at)].map((at) => heightIn(model.range, at));
   const wantedPx = parts.map((part) => (1 - part) * heightPx);
   const placedPx = spreadLabels(wantedPx, linePx, heightPx);
   return (
@@ -96,6 +125,16 @@ function LineEnds({ model }: { readonly model: PlotModel }) {
           </span>
         </span>
       ))}
+      {levels.map(({ id, label }, index) => (
+        <span key={id} class="plot-label is-level" style={{ top: `${placedPx[model.lines.length + index] ?? 0}px` }}>
+          {label}
+        </span>
+      ))}
     </div>
   );
+}
+
+/** Where the line ends; its last stretch may have nothing to draw. */
+function lastValue({ values }: PlotLine): number {
+  return values.findLast(Number.isFinite) ?? 0;
 }

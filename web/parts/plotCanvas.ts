@@ -51,10 +51,14 @@ export function drawPlot(place: PlotPlace, first: PlotModel): PlotHandle {
   };
 }
 
-const dataOf = (model: PlotModel): uPlot.AlignedData => [model.days, ...model.lines.map((line) => line.values)];
+const dataOf = (model: PlotModel): uPlot.AlignedData => [model.x, ...model.lines.map(({ values }) => withGaps(values))];
+
+/** A gap is null to uPlot; it would draw a line across what is not a number. */
+const withGaps = (values: Float64Array): Float64Array | (number | null)[] =>
+  values.some(Number.isNaN) ? Array.from(values, (value) => (Number.isNaN(value) ? null : value)) : values;
 
 const shapeOf = (model: PlotModel): string =>
-  JSON.stringify([model.hasTimeLabels, model.lines.map(({ id, pattern, hue, weak }) => [id, pattern, hue, weak])]);
+  JSON.stringify([model.hasXLabels, model.lines.map(({ id, pattern, hue, weak }) => [id, pattern, hue, weak])]);
 
 function optionsFor({ host, area }: PlotPlace, modelNow: () => PlotModel): uPlot.Options {
   const ink = inkOf(host);
@@ -63,14 +67,14 @@ function optionsFor({ host, area }: PlotPlace, modelNow: () => PlotModel): uPlot
   return {
     width: host.clientWidth,
     height: host.clientHeight,
-    padding: [inset.top, inset.right, model.hasTimeLabels ? 0 : inset.bottom, 0],
+    padding: [inset.top, inset.right, model.hasXLabels ? 0 : inset.bottom, 0],
     legend: { show: false },
     cursor: { show: false },
     scales: {
-      x: { time: false, range: () => endsOf(modelNow().days) },
+      x: { time: false, range: () => endsOf(modelNow().x) },
       y: { range: () => [modelNow().range.least, modelNow().range.greatest] },
     },
-    axes: [timeAxis(modelNow, ink, model.hasTimeLabels ? inset.bottom : 0), valueAxis(modelNow, ink, inset.left)],
+    axes: [xAxis(modelNow, ink, model.hasXLabels ? inset.bottom : 0), valueAxis(modelNow, ink, inset.left)],
     series: [{}, ...model.lines.map((line) => seriesFor(line, ink))],
   };
 }
@@ -85,13 +89,13 @@ function insets(host: HTMLElement, area: HTMLElement) {
   };
 }
 
-function endsOf(days: Float64Array): uPlot.Range.MinMax {
-  return [days[0] ?? 0, days[days.length - 1] ?? 1];
+function endsOf(x: Float64Array): uPlot.Range.MinMax {
+  return [x[0] ?? 0, x[x.length - 1] ?? 1];
 }
 
-function timeAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlot.Axis {
+function xAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlot.Axis {
   // A label of ten figures and its space.
-  const ticks = (plot: uPlot) => modelNow().timeTicks(Math.max(2, Math.floor(plot.width / (ink.fontPx * 7))));
+  const ticks = (plot: uPlot) => modelNow().xTicks(Math.max(2, Math.floor(plot.width / (ink.fontPx * 7))));
   return {
     ...axisInk(ink),
     size: sizePx,
@@ -103,8 +107,10 @@ function timeAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlo
 
 function valueAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlot.Axis {
   const ticks = (plot: uPlot) => {
-    const heightPx = plot.height - sizeOfTimeAxis(plot);
-    return valueTicks(modelNow().range, Math.max(2, Math.floor(heightPx / (ink.fontPx * 1.6))), { plus: true });
+    const heightPx = plot.height - sizeOfXAxis(plot);
+    return valueTicks(modelNow().range, Math.max(2, Math.floor(heightPx / (ink.fontPx * 1.6))), {
+      plus: modelNow().isSigned,
+    });
   };
   const look = axisInk(ink);
   return {
@@ -118,7 +124,7 @@ function valueAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPl
   };
 }
 
-const sizeOfTimeAxis = (plot: uPlot): number => {
+const sizeOfXAxis = (plot: uPlot): number => {
   const size = plot.axes[0]?.size;
   return typeof size === 'function' ? size(plot, [], 0, 0) : (size ?? 0);
 };
@@ -136,7 +142,7 @@ function axisInk(ink: PlotInk) {
 /** uPlot scales widths to the screen's pixels, but not dashes. */
 function seriesFor({ pattern, hue, weak }: PlotLine, ink: PlotInk): uPlot.Series {
   const widthPx = pattern === 'first' ? ink.dotPx : ink.thinPx;
-  const dashPx = pattern === 'first' ? [0, 2.6 * widthPx + 1] : [13, 5];
+  const dashPx = pattern === 'first' ? [0, 2.6 * widthPx + 1] : pattern === 'second' ? [13, 5] : [];
   return {
     stroke: ink[hue],
     width: widthPx,

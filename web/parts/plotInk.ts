@@ -2,6 +2,7 @@
 export interface PlotInk {
   readonly node: string;
   readonly perigee: string;
+  readonly ink: string;
   readonly grid: string;
   readonly label: string;
   readonly font: string;
@@ -18,6 +19,7 @@ export function inkOf(element: HTMLElement): PlotInk {
   return {
     node: token('--node'),
     perigee: token('--perigee'),
+    ink: token('--ink'),
     grid: token('--faint'),
     label: token('--soft'),
     font: `${style.fontSize} ${style.fontFamily}`,

@@ -3,24 +3,44 @@ import type { Range, Tick } from './plotScale';
 
 export interface PlotLine {
   readonly id: string;
+  /** NaN where there is nothing to draw. */
   readonly values: Float64Array;
-  /** By which method: first order is dotted, second order has long dashes. */
-  readonly pattern: 'first' | 'second';
+  /** By which method: first order is dotted, second order has long dashes, what needs no theory is solid. */
+  readonly pattern: 'first' | 'second' | 'geometry';
   /** What it is: hue and mark together, so that colour alone never says it. */
-  readonly hue: 'node' | 'perigee';
-  readonly mark: 'square' | 'diamond';
+  readonly hue: 'node' | 'perigee' | 'ink';
+  readonly mark: 'square' | 'diamond' | 'circle';
   /** Drawn pale: the value means little for this orbit. */
   readonly weak: boolean;
   /** Written at the line's end; the second part is dropped where there is little room. */
   readonly label: readonly [string, string];
 }
 
+/** A bound across the plot; the side beyond it is hatched. */
+export interface PlotLevel {
+  readonly id: string;
+  readonly at: number;
+  readonly beyond: 'above' | 'below';
+  readonly label: string;
+}
+
+/** A point of its own, such as the orbit at hand. */
+export interface PlotPoint {
+  readonly x: number;
+  readonly value: number;
+}
+
 export interface PlotModel {
-  readonly days: Float64Array;
+  /** Rising evenly: days of a span, or the element of a sweep. */
+  readonly x: Float64Array;
   readonly lines: readonly PlotLine[];
   readonly range: Range;
-  /** Ticks of the time axis, at most so many. */
-  readonly timeTicks: (most: number) => readonly Tick[];
+  readonly levels?: readonly PlotLevel[];
+  readonly point?: PlotPoint | null;
+  /** Ticks of the axis along the foot, at most so many. */
+  readonly xTicks: (most: number) => readonly Tick[];
   /** Written below the plot; the others of a stack only have the grid. */
-  readonly hasTimeLabels: boolean;
+  readonly hasXLabels: boolean;
+  /** Values are changes or directions: ticks are written with a plus too. */
+  readonly isSigned: boolean;
 }

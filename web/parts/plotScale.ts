@@ -33,6 +33,21 @@ export function valueRange(lines: readonly ArrayLike<number>[], smallest: number
   return { least: least - room, greatest: greatest + room };
 }
 
+/** The range that holds all values that are numbers, and with them those of the others that widen it to at most twice itself. */
+export function closeRange(lines: readonly ArrayLike<number>[], others: readonly number[], smallest: number): Range {
+  const known = lines.flatMap((line) => Array.from(line)).filter(Number.isFinite);
+  let [least, greatest] = known.length > 0 ? [Math.min(...known), Math.max(...known)] : [0, 0];
+  const reach = Math.max(greatest - least, smallest);
+  for (const other of others) {
+    if (other < least - reach || other > greatest + reach) continue;
+    least = Math.min(least, other);
+    greatest = Math.max(greatest, other);
+  }
+  const middle = (least + greatest) / 2;
+  const half = Math.max(greatest - least, smallest) * (0.5 + margin);
+  return { least: middle - half, greatest: middle + half };
+}
+
 /** The step of 1, 2 or 5 times a power of ten that puts at most `most` ticks on the range. */
 export function roundStep(width: number, most: number): number {
   const rough = width / Math.max(1, most);

@@ -3,6 +3,7 @@
  */
 import { batch, computed, type ReadonlySignal, type Signal, signal } from '@preact/signals';
 import {
+  type AbsentReading,
   absentReadings,
   type Candidate,
   canonicalText,
@@ -46,7 +47,7 @@ export interface OrbitDocument {
   readonly stale: ReadonlySignal<boolean>;
   readonly readings: ReadonlySignal<readonly Reading[]>;
   /** Readings that cannot be had, each with the reason. */
-  readonly absentReadings: ReadonlySignal<readonly { readonly label: string; readonly reason: string }[]>;
+  readonly absentReadings: ReadonlySignal<readonly AbsentReading[]>;
   readonly notices: ReadonlySignal<readonly Notice[]>;
   readonly fingerprint: ReadonlySignal<string | null>;
   /** True where the draft differs from what was saved. */

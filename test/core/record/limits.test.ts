@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { knownLimits, type LimitEntry, limitMargins, readLimits } from '../../../core/record/limits';
-import { limitInUnit, limitsSentence, limitText, marginText, storedLimitText } from '../../../core/record/limitWords';
+import { limitInUnit } from '../../../core/record/limitUnits';
+import { limitsSentence, limitText, marginText } from '../../../core/record/limitWords';
 import { readingsOf } from '../../../core/record/readings/readings';
+import { storedLimitText } from '../../../core/record/storedLimitText';
 import { candidateWith, resolved } from './candidates';
 
 const orbit = resolved({ perigeeAltitude: '575', apogeeAltitude: '603.2', inclination: '97.6' });

@@ -79,7 +79,7 @@ describe('the stack of plots', () => {
 
   it('writes the time only under the last', () => {
     const plots = driftPlots({ ...inputs, isRound: false });
-    expect(plots.map(({ model }) => model.hasTimeLabels)).toEqual([false, false, false, true]);
+    expect(plots.map(({ model }) => model.hasXLabels)).toEqual([false, false, false, true]);
   });
 
   it('draws perigee pale and says why on an orbit too round for it', () => {
