@@ -20,7 +20,7 @@ export interface SunPosition {
 const aberrationDeg = 0.00569;
 
 /** The astronomical unit, km: IAU 2012 resolution B2. */
-const astronomicalUnitKm = 149_597_870.7;
+export const astronomicalUnitKm = 149_597_870.7;
 
 /**
  * Apparent Sun. Source: Meeus, Astronomical Algorithms, 2nd edition, chapter 25, "Low accuracy",
