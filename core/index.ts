@@ -84,10 +84,12 @@ export {
 export type { Force } from './forces/force';
 export { highestZonalDegree, zonalForce } from './forces/zonal';
 export { type AveragedModel, type AveragedRates, averagedRates } from './mission/averagedRates';
+export { type CircularShadow, circularEclipseShare, eclipseFreeBetaRad } from './mission/circularEclipse';
 export { type ClosedFormDrift, closedFormDrift, type DriftLines } from './mission/closedFormDrift';
 export { elementsFromEquinoctial, equinoctialFromElements, type Sense, senseOf } from './mission/equinoctial';
 export type { GroundLine } from './mission/groundLines';
 export { type GroundTrack, type GroundTrackProblem, type GroundTrackRequest, groundTrack } from './mission/groundTrack';
+export { betaRad, type EclipseTimes, eclipse, LightError } from './mission/light';
 export { degPerRad, radPerDeg, secondsPerDay, twoPi, wrapPi, wrapTwoPi } from './numerics/angles';
 export type { KeplerianElements, MeanElements, OsculatingElements, StateVector, Theory } from './orbit/elements';
 export {
@@ -220,5 +222,11 @@ export {
 } from './record/units';
 export { smallEccentricity, warningsOf } from './record/warnings';
 export type { WorkingSymbol } from './record/workings/symbols';
-export type { Working, WorkingConstant, WorkingLine, WorkingValue } from './record/workings/working';
+export {
+  type Working,
+  type WorkingConstant,
+  type WorkingLine,
+  type WorkingValue,
+  workingDigits,
+} from './record/workings/working';
 export { workingOf } from './record/workings/workingOf';

@@ -44,7 +44,13 @@ export const group = (...terms: ExprLike[]): Expr => {
   return { kind: 'group', of: terms.length === 1 && only !== undefined ? expr(only) : add(...terms) };
 };
 
-const functions = { cos: Math.cos, sin: Math.sin, acos: Math.acos } as const;
+/** Exact at right angles, where rounding of π leaves 1e-16. */
+const zeroed = (value: number): number => (Math.abs(value) < 1e-15 ? 0 : value);
+const functions = {
+  cos: (rad: number) => zeroed(Math.cos(rad)),
+  sin: (rad: number) => zeroed(Math.sin(rad)),
+  acos: Math.acos,
+} as const;
 
 /** The value of the tree; an unknown symbol is a broken invariant. */
 export function evaluate(tree: Expr, values: Values): number {

@@ -6,24 +6,28 @@ import {
   type WorkingLine,
   type WorkingSymbol,
   type WorkingValue,
+  workingDigits,
 } from '../../core/index';
 import { FormulaMath } from '../parts/formulaMath';
 import { useScrollFocus } from '../parts/useScrollFocus';
-
-/** Digits a pocket calculator shows. */
-const digits = 10;
 
 const unitText = (unit: string): string => unit.replace(/^deg(?=\/|$)/, '°');
 
 function valueText({ symbol, value }: WorkingValue): string {
   const unit = unitText(symbol.unit);
-  const number = formatSignificant(value * symbol.perCore, digits);
+  const number = formatSignificant(value * symbol.perCore, workingDigits);
   if (unit === '') return number;
   return unit === '°' ? `${number}°` : `${number} ${unit}`;
 }
 
 function Glyph({ symbol }: { readonly symbol: WorkingSymbol }) {
-  return <mi>{symbol.glyph}</mi>;
+  if (symbol.sub === undefined) return <mi>{symbol.glyph}</mi>;
+  return (
+    <msub>
+      <mi>{symbol.glyph}</mi>
+      <mi>{symbol.sub}</mi>
+    </msub>
+  );
 }
 
 export function WorkingTables({ working }: { readonly working: Working }) {
@@ -124,7 +128,7 @@ function Formula({ children }: { readonly children: ComponentChildren }) {
 
 function NumberPutIn({ value }: { readonly value: WorkingValue }) {
   const { symbol } = value;
-  const number = formatSignificant(value.value * symbol.perCore, digits);
+  const number = formatSignificant(value.value * symbol.perCore, workingDigits);
   const text = symbol.unit === 'deg' ? `${number}°` : number;
   return /[−×]/.test(text) ? (
     <mrow>

@@ -55,11 +55,17 @@ function constantsOf(body: Body, ids: readonly SymbolId[]): WorkingParts['consta
   return Object.fromEntries(ids.map((id) => [id, constantOf(body, id)]));
 }
 
+/** The name of the set leads, once. */
+function sourceOf({ gravitySet, source }: Body): string {
+  const isNamed = source.replaceAll(' ', '').includes(gravitySet) || gravitySet === 'user';
+  return isNamed ? source : `${gravitySet}: ${source}`;
+}
+
 function constantOf(body: Body, id: SymbolId): { value: number; source: string } {
-  const ofSet = (value: number) => ({ value, source: `${body.gravitySet}: ${body.source}` });
+  const ofSet = (value: number) => ({ value, source: sourceOf(body) });
   const ofBody = (value: number | null) => {
     if (value === null) throw new Error(`Expected ${body.name} to have "${id}", got none`);
-    return { value, source: body.source };
+    return { value, source: sourceOf(body) };
   };
   switch (id) {
     case 'mu':

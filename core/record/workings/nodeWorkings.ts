@@ -1,7 +1,7 @@
 /** Workings of the node at the epoch and of the local time of either node. */
 import { meanSunRightAscensionRad } from '../../bodies/sun';
-import { twoPi, wrapTwoPi } from '../../numerics/angles';
-import { add, frac, group, mul, neg, num } from '../formula';
+import { degPerRad, twoPi, wrapTwoPi } from '../../numerics/angles';
+import { add, type Expr, frac, group, neg, num } from '../formula';
 import type { ReadingPoint } from '../readings/reading';
 import { buildWorking, noteOnly, type Working } from './working';
 
@@ -18,15 +18,18 @@ function localTimeWorking({ mean, epochJd }: ReadingPoint, node: 'ascending' | '
   const noon = node === 'ascending' ? 12 : 0;
   const hours = noon + ((mean.nodeRad - sun) * 24) / twoPi;
   const days = Math.floor(hours / 24);
-  const turn = days === 0 ? [] : [num(-24 * days)];
-  const angle = group('node', neg('sunAngle'));
+  const turn: Expr = days < 0 ? num(-24 * days) : neg(num(24 * days));
+  const terms = [...(noon === 0 ? [] : [num(noon)]), frac(group('node', neg('sunAngle')), 15)];
   return buildWorking({
-    inputs: { node: mean.nodeRad },
+    inputs: { node: mean.nodeRad * degPerRad },
     constants: {
-      sunAngle: { value: wrapTwoPi(sun), source: 'Right ascension of the mean Sun at the epoch, from its series.' },
+      sunAngle: {
+        value: wrapTwoPi(sun) * degPerRad,
+        source: 'Right ascension of the mean Sun at the epoch, from its series.',
+      },
     },
-    first: [['localTime', add(noon, frac(mul(12, angle), num(Math.PI, 'π')), ...turn)]],
+    first: [['localTime', add(...terms, ...(days === 0 ? [] : [turn]))]],
     result: 'localTime',
-    note: `Mean local time of the ${node} node: with both angles in degrees the fraction is their difference over 15.`,
+    note: `Mean local time of the ${node} node: 15° of right ascension an hour from the mean Sun, which stands at 12 h.`,
   });
 }

@@ -18,8 +18,8 @@ const oblateRate: LineSpec = ['k', mul(frac(3, 2), 'n', 'J2', pow(group(frac('R'
 
 const firstRate: Readonly<Record<RateId, Expr>> = {
   nodeRate: neg(mul('k', 'theta')),
-  perigeeRate: mul(frac('k', 2), group(mul(5, pow('theta', 2)), num(-1))),
-  anomalyRate: add('n', mul(frac(mul('k', 'eta'), 2), group(mul(3, pow('theta', 2)), num(-1)))),
+  perigeeRate: mul(frac('k', 2), group(mul(5, pow('theta', 2)), neg(1))),
+  anomalyRate: add('n', mul(frac(mul('k', 'eta'), 2), group(mul(3, pow('theta', 2)), neg(1)))),
 };
 
 /** First order: n, p, cos i, k and the rates asked for. */
@@ -59,7 +59,7 @@ const secondRate: Readonly<Record<RateId, readonly LineSpec[]>> = {
     ['nodeRate', mul('n', group('nodeJ2', 'nodeJ2Squared', 'nodeJ4'))],
   ],
   perigeeRate: [
-    ['perigeeJ2', mul(frac(3, 2), 'gamma2', group(mul(5, theta2), num(-1)))],
+    ['perigeeJ2', mul(frac(3, 2), 'gamma2', group(mul(5, theta2), neg(1)))],
     [
       'perigeeJ2Squared',
       mul(
@@ -79,7 +79,7 @@ const secondRate: Readonly<Record<RateId, readonly LineSpec[]>> = {
     ['perigeeRate', mul('n', group('perigeeJ2', 'perigeeJ2Squared', 'perigeeJ4'))],
   ],
   anomalyRate: [
-    ['anomalyJ2', mul(frac(3, 2), 'gamma2', group(mul(3, theta2), num(-1)))],
+    ['anomalyJ2', mul(frac(3, 2), 'gamma2', group(mul(3, theta2), neg(1)))],
     [
       'anomalyJ2Squared',
       mul(

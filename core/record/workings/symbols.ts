@@ -1,7 +1,12 @@
-/** Every symbol of the workings: glyph, name and the unit its value is shown in. */
+/**
+ * Every symbol of the workings: glyph, name and the unit its value is shown in. Angles in degrees that stand outside a
+ * cosine or sine are values in degrees, so that a calculator given the numbers shown follows.
+ */
 export interface WorkingSymbol {
   readonly id: string;
   readonly glyph: string;
+  /** Subscript of the glyph. */
+  readonly sub?: string;
   readonly name: string;
   /** Unit shown; a value times `perCore` is the number in it. Core units are km, s, rad. */
   readonly unit: string;
@@ -10,7 +15,7 @@ export interface WorkingSymbol {
 
 const deg = 180 / Math.PI;
 
-/** glyph, name, unit, and the factor from core units where it is not 1. */
+/** glyph (and its subscript behind a `_`), name, unit, and the factor from core units where it is not 1. */
 type Row = readonly [glyph: string, name: string, unit: string, perCore?: number];
 
 const rows = {
@@ -18,7 +23,7 @@ const rows = {
   a: ['a', 'semi-major axis', 'km'],
   e: ['e', 'eccentricity', ''],
   i: ['i', 'inclination', 'deg', deg],
-  node: ['Ω', 'node, right ascension', 'deg', deg],
+  node: ['Ω', 'node, right ascension', 'deg'],
   perigee: ['ω', 'argument of perigee', 'deg', deg],
   // the body
   mu: ['μ', 'gravitational parameter', 'km³/s²'],
@@ -29,7 +34,7 @@ const rows = {
   bodyRate: ['ω_b', 'rotation of the body', 'rad/s'],
   year: ['Y', 'tropical year', 's'],
   day: ['d', 'day', 's'],
-  sunAngle: ['α', 'right ascension of the Sun at the epoch', 'deg', deg],
+  sunAngle: ['α', 'right ascension of the Sun at the epoch', 'deg'],
   // on the way
   n: ['n', 'mean motion', 'rad/s'],
   p: ['p', 'semi-latus rectum', 'km'],
@@ -58,7 +63,7 @@ const rows = {
   nodalDay: ['Dₙ', 'nodal day', 's'],
   revolutions: ['N', 'revolutions a day', 'rev/day'],
   drift: ['τ̇', 'drift of local time', 's/s'],
-  shift: ['Δλ', 'westward shift a revolution', 'deg', deg],
+  shift: ['Δλ', 'westward shift a revolution', 'rad'],
   apsidal: ['T_ω', 'apsidal period', 's'],
   perigeeAltitude: ['hₚ', 'perigee altitude', 'km'],
   apogeeAltitude: ['hₐ', 'apogee altitude', 'km'],
@@ -69,15 +74,17 @@ const rows = {
   // the result once more, in people's units
   nodePerDay: ['ΔΩ', 'node drift in a day', 'deg/day'],
   perigeePerDay: ['Δω', 'perigee drift in a day', 'deg/day'],
-  minutes: ['T', 'the period', 'min'],
+  minutes: ['T_min', 'the period', 'min'],
   driftPerYear: ['Δτ', 'drift of local time in a year', 'min/yr'],
+  shiftDegrees: ['Δλ_°', 'westward shift a revolution', 'deg'],
   shiftKm: ['s', 'shift at the equator', 'km'],
-  apsidalDays: ['T_ω', 'apsidal period', 'd'],
+  apsidalDays: ['T_ω, d', 'apsidal period', 'd'],
 } as const satisfies Readonly<Record<string, Row>>;
 
 export type SymbolId = keyof typeof rows;
 
 export function workingSymbol(id: SymbolId): WorkingSymbol {
-  const [glyph, name, unit, perCore]: Row = rows[id];
-  return { id, glyph, name, unit, perCore: perCore ?? 1 };
+  const [written, name, unit, perCore]: Row = rows[id];
+  const [glyph = '', sub] = written.split('_');
+  return { id, glyph, ...(sub === undefined ? {} : { sub }), name, unit, perCore: perCore ?? 1 };
 }

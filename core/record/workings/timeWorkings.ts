@@ -1,6 +1,6 @@
 /** Workings of periods, revolutions and the ground below. */
 import { secularRates } from '../../orbit/secularRates';
-import { add, frac, group, mul, neg } from '../formula';
+import { add, frac, group, mul, neg, num } from '../formula';
 import type { ReadingPoint } from '../readings/reading';
 import { rotationOf } from '../readings/time';
 import { plainWorking, rateWorking, twoPiExpr } from './build';
@@ -55,11 +55,12 @@ export const timeWorkings = {
       closing: [
         nodalPeriod,
         ['shift', mul(group('bodyRate', neg('nodeRate')), 'nodal')],
+        ['shiftDegrees', mul('shift', frac(180, num(Math.PI, 'π')))],
         ['shiftKm', mul('shift', 'Req')],
       ],
       constants: ['bodyRate', 'Req'],
       result: 'shift',
-      note: 'How far the body turns under the node in one nodal revolution; the angle in rad in the last line.',
+      note: 'How far the body turns under the node in one nodal revolution; at the equator, the angle in rad times the radius.',
     }),
 } as const;
 

@@ -1,9 +1,12 @@
 /**
  * A working: the formula of a reading line by line, each line's value worked out from the lines
- * above it, so that a pocket calculator can follow.
+ * above it as they are shown, so that a pocket calculator can follow, differences of near-equal numbers included.
  */
 import { type Expr, evaluate, type Values } from '../formula';
 import { type SymbolId, type WorkingSymbol, workingSymbol } from './symbols';
+
+/** Significant digits of every number shown: those of a pocket calculator. */
+export const workingDigits = 10;
 
 export interface WorkingValue {
   readonly symbol: WorkingSymbol;
@@ -26,6 +29,7 @@ export interface Working {
   readonly secondLines: readonly WorkingLine[];
   /** The symbol of the line that is the reading; lines below it say it in people's units. */
   readonly result: string | null;
+  /** The reading itself, without the rounding of the lines. */
   readonly firstOrder: number;
   /** Null where the reading has no order. */
   readonly secondOrder: number | null;
@@ -59,8 +63,8 @@ export function buildWorking(parts: WorkingParts): Working {
     lines,
     secondLines,
     result,
-    firstOrder: resultOf(lines, result),
-    secondOrder: second === undefined ? null : resultOf(secondLines, result),
+    firstOrder: exactResult(parts.first, given, result),
+    secondOrder: second === undefined ? null : exactResult(second, given, result),
     note,
   };
 }
@@ -84,16 +88,25 @@ function keyed<T>(record: Partial<Record<SymbolId, T>>): [SymbolId, T][] {
 }
 
 function evaluatedLines(specs: readonly LineSpec[], given: Values): WorkingLine[] {
-  const values: Record<string, number> = { ...given };
+  const shown: Record<string, number> = {};
+  for (const [id, value] of Object.entries(given)) shown[id] = asShown(workingSymbol(id as SymbolId), value);
   return specs.map(([id, expr]) => {
-    const value = evaluate(expr, values);
-    values[id] = value;
-    return { symbol: workingSymbol(id), expr, value };
+    const symbol = workingSymbol(id);
+    const value = evaluate(expr, shown);
+    shown[id] = asShown(symbol, value);
+    return { symbol, expr, value };
   });
 }
 
-function resultOf(lines: readonly WorkingLine[], id: SymbolId): number {
-  const line = lines.find(({ symbol }) => symbol.id === id);
-  if (!line) throw new Error(`Expected a line for "${id}" in the working, got none`);
-  return line.value;
+/** The value of the digits on screen. */
+function asShown({ perCore }: WorkingSymbol, value: number): number {
+  return Number.isFinite(value) ? Number((value * perCore).toPrecision(workingDigits)) / perCore : value;
+}
+
+function exactResult(specs: readonly LineSpec[], given: Values, result: SymbolId): number {
+  const values: Record<string, number> = { ...given };
+  for (const [id, expr] of specs) values[id] = evaluate(expr, values);
+  const value = values[result];
+  if (value === undefined) throw new Error(`Expected a line for "${result}" in the working, got none`);
+  return value;
 }
