@@ -8,9 +8,10 @@ import { type PictureId, pictureIds } from '../state/picture';
 import './pictures.css';
 
 const views: Readonly<Record<PictureId, FunctionComponent<{ readonly orbit: ResolvedOrbit }>>> = {
+  chart: later(async () => (await import('./chart/chartView')).ChartView),
   orbit: later(async () => (await import('./orbit/orbitView')).OrbitView),
 };
-const names: Readonly<Record<PictureId, string>> = { orbit: 'Orbit' };
+const names: Readonly<Record<PictureId, string>> = { chart: 'Rates', orbit: 'Orbit' };
 
 export function Pictures() {
   const { document, picture } = useApp();

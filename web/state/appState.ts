@@ -57,7 +57,7 @@ export async function createAppState({ store, offline, page, newId }: AppStatePa
       document.orbit,
       computed(() => preferences.values.value.spanDays),
     ),
-    picture: signal<PictureId>('orbit'),
+    picture: signal<PictureId>('chart'),
     openWorking: signal(null),
   };
 }
