@@ -10,15 +10,27 @@ const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
 /** What conditions are called and how they are read: none of it is needed for an orbit that has none. */
 const conditions = /[\\/]core[\\/]record[\\/]conditions[\\/](kinds|readConditions)/;
 
-/** Fetched with the first plot; what draws into the canvas comes after it. */
-const plots = /[\\/]web[\\/]parts[\\/](plot(?!Canvas|Ink)|usePlotCanvas|useCursorDrag|useHeights)/;
-
 /** Fetched when a condition, a chart or the book asks for it. */
 const onDemand =
   /[\\/]core[\\/](design|forces|mission[\\/](averagedRates|equinoctial|gaussAverage|oblateness|orbitBasis)|numerics[\\/](bracket|linear|newton|roots)|record[\\/]conditions[\\/]settleOrbit)/;
 
 // Core is pure: importing its table of contents needs none of the files that are not used from it.
 const pureCore = { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] };
+
+interface ModuleGraph {
+  getModuleInfo(id: string): { readonly isEntry: boolean; readonly importers: readonly string[] } | null;
+}
+
+/** Whether a chain of imports that run at once leads to the module from the page's entry. */
+function isOfFirstPage(id: string, graph: ModuleGraph): boolean {
+  const seen = new Set([id]);
+  for (const each of seen) {
+    const info = graph.getModuleInfo(each);
+    if (info?.isEntry) return true;
+    for (const importer of info?.importers ?? []) seen.add(importer);
+  }
+  return false;
+}
 
 export default defineConfig({
   root: `${root}/web`,
@@ -39,7 +51,7 @@ export default defineConfig({
     target: 'es2022',
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
-    // What several places share is one file: fewer requests, and it packs better than many small ones.
+    // What the first page and other places share is one file: fewer requests, and it packs better than many small ones.
     rolldownOptions: {
       treeshake: pureCore,
       output: {
@@ -50,9 +62,12 @@ export default defineConfig({
             // Solving serves several places, none of them at the first page.
             { name: 'design', test: onDemand, priority: 2 },
             { name: 'conditions', test: conditions, priority: 2 },
-            { name: 'plots', test: plots, priority: 2 },
-            { name: 'drawing', test: /[\\/]web[\\/]parts[\\/]drawing/, priority: 2 },
-            { name: 'shared', minShareCount: 2, priority: 1 },
+            {
+              name: (id, graph) => (isOfFirstPage(id, graph) ? 'shared' : null),
+              debugName: 'shared',
+              minShareCount: 2,
+              priority: 1,
+            },
           ],
         },
       },

@@ -1,4 +1,5 @@
 /** Wishes stated as conditions, what each settles, and what came of them. */
+import { useRef, useState } from 'preact/hooks';
 import {
   type ConditionEntry,
   conditionWords,
@@ -7,6 +8,7 @@ import {
   readConditions,
   type Settlement,
 } from '../../core/index';
+import { later } from '../parts/later';
 import { useApp } from '../state/appContext';
 import { ConditionRow } from './conditionRow';
 import { Solutions } from './solutions';
@@ -31,33 +33,49 @@ export function ConditionPanel() {
 
 type Kind = ConditionEntry['kind'];
 
+const OtherOrbitPicker = later(async () => (await import('./otherOrbit')).OtherOrbitPicker);
+
 function AddCondition({ conditions }: { readonly conditions: readonly ReadCondition[] }) {
   const { document, store } = useApp();
+  const [isPicking, setPicking] = useState(false);
+  const select = useRef<HTMLSelectElement>(null);
   const present = conditions.flatMap(({ entry }) => (entry ? [entry] : []));
-  // Taking the same wish twice would be refused; a rate or an altitude of another body plane is added from the Book.
+  // Taking the same wish twice would be refused.
   const offered = (Object.keys(conditionWords) as Kind[]).filter(
-    (kind) => kind !== 'sameNodeRate' && !present.some((entry) => entry.kind === kind),
+    (kind) => !present.some((entry) => entry.kind === kind),
   );
+  const add = (kind: Kind) => {
+    if (kind === 'sameNodeRate') setPicking(true);
+    else document.conditions.add(newCondition(kind, present));
+  };
+  const stopPicking = () => {
+    setPicking(false);
+    select.current?.focus();
+  };
   return (
-    <label class="add-condition">
-      <span class="hidden-visually">Add a condition</span>
-      <select
-        value=""
-        disabled={store.tabs.editorElsewhere.value}
-        onChange={(event) => {
-          const { value } = event.currentTarget;
-          event.currentTarget.value = '';
-          if (value) document.conditions.add(newCondition(value as Kind, present));
-        }}
-      >
-        <option value="">+ condition</option>
-        {offered.map((kind) => (
-          <option key={kind} value={kind}>
-            {conditionWords[kind].label}
-          </option>
-        ))}
-      </select>
-    </label>
+    <>
+      <label class="add-condition">
+        <span class="hidden-visually">Add a condition</span>
+        <select
+          ref={select}
+          value=""
+          disabled={store.tabs.editorElsewhere.value}
+          onChange={(event) => {
+            const { value } = event.currentTarget;
+            event.currentTarget.value = '';
+            if (value) add(value as Kind);
+          }}
+        >
+          <option value="">+ condition</option>
+          {offered.map((kind) => (
+            <option key={kind} value={kind}>
+              {kind === 'sameNodeRate' ? `${conditionWords[kind].label} …` : conditionWords[kind].label}
+            </option>
+          ))}
+        </select>
+      </label>
+      {isPicking && <OtherOrbitPicker present={present} onClose={stopPicking} />}
+    </>
   );
 }
 

@@ -17,9 +17,9 @@ import type { SweepRange } from '../../state/sweepChoice';
 import type { SweepShown } from './sweepModel';
 import { type ReadRange, readRange } from './sweepRange';
 
-/** Places of a sweep; heights along the orbit cost a hundred times the work of a rate. */
+/** Places of a sweep; a height along the orbit, or conditions that cannot be met, cost a hundred times the work of a rate. */
 const mostPlaces = 201;
-const mostHeights = 51;
+const mostCostlyPlaces = 61;
 
 export interface SweepInputs {
   readonly candidate: Candidate;
@@ -44,7 +44,8 @@ export interface SweepDrawn {
 
 export function drawSweep(inputs: SweepInputs): SweepDrawn {
   const { candidate, orbit, id, reading, element, range, elementUnit } = inputs;
-  const most = id === 'leastHeight' || id === 'greatestHeight' ? mostHeights : mostPlaces;
+  const isCostly = id === 'leastHeight' || id === 'greatestHeight' || candidate.conditions.length > 0;
+  const most = isCostly ? mostCostlyPlaces : mostPlaces;
   const read = readRange({ range, element, point: orbit, unit: elementUnit, most });
   const reason = settledReason(candidate, element);
   if (!read.ok || reason !== '' || !reading) return { read, reason, shown: null };

@@ -2,6 +2,7 @@
 import { useMemo, useState } from 'preact/hooks';
 import { type ResolvedOrbit, sweepSentence, sweptChanges, sweptWords } from '../../../core/index';
 import { Plot } from '../../parts/plot';
+import { quantityText, type ReadingText } from '../../parts/readingText';
 import { useApp } from '../../state/appContext';
 import { takeElements } from '../../state/entryActions';
 import { SweepChoices } from './sweepChoices';
@@ -42,7 +43,7 @@ function SweepFigure({ shown, isStale }: FigureProps) {
   const own = model.point?.x ?? 0;
   const sample = nearestSample(shown.grid, held?.element === element ? held.value : own);
   const { place } = sweepRow(shown, sample);
-  const name = `${shown.writing.label} against ${sweptWords[element].label.toLowerCase()}`;
+  const name = figureName(shown);
   return (
     <div class={isStale ? 'is-stale' : ''}>
       <figure class="plots sweep-figure">
@@ -66,6 +67,14 @@ function SweepFigure({ shown, isStale }: FigureProps) {
       <SweepTable shown={shown} />
     </div>
   );
+}
+
+/** With the units of both axes. */
+function figureName({ reading, writing, sweep }: SweepShown): string {
+  const { label, quantity } = sweptWords[sweep.request.element];
+  const inUnit = (name: string, { unit }: ReadingText) => (unit === '' ? name : `${name}, ${unit}`);
+  const against = inUnit(label.toLowerCase(), quantityText(quantity, 0, writing.elementUnit));
+  return `${inUnit(writing.label, quantityText(reading.quantity, 0, writing.readingUnit))}, against ${against}`;
 }
 
 function TakePoint({ shown, sample, isStale }: FigureProps & { readonly sample: number }) {
