@@ -1,6 +1,7 @@
 /**
  * The inverse of reading: writes an orbit into the texts of a form, for a switch of form, unit,
- * frame or node. Enough digits are kept for a to 0.1 m, angles to 1e-7° and e to 1e-9.
+ * frame or node. As few digits as keep lengths to 0.1 m, e to 1e-9, angles to 1e-6°, the node to 7.5e-6° or 1.5 ms,
+ * a state to mm and µm/s, and all of them on their step of the fingerprint: the noise of a conversion is not written.
  */
 import { isoFromJulianDate } from '../bodies/julianDate';
 import { degPerRad, wrapTwoPi } from '../numerics/angles';
@@ -13,6 +14,7 @@ import type { EntryForm, FieldId, OrbitEntry } from './candidate';
 import { localTimeText } from './entry/localTimeText';
 import { apogeeAltitudeKm, kmPerLengthUnit, perigeeAltitudeKm } from './entry/shape';
 import { stateFieldIds } from './entry/stateVector';
+import { onSameStep } from './fingerprint';
 import type { ResolvedOrbit } from './resolved';
 
 /** How the texts are to be understood: the entry's tags without its form and texts. */
@@ -85,7 +87,7 @@ function stateTexts(orbit: ResolvedOrbit, ofDate: StateVector, tags: EntryTags):
   const [factor, shift] = tags.stateUnit === 'm' ? [1000, 3] : [1, 0];
   const numbers = [...state.positionKm, ...state.velocityKmPerS];
   return Object.fromEntries(
-    stateFieldIds.map((field, index) => [field, trimmed((numbers[index] ?? 0) * factor, (index < 3 ? 7 : 10) - shift)]),
+    stateFieldIds.map((field, index) => [field, trimmed((numbers[index] ?? 0) * factor, (index < 3 ? 6 : 9) - shift)]),
   );
 }
 
@@ -102,16 +104,29 @@ function inTypedFrame({ epochJd }: ResolvedOrbit, elements: KeplerianElements, t
 
 function altitudeTexts({ body }: ResolvedOrbit, elements: KeplerianElements, tags: EntryTags) {
   const perUnit = kmPerLengthUnit(tags);
-  return {
-    perigeeAltitude: trimmed(perigeeAltitudeKm(body, elements) / perUnit, 6),
-    apogeeAltitude: trimmed(apogeeAltitudeKm(body, elements) / perUnit, 6),
+  const [perigee, apogee] = [perigeeAltitudeKm(body, elements), apogeeAltitudeKm(body, elements)];
+  const written = (toleranceKm: number) =>
+    [perigee, apogee].map((km) => shortest(km / perUnit, { tolerance: toleranceKm / perUnit }));
+  const keeps = ([low = '', high = '']: readonly string[]) => {
+    const change = [Number(low) * perUnit - perigee, Number(high) * perUnit - apogee] as const;
+    const semiMajorAxisKm = elements.semiMajorAxisKm + (change[0] + change[1]) / 2;
+    const axisTimesE = elements.semiMajorAxisKm * elements.eccentricity + (change[1] - change[0]) / 2;
+    return (
+      onSameStep(semiMajorAxisKm, elements.semiMajorAxisKm, 1e-3) &&
+      onSameStep(axisTimesE / semiMajorAxisKm, elements.eccentricity, 1e-6)
+    );
   };
+  const short = written(1e-4);
+  const [perigeeAltitude = '', apogeeAltitude = ''] = keeps(short) ? short : written(1e-6);
+  return { perigeeAltitude, apogeeAltitude };
 }
 
 function shapeTexts(elements: KeplerianElements, tags: EntryTags) {
+  const perUnit = kmPerLengthUnit(tags);
+  const onGrid = { tolerance: 1e-4 / perUnit, step: 1e-3 / perUnit };
   return {
-    semiMajorAxis: trimmed(elements.semiMajorAxisKm / kmPerLengthUnit(tags), 5),
-    eccentricity: trimmed(elements.eccentricity, 10),
+    semiMajorAxis: shortest(elements.semiMajorAxisKm / perUnit, onGrid),
+    eccentricity: shortest(elements.eccentricity, { tolerance: 1e-9, step: 1e-6 }),
   };
 }
 
@@ -119,18 +134,36 @@ function orientationTexts({ epochJd }: ResolvedOrbit, elements: KeplerianElement
   const node = tags.nodeForm === 'ltdn' ? 'descending' : 'ascending';
   const clock = tags.nodeForm !== 'raan' && epochJd !== null;
   return {
-    inclination: trimmed(elements.inclinationRad * degPerRad, 8),
+    inclination: shortest(elements.inclinationRad * degPerRad, { tolerance: 1e-6, step: angleStep }),
     node: clock
-      ? localTimeText(localTimeOfNodeH(elements.nodeRad, epochJd, { node, sun: tags.sun }))
-      : degreesText(elements.nodeRad),
+      ? nodeTimeText(elements.nodeRad, localTimeOfNodeH(elements.nodeRad, epochJd, { node, sun: tags.sun }))
+      : degreesText(elements.nodeRad, 7.5e-6),
     perigee: degreesText(elements.perigeeRad),
     meanAnomaly: degreesText(elements.meanAnomalyRad),
   };
 }
 
-function degreesText(rad: number): string {
-  const text = trimmed(wrapTwoPi(rad) * degPerRad, 8);
+const angleStep = 1e-4;
+
+/** An hour is 15° of the node. */
+function nodeTimeText(nodeRad: number, hours: number): string {
+  const degrees = nodeRad * degPerRad;
+  return localTimeText(hours, (written) => onSameStep(degrees + (written - hours) * 15, degrees, angleStep));
+}
+
+function degreesText(rad: number, tolerance = 1e-6): string {
+  const text = shortest(wrapTwoPi(rad) * degPerRad, { tolerance, step: angleStep });
   return text === '360' ? '0' : text;
+}
+
+/** As few decimals as come within the tolerance and stay on the same step of the fingerprint. */
+function shortest(value: number, { tolerance, step }: { tolerance: number; step?: number }): string {
+  for (let digits = 0; digits < 12; digits++) {
+    const text = trimmed(value, digits);
+    const isNear = Math.abs(Number(text) - value) <= tolerance;
+    if (isNear && (step === undefined || onSameStep(Number(text), value, step))) return text;
+  }
+  return trimmed(value, 12);
 }
 
 /** Fixed digits without trailing zeros, and never "-0". */

@@ -83,6 +83,11 @@ function angleSteps(rad: number): number {
   return count < 0 ? count + turn : count;
 }
 
+/** Whether two values fall on the same step, of 1 m, 1e-6 or 1e-4 of a degree. */
+export function onSameStep(value: number, other: number, step: number): boolean {
+  return steps(value, step) === steps(other, step);
+}
+
 function steps(value: number, step: number): number {
   const tenThousandths = Math.round((value / step) * 1e4);
   return Math.floor((tenThousandths + 5_000) / 10_000);

@@ -4,6 +4,7 @@ import { gravitySets } from '../../../core/bodies/earth';
 import { degPerRad, wrapPi } from '../../../core/numerics/angles';
 import type { EntryForm } from '../../../core/record/candidate';
 import { type EntryTags, entryFromOrbit } from '../../../core/record/entryFromOrbit';
+import { fingerprint } from '../../../core/record/fingerprint';
 import type { ResolvedOrbit } from '../../../core/record/resolved';
 import { resolved } from './candidates';
 
@@ -40,15 +41,15 @@ function there(orbit: ResolvedOrbit, form: EntryForm, how: EntryTags): ResolvedO
   return resolved(written.texts, { form, ...how });
 }
 
-/** a to 0.1 m, e to 1e-9; angles to 1e-7°, where e and sin i leave perigee and node that well defined. */
+/** a to 0.1 m, e to 2e-8; angles to 1e-5°, where e and sin i leave perigee and node that well defined. */
 function expectSame(back: ResolvedOrbit, orbit: ResolvedOrbit, form: EntryForm): void {
   const { mean } = orbit;
   const spread =
     form === 'elements' ? 1 : 1 / Math.min(mean.eccentricity, Math.sin(mean.inclinationRad)) / (1 - mean.eccentricity);
-  expect(Math.abs(back.mean.semiMajorAxisKm - mean.semiMajorAxisKm)).toBeLessThan(1e-4);
-  expect(Math.abs(back.mean.eccentricity - mean.eccentricity)).toBeLessThan(1e-9);
+  expect(Math.abs(back.mean.semiMajorAxisKm - mean.semiMajorAxisKm)).toBeLessThan(1.5e-4);
+  expect(Math.abs(back.mean.eccentricity - mean.eccentricity)).toBeLessThan(2e-8);
   for (const key of ['inclinationRad', 'nodeRad', 'perigeeRad', 'meanAnomalyRad'] as const) {
-    expect(Math.abs(wrapPi(back.mean[key] - mean[key])) * degPerRad, key).toBeLessThan(1e-7 * Math.max(1, spread));
+    expect(Math.abs(wrapPi(back.mean[key] - mean[key])) * degPerRad, key).toBeLessThan(1e-5 * Math.max(1, spread));
   }
 }
 
@@ -93,6 +94,45 @@ describe('writing an orbit into another form', () => {
     expect(written).toMatchObject({
       ok: true,
       texts: { perigeeAltitude: '550', apogeeAltitude: '561.5', inclination: '97.6', node: '120', perigee: '0' },
+    });
+  });
+
+  it('keeps the fingerprint in mean elements, whatever the orbit', () => {
+    fc.assert(
+      fc.property(orbits, fc.constantFrom('altitudes', 'elements'), tags, (orbit, form, how) => {
+        const direct: EntryTags = { ...how, elementsAre: 'mean', frame: 'meanOfDate' };
+        expect(fingerprint(there(orbit, form, direct))).toBe(fingerprint(orbit));
+      }),
+      { numRuns: 300 },
+    );
+  });
+
+  it('writes no noise of a conversion: a round orbit is round again after any walk through the forms', () => {
+    const texts = {
+      perigeeAltitude: '561',
+      apogeeAltitude: '575.25',
+      inclination: '97.679',
+      node: '247.5',
+      perigee: '90',
+    };
+    let orbit = resolved({ ...texts, meanAnomaly: '0', epoch: '2027-03-20T10:30:00Z' });
+    for (const [form, how] of [
+      ['state', {}],
+      ['altitudes', { nodeForm: 'ltan' }],
+      ['elements', { frame: 'j2000' }],
+      ['altitudes', { elementsAre: 'osculating' }],
+      ['elements', { nodeForm: 'ltdn', sun: 'apparent' }],
+    ] as const) {
+      orbit = there(orbit, form, { ...plain, ...how });
+    }
+    expect(entryFromOrbit(orbit, 'altitudes', plain)).toMatchObject({ texts: { ...texts, meanAnomaly: '0' } });
+  });
+
+  it('writes a round local time round', () => {
+    const orbit = resolved({ node: '10:30', epoch: '2027-03-20T10:30:00Z' }, { nodeForm: 'ltdn' });
+    const angle = there(orbit, 'elements', plain);
+    expect(entryFromOrbit(angle, 'altitudes', { ...plain, nodeForm: 'ltdn' })).toMatchObject({
+      texts: { node: '10:30' },
     });
   });
 
