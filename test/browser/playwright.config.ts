@@ -11,6 +11,11 @@ export default defineConfig({
   workers: 2,
   fullyParallel: false,
   timeout: 60_000,
+  projects: [
+    { name: 'app', testIgnore: /speed\.spec/ },
+    // What is timed runs when nothing else does.
+    { name: 'speed', testMatch: /speed\.spec/, workers: 1, dependencies: ['app'] },
+  ],
   reporter: [
     ['line'],
     ['json', { outputFile: process.env['PLAYWRIGHT_JSON_OUTPUT_FILE'] ?? `${cache}/reports/browser.json` }],
