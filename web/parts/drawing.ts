@@ -40,8 +40,9 @@ export function niceTicks(low: number, high: number, count: number): number[] {
   const rough = (high - low) / count;
   const power = 10 ** Math.floor(Math.log10(rough));
   const step = ([1, 2, 5, 10].find((each) => each * power >= rough) ?? 10) * power;
-  const first = Math.ceil(low / step);
-  const last = Math.floor(high / step);
+  // An end of the range that is a tick but for rounding counts as one.
+  const first = Math.ceil(low / step - 1e-9);
+  const last = Math.floor(high / step + 1e-9);
   return Array.from({ length: last - first + 1 }, (_, k) => Number(((first + k) * step).toPrecision(12)));
 }
 

@@ -17,10 +17,12 @@ export function stepped(text: string, step: number, count: number, within?: read
   const next = (number.value + step * count).toFixed(decimals);
   if (within && (Number(next) < within[0] || Number(next) > within[1])) return null;
   const plain = Number(next) === 0 ? next.replace('-', '') : next;
-  return usesComma(text) ? plain.replace('.', ',') : plain;
+  const typed = usesComma(text) ? plain.replace('.', ',') : plain;
+  // "1,500" could be thousands; one more decimal leaves no doubt.
+  return readNumber(typed).ok ? typed : `${typed}0`;
 }
 
-const clockPattern = /^\s*(\d{1,2}):?(\d{2})(?::(\d{2}(?:[.,]\d+)?))?\s*$/;
+const clockPattern = /^\s*(\d{1,2})(?:\s*[:hH]\s*)?(\d{2})(?::(\d{2}(?:[.,]\d+)?))?\s*$/;
 
 /** The same for a local time of day, by minutes, wrapping at midnight; decimal hours become a clock. */
 export function steppedClock(text: string, minutes: number): string | null {
