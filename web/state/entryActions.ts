@@ -5,9 +5,10 @@
 import { batch } from '@preact/signals';
 import {
   type BodyId,
+  type Candidate,
+  type ConditionEntry,
   type EntryForm,
   entryFromOrbit,
-  type FieldId,
   type InputFrame,
   type KeplerianElements,
   kmPerLengthUnit,
@@ -66,18 +67,36 @@ export function switchNodeForm(document: OrbitDocument, nodeForm: NodeForm): voi
   retag(document, { nodeForm });
 }
 
-/** The lengths typed are rewritten one by one, whether or not the rest of the entry is good. */
+/** The lengths typed, those of conditions too, are rewritten one by one, whether or not the rest of the entry is good. */
 export function switchLengthUnit(document: OrbitDocument, lengthUnit: OrbitEntry['lengthUnit']): void {
-  const { entry } = document.draft.value;
+  const { entry, conditions } = document.draft.value;
   if (entry.lengthUnit === lengthUnit) return;
   const factor = kmPerLengthUnit(entry) / kmPerLengthUnit({ lengthUnit });
-  const lengths: readonly FieldId[] = ['perigeeAltitude', 'apogeeAltitude', 'semiMajorAxis'];
-  const texts: Partial<Record<FieldId, string>> = {};
-  for (const field of lengths) {
-    const number = readNumber(entry.texts[field]);
-    if (number.ok) texts[field] = String(Number((number.value * factor).toFixed(6)));
-  }
-  document.setTags({ lengthUnit }, texts);
+  const rewritten = (text: string): string => {
+    const number = readNumber(text);
+    return number.ok ? String(Number((number.value * factor).toFixed(6))) : text;
+  };
+  const { perigeeAltitude, apogeeAltitude, semiMajorAxis } = entry.texts;
+  const lengths = Object.entries({ perigeeAltitude, apogeeAltitude, semiMajorAxis });
+  batch(() => {
+    document.setTags({ lengthUnit }, Object.fromEntries(lengths.map(([field, text]) => [field, rewritten(text)])));
+    for (const [place, stored] of conditions.entries()) {
+      if (!isAltitude(stored)) continue;
+      const texts = { ...stored.texts, altitude: rewritten(stored.texts.altitude) };
+      document.conditions.change(place, { ...stored, texts });
+    }
+  });
+}
+
+type AltitudeCondition = ConditionEntry & { readonly texts: { readonly altitude: string } };
+
+/** Looked at by hand, since the words of the conditions are fetched only where some are shown. */
+function isAltitude(
+  stored: Candidate['conditions'][number],
+): stored is Candidate['conditions'][number] & AltitudeCondition {
+  const texts = stored['texts'] as ConditionEntry['texts'] | null | undefined;
+  const isLength = stored['kind'] === 'perigeeAltitude' || stored['kind'] === 'apogeeAltitude';
+  return isLength && typeof texts?.altitude === 'string';
 }
 
 /** Local times and the frames of the Earth do not exist elsewhere: the node goes back to an angle of date. */

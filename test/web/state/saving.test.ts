@@ -102,7 +102,7 @@ describe('a conflict', () => {
     const app = await startSaved();
     const theirs = app.document.draft.value;
     const text = { ...theirs, entry: { ...theirs.entry, texts: { ...theirs.entry.texts, inclination: '50' } } };
-    valueIn(await app.store.book.save(text, { note: 'theirs', basedOn: 1 }));
+    expect(await app.store.book.save(text, { note: 'theirs', basedOn: 1 })).toMatchObject({ ok: true });
     type(app, '99');
     return app;
   };
@@ -176,7 +176,7 @@ describe('discarding changes', () => {
 
   it('goes back to the revision that the typing started from, not to a later one', async () => {
     const app = await startSaved();
-    valueIn(await app.store.book.rename(app.document.draft.value.id, 'Theirs'));
+    expect(await app.store.book.rename(app.document.draft.value.id, 'Theirs')).toMatchObject({ ok: true });
     type(app, '99');
     await app.saving.discardChanges();
     expect(app.document.draft.value.name).toBe('New orbit');

@@ -58,12 +58,12 @@ export async function startApp(onStore: (store: Store) => Promise<unknown> = asy
   const open = async (): Promise<AppState> => {
     const store = await openStore({ clock: tickingClock(), newId });
     await onStore(store);
-    const offline = {
-      status: signal('unsupported'),
-      updateWaiting: signal(false),
-      applyUpdate: async () => false,
-    } as const;
-    return createAppState({ store, newId, offline, page: fakePage() });
+    return createAppState({
+      store,
+      newId,
+      offline: { status: signal('unsupported'), updateWaiting: signal(false), applyUpdate: async () => false },
+      page: fakePage(),
+    });
   };
   return { app: await open(), again: open };
 }
