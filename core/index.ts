@@ -1,10 +1,18 @@
 /** Table of contents of all that is public. */
 
+export {
+  type AtmosphereLayer,
+  airDensityKgPerM3,
+  atmosphereLayers,
+  type DensityLevel,
+  densityFactor,
+} from './bodies/atmosphere';
 export { bodies } from './bodies/bodies';
 export type { Body } from './bodies/body';
 export { type CustomBodyInput, customBody } from './bodies/customBody';
 export { gravitySets } from './bodies/earth';
 export { isoFromJulianDate, type JulianDateResult, julianDateFromIso, seriesSpan } from './bodies/julianDate';
+export { type MoonPosition, moonPosition } from './bodies/moonPosition';
 export { type Matrix3, nodePrecessionRadPerS, precessionMatrix, transform } from './bodies/precession';
 export { meanSiderealTimeRad } from './bodies/siderealTime';
 export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPosition } from './bodies/sun';
@@ -81,7 +89,10 @@ export {
   type TrackSpacing,
   trackSpacingAt,
 } from './design/trackSpacing';
+export { ballisticKgPerM2, type DragInput, type DragOptions, type DragShape, dragForce } from './forces/drag';
 export type { Force } from './forces/force';
+export { moonPlace, type SkyPlace, smoothedPlace, sunPlace } from './forces/skyPlaces';
+export { moonForce, sunForce, sunMuKm3PerS2, type ThirdBody, thirdBodyForce } from './forces/thirdBody';
 export { highestZonalDegree, zonalForce } from './forces/zonal';
 export { type AveragedModel, type AveragedRates, averagedRates } from './mission/averagedRates';
 export { type CircularShadow, circularEclipseShare, eclipseFreeBetaRad } from './mission/circularEclipse';
@@ -89,7 +100,30 @@ export { type ClosedFormDrift, closedFormDrift, type DriftLines } from './missio
 export { elementsFromEquinoctial, equinoctialFromElements, type Sense, senseOf } from './mission/equinoctial';
 export type { GroundLine } from './mission/groundLines';
 export { type GroundTrack, type GroundTrackProblem, type GroundTrackRequest, groundTrack } from './mission/groundTrack';
+export type { LeftOutForce } from './mission/historyForces';
+export {
+  type HistoryField,
+  type HistoryForces,
+  type HistoryMessage,
+  type HistoryRequest,
+  HistoryRequestError,
+  historyCautions,
+  historyProblems,
+  longestSpanDays,
+} from './mission/historyRequest';
+export type { HistorySample } from './mission/historySamples';
+export type { HistoryEnd } from './mission/historyTrack';
+export {
+  type IntegratedOrbit,
+  type IntegratedSample,
+  IntegrationError,
+  type IntegrationOptions,
+  type IntegrationRequest,
+  integrateOrbit,
+} from './mission/integrateOrbit';
 export { betaRad, type EclipseTimes, eclipse, LightError } from './mission/light';
+export { decayHeightKm, type HistoryOptions, type MissionHistory, missionHistory } from './mission/missionHistory';
+export { steadyMean } from './mission/steadyMean';
 export { degPerRad, radPerDeg, secondsPerDay, twoPi, wrapPi, wrapTwoPi } from './numerics/angles';
 export type { KeplerianElements, MeanElements, OsculatingElements, StateVector, Theory } from './orbit/elements';
 export {
@@ -118,6 +152,7 @@ export { type RateCurves, ratesOverInclination } from './orbit/rateCurves';
 export { type SecularRates, secularRates } from './orbit/secularRates';
 export { elementsFromState, stateFromElements } from './orbit/state';
 export { blankCandidate, fieldTexts } from './record/blankCandidate';
+export { apsidesAt, apsisName } from './record/bodyWords';
 export {
   type BodyId,
   bodyIds,
@@ -156,7 +191,7 @@ export {
   readConditions,
 } from './record/conditions/readConditions';
 export { type Settlement, settleOrbit } from './record/conditions/settleOrbit';
-export { apsisName, driftHeadline, firstOrderSentence } from './record/driftHeadline';
+export { driftHeadline, firstOrderSentence } from './record/driftHeadline';
 export { kmPerLengthUnit } from './record/entry/shape';
 export { type EntryTags, type EntryTexts, entryFromOrbit } from './record/entryFromOrbit';
 export { fingerprint, fingerprintAlphabet, fingerprintLine } from './record/fingerprint';
