@@ -27,7 +27,15 @@ export interface AveragedModel {
  */
 export type AveragedRates = (rates: Float64Array, values: Float64Array, jd: number) => void;
 
-/** The rates of a model. The call throws an Error for e outside [0, 1), a ≤ 0 or elements that are not finite. */
+/** Elements that are no closed orbit. */
+export class NotAnOrbitError extends Error {
+  constructor(values: Float64Array) {
+    super(`averaged rates need a > 0, e < 1 and finite elements, got ${Array.from(values).join(', ')}`);
+    this.name = 'NotAnOrbitError';
+  }
+}
+
+/** The rates of a model. The call throws a NotAnOrbitError for e outside [0, 1), a ≤ 0 or elements that are not finite. */
 export function averagedRates({ body, sense, oblateness: order, forces }: AveragedModel): AveragedRates {
   const addAverage = gaussAverage(body.muKm3PerS2, forces, sense);
   const addOblateness = order === 'none' ? null : oblateness(body, order, sense);
@@ -35,7 +43,7 @@ export function averagedRates({ body, sense, oblateness: order, forces }: Averag
     const a = values[0] as number;
     const e2 = (values[1] as number) ** 2 + (values[2] as number) ** 2;
     if (!(a > 0 && e2 < 1 && Number.isFinite(a + (values[3] as number) + (values[4] as number)))) {
-      throw new Error(`averaged rates need a > 0, e < 1 and finite elements, got ${Array.from(values).join(', ')}`);
+      throw new NotAnOrbitError(values);
     }
     rates.fill(0);
     rates[5] = Math.sqrt(body.muKm3PerS2 / a) / a;

@@ -1,0 +1,45 @@
+/** The forces that a history averages, and those asked for that this body has no model of. */
+import type { Body } from '../bodies/body';
+import { dragForce } from '../forces/drag';
+import type { Force } from '../forces/force';
+import { moonForce, sunForce } from '../forces/thirdBody';
+import { zonalForce } from '../forces/zonal';
+import type { HistoryForces } from './historyRequest';
+
+/** A force that was asked for and does not act. */
+export interface LeftOutForce {
+  readonly force: 'zonals' | 'sun' | 'moon' | 'drag';
+  readonly reason: string;
+}
+
+export interface HistoryModel {
+  /** J2 and its square in closed form, or nothing. */
+  readonly oblateness: 'second' | 'none';
+  /** Averaged by quadrature. */
+  readonly forces: readonly Force[];
+  readonly leftOut: readonly LeftOutForce[];
+}
+
+/** Models of Sun, Moon and air exist for the Earth alone. */
+export function historyModel(body: Body, asked: HistoryForces, epochJdUtc: number): HistoryModel {
+  const forces: Force[] = [];
+  const leftOut: LeftOutForce[] = [];
+  const { zonalDegree, sun, moon, drag } = asked;
+  const known = body.zonals.length - 1;
+  const highest = Math.min(zonalDegree, known);
+  if (highest >= 3 && body.zonals.some((zonal, n) => n >= 3 && n <= highest && zonal !== 0)) {
+    forces.push(zonalForce(body, { from: 3, to: highest }));
+  }
+  if (zonalDegree > known) {
+    leftOut.push({ force: 'zonals', reason: `${body.gravitySet} has zonals to degree ${Math.max(known, 0)} only.` });
+  }
+  const isEarth = body.id === 'earth';
+  const why = (what: string) => `There is no model of ${what} ${body.name} here.`;
+  if (sun && isEarth) forces.push(sunForce(epochJdUtc));
+  else if (sun) leftOut.push({ force: 'sun', reason: why('the Sun as seen from') });
+  if (moon && isEarth) forces.push(moonForce(epochJdUtc));
+  else if (moon) leftOut.push({ force: 'moon', reason: why('a moon of') });
+  if (drag && isEarth) forces.push(dragForce(body, drag, { along: 'mean' }));
+  else if (drag) leftOut.push({ force: 'drag', reason: why('the air of') });
+  return { oblateness: zonalDegree >= 2 ? 'second' : 'none', forces, leftOut };
+}
