@@ -23,7 +23,7 @@ export function Nearest({ orbit }: { readonly orbit: ResolvedOrbit }) {
         Next to this orbit <span class="soft small">change of a that closes the track</span>
       </h2>
       <ul>
-        {result.repeats.map((repeat) => (
+        {result.repeats.toReversed().map((repeat) => (
           <li key={`${repeat.revolutions}/${repeat.days}`}>
             <NearestButton repeat={repeat} isSunSynchronous={isSunSynchronous} />
           </li>

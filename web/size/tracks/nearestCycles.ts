@@ -1,4 +1,4 @@
-/** The cycles worth naming near an orbit: each longer one only where it is nearer than all shorter ones. */
+/** The cycles worth naming near an orbit, by days: each longer one only where it is nearer than all shorter ones. */
 import { type NearestRepeat, type NearestResult, nearestRepeats, type ResolvedOrbit } from '../../../core/index';
 
 const longestDays = 60;
@@ -20,5 +20,5 @@ export function worthNaming(repeats: readonly NearestRepeat[]): readonly Nearest
     nearestKm = Math.abs(axisChangeKm);
     return true;
   });
-  return named.slice(0, most);
+  return named.slice(-most);
 }
