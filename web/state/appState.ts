@@ -67,7 +67,7 @@ async function openedAtStart(store: Store, newId: () => string): Promise<OpenCan
   const draft = await store.draft.load();
   if (draft.ok && draft.value?.kind === 'readable') {
     const { candidate, baseRevision } = draft.value;
-    const saved = baseRevision === null ? null : await savedRevision(store, candidate.id, baseRevision);
+    const saved = await savedRevision(store, candidate.id, baseRevision);
     return { candidate, baseRevision, savedText: saved?.savedText ?? null };
   }
   const list = await store.book.list();
@@ -75,7 +75,9 @@ async function openedAtStart(store: Store, newId: () => string): Promise<OpenCan
   return latest?.kind === 'readable' ? openedFrom(latest.candidate, latest.revision) : openedNew(newId());
 }
 
-async function savedRevision(store: Store, id: string, revision: number): Promise<OpenCandidate | null> {
+/** What a draft came from: a blank one where it was never saved. */
+async function savedRevision(store: Store, id: string, revision: number | null): Promise<OpenCandidate | null> {
+  if (revision === null) return openedNew(id);
   const revisions = await store.book.revisionsOf(id);
   const found = revisions.ok ? revisions.value.find((entry) => entry.revision === revision) : undefined;
   return found?.kind === 'readable' ? openedFrom(found.candidate, revision) : null;
@@ -121,6 +123,6 @@ async function openDraftOfOtherTab(store: Store, document: OrbitDocument): Promi
   const draft = await store.draft.load();
   if (!draft.ok || draft.value?.kind !== 'readable') return;
   const { candidate, baseRevision } = draft.value;
-  const saved = baseRevision === null ? null : await savedRevision(store, candidate.id, baseRevision);
+  const saved = await savedRevision(store, candidate.id, baseRevision);
   document.open({ candidate, baseRevision, savedText: saved?.savedText ?? null });
 }

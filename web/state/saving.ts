@@ -46,10 +46,15 @@ export function createSaving(parts: SavingParts): Saving {
   const { store, document, announcer } = parts;
   const status = signal<SaveStatus>({ kind: 'idle' });
 
-  const save = async (note = '', evenIfNewer = false): Promise<boolean> => {
+  const write: Write = async (note, evenIfNewer) => {
     const candidate = document.draft.value;
     status.value = { kind: 'saving' };
     const outcome = await store.book.save(candidate, { note, basedOn: document.baseRevision.value, evenIfNewer });
+    if (outcome.ok && document.draft.value.id !== candidate.id) {
+      // The editor came back from another tab meanwhile, with another orbit: the revision is not of that one.
+      status.value = { kind: 'idle' };
+      return true;
+    }
     if (outcome.ok) {
       document.markSaved(candidate, outcome.entry.revision);
       store.draft.note({ candidate: document.draft.value, baseRevision: outcome.entry.revision });
@@ -61,20 +66,18 @@ export function createSaving(parts: SavingParts): Saving {
       return true;
     }
     status.value = { kind: 'failed', message: outcome.message };
-    announcer.say({
-      text: outcome.message,
-      tone: 'caution',
-      action:
-        outcome.reason === 'conflict'
-          ? { label: 'Save on top of it', run: () => void save(note, true) }
-          : { label: 'Try again', run: () => void save(note, evenIfNewer) },
-    });
+    const label = outcome.reason === 'conflict' ? 'Save on top of it' : 'Try again';
+    const again = () => void save(note, evenIfNewer || outcome.reason === 'conflict');
+    announcer.say({ text: outcome.message, tone: 'caution', action: { label, run: again } });
     return false;
   };
 
+  const save = inTurn(write, document);
+
   const open = async (next: OpenCandidate): Promise<boolean> => {
     const leaving = document.draft.value;
-    if (document.changed.value) {
+    // Again where typing went on during the save.
+    while (document.changed.value) {
       if (!(await save('kept when another orbit was opened'))) return false;
       announcer.say({
         text: `The changes of “${leaving.name}” were saved as a revision of their own.`,
@@ -92,6 +95,22 @@ export function createSaving(parts: SavingParts): Saving {
     openSaved: (candidate, revision) => open(openedFrom(candidate, revision)),
     startNew: () => open(openedNew(parts.newId())),
     discardChanges: () => discardChanges(parts),
+  };
+}
+
+type Write = (note: string, evenIfNewer: boolean) => Promise<boolean>;
+
+/** One save after another: a second tap must not take the revision of the first for somebody else's. */
+function inTurn(write: Write, document: OrbitDocument) {
+  let running: Promise<boolean> | null = null;
+  return async (note = '', evenIfNewer = false): Promise<boolean> => {
+    while (running) {
+      if ((await running) && !document.changed.value) return true;
+    }
+    running = write(note, evenIfNewer).finally(() => {
+      running = null;
+    });
+    return running;
   };
 }
 

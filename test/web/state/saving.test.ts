@@ -65,6 +65,27 @@ describe('saving', () => {
     ]);
   });
 
+  it('twice at once makes one revision, and is no conflict with itself', async () => {
+    const app = await startApp();
+    type(app, '98');
+    expect(await Promise.all([app.saving.save(), app.saving.save(), app.saving.save()])).toEqual([true, true, true]);
+    expect(await historyOf(app, app.document.draft.value.id)).toEqual([[1, '98']]);
+    expect(said(app)).toBeNull();
+    expect(app.saving.status.value).toMatchObject({ kind: 'saved', revision: 1 });
+  });
+
+  it('leaves an orbit alone that was opened meanwhile', async () => {
+    const app = await startApp();
+    type(app, '98');
+    const saving = app.saving.save();
+    app.document.open(openedFrom(candidateOf({}, {}, { id: 'other' }), 4));
+    type(app, '99');
+    expect(await saving).toBe(true);
+    expect(app.document.baseRevision.value).toBe(4);
+    expect(app.document.changed.value).toBe(true);
+    expect(app.saving.status.value).toEqual({ kind: 'idle' });
+  });
+
   it('tells the draft the revision, so that a restart has it', async () => {
     const app = await startSaved();
     await app.store.draft.flush();
@@ -147,6 +168,31 @@ describe('opening another orbit', () => {
     expect(app.saving.status.value).toEqual({ kind: 'idle' });
   });
 
+  it('keeps what is typed while the other is being saved', async () => {
+    const app = await startSaved();
+    const { id } = app.document.draft.value;
+    type(app, '99');
+    const opening = app.saving.openSaved(candidateOf({}, {}, { id: 'other' }), 4);
+    type(app, '99.5');
+    expect(await opening).toBe(true);
+    expect(await historyOf(app, id)).toEqual([
+      [3, '99.5'],
+      [2, '99'],
+      [1, '98'],
+    ]);
+    expect(app.document.draft.value.id).toBe('other');
+  });
+
+  it('waits for a save that is under way', async () => {
+    const app = await startApp();
+    const { id } = app.document.draft.value;
+    type(app, '98');
+    const saving = app.saving.save();
+    expect(await app.saving.startNew()).toBe(true);
+    expect(await saving).toBe(true);
+    expect(await historyOf(app, id)).toEqual([[1, '98']]);
+  });
+
   it('saves nothing where nothing is unsaved', async () => {
     const app = await startSaved();
     const { id } = app.document.draft.value;
@@ -207,6 +253,18 @@ describe('the start', () => {
     expect(later.document.changed.value).toBe(true);
     type(later, '98');
     expect(later.document.changed.value).toBe(false);
+  });
+
+  it('takes a blank one for unchanged after a restart too', async () => {
+    const { app, again } = await startOn();
+    await app.saving.startNew();
+    await app.store.close();
+    const later = await again();
+    opened.push(later);
+    expect(later.document.draft.value.name).toBe('New orbit');
+    expect(later.document.changed.value).toBe(false);
+    type(later, '98');
+    expect(later.document.changed.value).toBe(true);
   });
 
   it('opens the orbit saved last where there is no draft, else a blank one', async () => {
