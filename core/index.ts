@@ -257,11 +257,6 @@ export {
 } from './record/units';
 export { smallEccentricity, warningsOf } from './record/warnings';
 export type { WorkingSymbol } from './record/workings/symbols';
-export {
-  type Working,
-  type WorkingConstant,
-  type WorkingLine,
-  type WorkingValue,
-  workingDigits,
-} from './record/workings/working';
+export type { Working, WorkingConstant, WorkingLine, WorkingValue } from './record/workings/working';
+export { workingDigits } from './record/workings/working';
 export { workingOf } from './record/workings/workingOf';

@@ -2,15 +2,16 @@
  * The answer of the place Drift, in one sentence of words and numbers. It speaks of rates now: the
  * closed form knows nothing of what Sun, Moon and drag make of them over a mission.
  */
-import type { Body } from '../bodies/body';
 import { secondsPerDay } from '../numerics/angles';
 import type { Theory } from '../orbit/elements';
 import { localTimeDriftSPerS } from '../orbit/localTime';
 import { secularRates } from '../orbit/secularRates';
+import { apsisName, inSentence } from './bodyWords';
 import type { HeadlineSpan } from './headline';
+import { doubtOf } from './readings/doubt';
 import type { ResolvedOrbit } from './resolved';
 import { formatNumber, unitOf } from './units';
-import { smallEccentricity } from './warnings';
+import { perigeeOffText, smallEccentricity, sunAndMoonDominate, tinyEccentricity } from './warnings';
 
 export type RateUnitId = 'degPerDay' | 'degPerYear';
 
@@ -19,14 +20,12 @@ const yearDays = 365.25;
 /** Faster than a turn of the clock in so many days, local time is said a day, with the time of a turn. */
 const slowTurnDays = 3 * yearDays;
 
-/** What the point nearest to the body is called. */
-export const apsisName = (body: Pick<Body, 'id'>): string => (body.id === 'earth' ? 'perigee' : 'periapsis');
-
 /** Rates now, second order, of node, perigee and local time. */
 export function driftHeadline(orbit: ResolvedOrbit, rateUnit: RateUnitId): HeadlineSpan[] {
   const rates = ratesIn(orbit, 'second', rateUnit);
   return [
-    { text: 'Node', mark: 'node', strong: true },
+    ...(sunAndMoonDominate(orbit) ? [{ text: 'Sun and Moon move this orbit more than J2 does. By J2 alone, ' }] : []),
+    { text: sunAndMoonDominate(orbit) ? 'node' : 'Node', mark: 'node', strong: true },
     { text: ' moves ' },
     { text: `${rates.node} ${rates.per}`, mark: 'node', strong: true },
     { text: ', ' },
@@ -45,8 +44,8 @@ export function firstOrderSentence(orbit: ResolvedOrbit, rateUnit: RateUnitId): 
   const localTime = perDay === null ? '' : `, local time ${localTimeText(perDay)}`;
   const apsis = apsisName(orbit.body);
   const e = orbit.mean.eccentricity;
-  const round =
-    e < smallEccentricity ? ` At e\u00a0${formatNumber(e, { digits: 4 })} the ${apsis} rate means little.` : '';
+  const worth = e < tinyEccentricity ? 'means little' : `is off by ${perigeeOffText(orbit)}`;
+  const round = e < smallEccentricity ? ` At e\u00a0${formatNumber(e, { digits: 4 })} the ${apsis} rate ${worth}.` : '';
   return `First order alone: node ${node} ${per}, ${apsis} ${perigee}${localTime}.${round}`;
 }
 
@@ -65,21 +64,23 @@ function localTimePerDayMin(orbit: ResolvedOrbit, theory: Theory): number | null
 
 const turnMin = 24 * 60;
 
-function localTimeText(perDayMin: number): string {
-  return turnMin / Math.abs(perDayMin) < slowTurnDays
-    ? `${formatNumber(perDayMin, { digits: 1, plus: true })} min a day`
-    : `${formatNumber(perDayMin * yearDays, { digits: 1, plus: true })} min a year`;
+function localTimeText(perDayMin: number, doubtPerDayMin = 0): string {
+  const isFast = turnMin / Math.abs(perDayMin) < slowTurnDays;
+  const days = isFast ? 1 : yearDays;
+  const spread = doubtPerDayMin * days < 0.05 ? '' : ` ± ${formatNumber(doubtPerDayMin * days, { digits: 1 })}`;
+  return `${formatNumber(perDayMin * days, { digits: 1, plus: true })}${spread} min a ${isFast ? 'day' : 'year'}`;
 }
 
 function localTimeSpans(orbit: ResolvedOrbit): HeadlineSpan[] {
   const perDayMin = localTimePerDayMin(orbit, 'second');
-  if (perDayMin === null) return [{ text: `Local time needs the year and the spin of ${orbit.body.name}.` }];
+  if (perDayMin === null) return [{ text: `Local time needs the year and the spin of ${inSentence(orbit.body)}.` }];
+  const doubtPerDayMin = ((doubtOf('localTimeDrift', orbit, 'second')?.size ?? 0) * secondsPerDay) / 60;
   const turnDays = turnMin / Math.abs(perDayMin);
   const turn = `, once round in ${formatNumber(turnDays, { digits: turnDays < 100 ? 1 : 0 })} days.`;
   return [
     { text: 'Local time', mark: 'node', strong: true },
     { text: ' drifts ' },
-    { text: localTimeText(perDayMin), mark: 'node', strong: true },
+    { text: localTimeText(perDayMin, doubtPerDayMin), mark: 'node', strong: true },
     { text: turnDays < slowTurnDays ? turn : ' at today’s rate.' },
   ];
 }

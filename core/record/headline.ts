@@ -4,11 +4,12 @@
  * The closed form knows rates now; it says nothing here about years ahead.
  */
 import { degPerRad, secondsPerDay, twoPi } from '../numerics/angles';
+import { apsisName } from './bodyWords';
 import { stationaryYears } from './readings/drift';
 import type { Reading, ReadingId, ReadingMark } from './readings/reading';
 import type { ResolvedOrbit } from './resolved';
 import { formatNumber, unitOf } from './units';
-import { smallEccentricity } from './warnings';
+import { isEquatorial, perigeeOffText, smallEccentricity, sunAndMoonDominate, tinyEccentricity } from './warnings';
 
 export interface HeadlineSpan {
   readonly text: string;
@@ -24,18 +25,39 @@ const stillDegPerDay = 360 / (stationaryYears * 365.25);
 
 /** Two sentences, node then perigee, in spans; joined they read as plain text. */
 export function headlineOf(
-  { body, mean }: Pick<ResolvedOrbit, 'body' | 'mean'>,
+  orbit: Pick<ResolvedOrbit, 'body' | 'mean'>,
   readings: readonly Reading[],
   options: { readonly rateUnit?: string } = {},
 ): HeadlineSpan[] {
   const value = (wanted: ReadingId) => readings.find(({ id }) => id === wanted)?.value;
   const rates: Rates = { node: needed(value('nodeRate')), perigee: needed(value('perigeeRate')), ...options };
-  const apsis = body.id === 'earth' ? 'perigee' : 'periapsis';
+  if (sunAndMoonDominate(orbit)) return farOutSpans(rates);
+  const { inclinationRad } = orbit.mean;
+  if (isEquatorial(inclinationRad)) {
+    const together = rates.perigee + (inclinationRad < 1 ? rates.node : -rates.node);
+    return [...noNodeSpans(orbit.body), ...perigeeSpans({ ...rates, perigee: together }, orbit)];
+  }
   const node = nodeSpans(
     rates,
     readings.find(({ id }) => id === 'localTimeDrift'),
   );
-  return [...node, { text: ' ' }, ...perigeeSpans(rates, mean.eccentricity, apsis)];
+  return [...node, { text: ' ' }, ...perigeeSpans(rates, orbit)];
+}
+
+const noNodeSpans = (body: ResolvedOrbit['body']): HeadlineSpan[] => [
+  { text: 'No node in the plane of the equator', mark: 'node', strong: true },
+  { text: `: ${apsisName(body)} is counted against the stars. ` },
+];
+
+function farOutSpans(rates: Rates): HeadlineSpan[] {
+  return [
+    { text: 'Sun and Moon move this orbit more than J2 does', strong: true },
+    { text: ': of the node J2 makes ' },
+    { text: smallRateText(rates.node, rates), mark: 'node', strong: true },
+    { text: ', of perigee ' },
+    { text: smallRateText(rates.perigee, rates), mark: 'perigee', strong: true },
+    { text: '; the rest is not in these numbers.' },
+  ];
 }
 
 interface Rates {
@@ -62,10 +84,13 @@ function nodeSpans(rates: Rates, drift: Reading | undefined): HeadlineSpan[] {
 }
 
 function synchronousSpans(rate: HeadlineSpan, minutes: number, doubt: number): HeadlineSpan[] {
-  const opening = Math.abs(minutes) < synchronousMinPerYear ? 'Sun-synchronous now' : 'Nearly Sun-synchronous now';
-  const spread = doubt < 0.05 ? '' : ` ± ${formatNumber(doubt, { digits: 1 })}`;
+  const name = Math.abs(minutes) < synchronousMinPerYear ? 'Sun-synchronous' : 'Nearly Sun-synchronous';
+  // With a doubt above the threshold the closed form cannot tell.
+  const isOpen = doubt > synchronousMinPerYear;
+  const give = ` by the closed form, give or take ${formatNumber(doubt, { digits: doubt < 10 ? 1 : 0 })} min a year`;
+  const spread = isOpen || doubt < 0.05 ? '' : ` ± ${formatNumber(doubt, { digits: 1 })}`;
   return [
-    { text: opening, strong: true },
+    { text: isOpen ? name + give : `${name} now`, strong: true },
     { text: ': the node moves ' },
     rate,
     { text: ', its local time ' },
@@ -74,9 +99,11 @@ function synchronousSpans(rate: HeadlineSpan, minutes: number, doubt: number): H
   ];
 }
 
-function perigeeSpans(rates: Rates, eccentricity: number, apsis: string): HeadlineSpan[] {
+function perigeeSpans(rates: Rates, orbit: Pick<ResolvedOrbit, 'body' | 'mean'>): HeadlineSpan[] {
+  const apsis = apsisName(orbit.body);
   const name = apsis.charAt(0).toUpperCase() + apsis.slice(1);
-  if (eccentricity < smallEccentricity) {
+  const { eccentricity } = orbit.mean;
+  if (eccentricity < tinyEccentricity) {
     const size = formatNumber(eccentricity, { digits: eccentricity < 0.001 ? 6 : 4 });
     return [
       { text: `At e ${size} ` },
@@ -90,7 +117,8 @@ function perigeeSpans(rates: Rates, eccentricity: number, apsis: string): Headli
   return [
     { text: `${name} moves ` },
     { text: rateText(rates.perigee, rates), mark: 'perigee', strong: true },
-    { text: ` now: once round in ${turnText(rates.perigee)}.` },
+    { text: ` now${eccentricity < smallEccentricity ? `, off by ${perigeeOffText(orbit)} at this e` : ''}: ` },
+    { text: `once round in ${turnText(rates.perigee)}.` },
   ];
 }
 
@@ -103,10 +131,23 @@ function rateText(radPerS: number, { rateUnit }: Rates): string {
   return `${formatNumber(radPerS * perCore, { digits: symbol === 'deg/day' ? 4 : 2, plus: true })} ${symbol}`;
 }
 
+/** Two figures, for rates that fixed digits would show as zero. */
+function smallRateText(radPerS: number, { rateUnit }: Rates): string {
+  const { perCore, symbol } = unitOf('angleRate', rateUnit);
+  const digits = 1 - Math.floor(Math.log10(Math.abs(radPerS * perCore) || 1));
+  return `${formatNumber(radPerS * perCore, { digits: Math.min(12, Math.max(0, digits)), plus: true })} ${symbol}`;
+}
+
 /** Three figures are as much as a rate of now is worth as a span. */
 function turnText(radPerS: number): string {
   const days = twoPi / (Math.abs(radPerS) * secondsPerDay);
+  if (days < 2) return shortTurnText(days);
   if (days < 730) return `${formatNumber(days, { digits: days < 100 ? 1 : 0 })} days`;
   const years = days / 365.25;
   return `${formatNumber(years, { digits: years < 10 ? 1 : 0 })} years`;
+}
+
+function shortTurnText(days: number): string {
+  const [count, unit] = days * 24 < 2 ? [days * 1440, 'minutes'] : [days * 24, 'hours'];
+  return `${formatNumber(count, { digits: Math.min(6, Math.max(0, 2 - Math.floor(Math.log10(count)))) })} ${unit}`;
 }

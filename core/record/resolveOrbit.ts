@@ -6,6 +6,7 @@ import type { Body } from '../bodies/body';
 import type { KeplerianElements, MeanElements } from '../orbit/elements';
 import { elementsToMeanOfDate } from '../orbit/frames';
 import { tryMeanFromOsculating } from '../orbit/meanState';
+import { apsidesAt } from './bodyWords';
 import type { Candidate, FieldId, OrbitEntry } from './candidate';
 import { readAltitudes } from './entry/altitudes';
 import { readBody } from './entry/body';
@@ -82,7 +83,10 @@ function notePerigee({ body, mean, origin }: ResolvedOrbit, reader: FieldReader)
     id: 'perigeeBelowSurface',
     severity: 'caution',
     field: shapeField(origin),
-    text: `Perigee lies ${(-altitudeKm).toFixed(1)} km below the surface: the numbers are worked out, but nothing can fly there. Raise the perigee.`,
+    text: apsidesAt(
+      `Perigee lies ${(-altitudeKm).toFixed(1)} km below the surface: the numbers are worked out, but nothing can fly there. Raise the perigee.`,
+      body,
+    ),
   });
 }
 

@@ -75,9 +75,15 @@ export function formatClock(hours: number): string {
   return parts.map((part) => String(part).padStart(2, '0')).join(':');
 }
 
+/** 1000 years: a longer time for perigee to go round has no digits worth writing. */
+const longestS = 1000 * yearDays * dayS;
+
 /** The number of a quantity in a unit, without the unit's symbol. */
 export function formatQuantity(quantity: Quantity, value: number, unitId?: string): string {
   if (quantity === 'localTime') return formatClock(value);
   const { perCore, digits } = unitOf(quantity, unitId);
+  if (quantity === 'longDuration' && value > longestS) {
+    return `over ${formatNumber(longestS * perCore, { digits: 0 })}`;
+  }
   return formatNumber(value * perCore, { digits, plus: signedQuantities.has(quantity) });
 }

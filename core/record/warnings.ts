@@ -5,7 +5,9 @@
  * typed and have no row here.
  */
 import { degPerRad } from '../numerics/angles';
+import { apsidesAt, inSentence } from './bodyWords';
 import { perigeeAltitudeKm } from './entry/shape';
+import { frozenEccentricity, sunAndMoonDominateKm } from './readings/doubt';
 import type { Reading, ReadingId } from './readings/reading';
 import type { Notice, ResolvedOrbit } from './resolved';
 
@@ -20,6 +22,15 @@ interface Warning {
 
 /** Below this e perigee drift by the closed form is off by about e_frozen/e, 6 % and more. */
 export const smallEccentricity = 0.02;
+
+/** Below this e the closed form says nothing about the drift of perigee. */
+export const tinyEccentricity = 0.003;
+
+/** How far off perigee drift is at a small e, in words. Odd zonals of the Earth; elsewhere they may be stronger. */
+export function perigeeOffText({ body, mean }: Pick<ResolvedOrbit, 'body' | 'mean'>): string {
+  if (body.id !== 'earth') return 'some per cent or more';
+  return `up to ${Math.ceil((100 * frozenEccentricity) / mean.eccentricity)} %`;
+}
 
 const perigeeKm = ({ body, mean }: ResolvedOrbit) => perigeeAltitudeKm(body, mean);
 const isEarth = ({ body }: ResolvedOrbit) => body.id === 'earth';
@@ -55,10 +66,10 @@ const warnings: readonly Warning[] = [
     id: 'smallEccentricity',
     severity: 'note',
     applies: ({ mean }) => mean.eccentricity < smallEccentricity,
-    text: ({ mean }) =>
-      mean.eccentricity < 0.003
+    text: ({ body, mean }) =>
+      mean.eccentricity < tinyEccentricity
         ? `At e ${mean.eccentricity.toFixed(6)} the closed-form perigee drift means nothing: odd zonals move the eccentricity vector as much. Read the eccentricity vector instead.`
-        : `At e ${mean.eccentricity.toFixed(4)} the closed-form perigee drift is off by some per cent, more as e falls: read the eccentricity vector beside it.`,
+        : `At e ${mean.eccentricity.toFixed(4)} the closed-form perigee drift is off by ${perigeeOffText({ body, mean })}, more as e falls: read the eccentricity vector beside it.`,
   },
   {
     id: 'nearCriticalInclination',
@@ -86,14 +97,31 @@ const warnings: readonly Warning[] = [
     severity: 'caution',
     applies: ({ body }) => Math.abs(body.zonals[2] ?? 0) < 5e-4,
     text: ({ body }) =>
-      `At ${body.name} J2 does not dominate the field: the closed form is a first guess only. Integrate with a full field before choosing an orbit.`,
+      `At ${inSentence(body)} J2 does not dominate the field: the closed form is a first guess only. Integrate with a full field before choosing an orbit.`,
   },
   {
     id: 'sunAndMoon',
     severity: 'caution',
-    applies: (orbit) => isEarth(orbit) && orbit.mean.semiMajorAxisKm > 20_000,
+    applies: (orbit) =>
+      isEarth(orbit) && orbit.mean.semiMajorAxisKm > 20_000 && orbit.mean.semiMajorAxisKm <= sunAndMoonDominateKm,
     text: () =>
       'This high the Sun and the Moon move node, perigee and inclination as much as a good part of J2, or more: take the rates as the share of J2 alone.',
+  },
+  {
+    id: 'sunAndMoonDominate',
+    severity: 'caution',
+    applies: sunAndMoonDominate,
+    text: ({ mean }) =>
+      mean.semiMajorAxisKm * (1 + mean.eccentricity) > farthestKm
+        ? 'Beyond about 900 000 km the Sun takes an orbit away from the Earth: nothing here holds. Choose a smaller orbit.'
+        : 'This far out the Sun and the Moon move node, perigee and inclination more than J2 does: these rates are the smaller share. Integrate with Sun and Moon before choosing an orbit.',
+  },
+  {
+    id: 'noNode',
+    severity: 'note',
+    applies: ({ mean }) => isEquatorial(mean.inclinationRad),
+    text: () =>
+      'In the plane of the equator there is no node: the node given is only the direction that perigee is counted from, and its rate and local time mean nothing by themselves. Read node and perigee together.',
   },
   {
     id: 'sgp4Elements',
@@ -103,6 +131,19 @@ const warnings: readonly Warning[] = [
       'Two-line elements are the mean elements of SGP4, here taken as Brouwer mean elements: good for rates, not for positions.',
   },
 ];
+
+/** Where an orbit of the Earth ends, about: the radius within which it outweighs the Sun. */
+const farthestKm = 900_000;
+
+/** True where the closed form gives the smaller share of what moves the orbit. */
+export function sunAndMoonDominate({ body, mean }: Pick<ResolvedOrbit, 'body' | 'mean'>): boolean {
+  return body.id === 'earth' && mean.semiMajorAxisKm > sunAndMoonDominateKm;
+}
+
+/** A plane within 1e-6° of the equator's has no node. */
+export function isEquatorial(inclinationRad: number): boolean {
+  return Math.abs(Math.sin(inclinationRad)) < 1e-6 / degPerRad;
+}
 
 function nearResonance(revolutionsADay: number | undefined): boolean {
   if (revolutionsADay === undefined) return false;
@@ -114,5 +155,5 @@ export function warningsOf(orbit: ResolvedOrbit, readings: readonly Reading[]): 
   const value: ReadingValues = (wanted) => readings.find(({ id }) => id === wanted)?.value;
   return warnings
     .filter(({ applies }) => applies(orbit, value))
-    .map(({ id, severity, text }) => ({ id, severity, text: text(orbit) }));
+    .map(({ id, severity, text }) => ({ id, severity, text: apsidesAt(text(orbit), orbit.body) }));
 }

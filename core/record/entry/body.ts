@@ -11,8 +11,8 @@ import { plainNumber } from './plainNumber';
 export function readBody(candidate: Candidate, reader: FieldReader): Body | null {
   if (candidate.body === 'earth') return gravitySets[candidate.gravitySet];
   if (candidate.body !== 'custom') return bodies[candidate.body];
-  const muKm3PerS2 = positive(reader, 'bodyMu', 'Gravitational parameter', 'km³/s², such as 398600.4415');
-  const radiusKm = positive(reader, 'bodyRadius', 'Reference radius', 'km, such as 6378.1363');
+  const muKm3PerS2 = positive(reader, 'bodyMu', 'Gravity parameter μ', 'km³/s², such as 398600.4415');
+  const radiusKm = positive(reader, 'bodyRadius', 'Equatorial radius', 'km, such as 6378.1363');
   const j2 = zonal(reader, 'bodyJ2', 2, reader.number);
   const j3 = zonal(reader, 'bodyJ3', 3, reader.optionalNumber);
   const j4 = zonal(reader, 'bodyJ4', 4, reader.optionalNumber);
@@ -60,9 +60,10 @@ function readFlattening(reader: FieldReader): number | null | undefined {
 /** A sidereal day in hours, negative on a retrograde rotator, becomes a rate. */
 function readRotation(reader: FieldReader): number | null | undefined {
   const expected = 'the sidereal day in hours, such as 23.9345, negative where the body turns backwards';
-  const hours = reader.optionalNumber({ field: 'bodyDay', label: 'Day', expected });
+  const hours = reader.optionalNumber({ field: 'bodyDay', label: 'Sidereal day', expected });
   if (hours === null || hours === undefined) return hours;
-  if (Math.abs(hours) < 0.01) return reader.fail('bodyDay', `Day is ${plainNumber(hours)} h; expected ${expected}.`);
+  if (Math.abs(hours) < 0.01)
+    return reader.fail('bodyDay', `Sidereal day is ${plainNumber(hours)} h; expected ${expected}.`);
   return twoPi / (hours * 3600);
 }
 

@@ -1,6 +1,7 @@
 import type { Body } from '../../bodies/body';
 import { radPerDeg, wrapTwoPi } from '../../numerics/angles';
 import { nodeFromLocalTimeRad } from '../../orbit/localTime';
+import { apsidesAt } from '../bodyWords';
 import type { FieldId, OrbitEntry } from '../candidate';
 import { type FieldReader, quoted } from '../readFields';
 import { readLocalTime } from './localTimeText';
@@ -23,7 +24,7 @@ export function readOrientation(
   const inclinationRad = readInclination(reader);
   const nodeRad =
     entry.nodeForm === 'raan' ? readAngle(reader, 'node', 'Node') : readNodeTime(entry, body, epochJd, reader);
-  const perigeeRad = readAngle(reader, 'perigee', 'Perigee');
+  const perigeeRad = readAngle(reader, 'perigee', apsidesAt('Argument of perigee', body));
   const meanAnomalyRad = readAngle(reader, 'meanAnomaly', 'Mean anomaly');
   if (inclinationRad === null || nodeRad === null || perigeeRad === null || meanAnomalyRad === null) return null;
   return { inclinationRad, nodeRad, perigeeRad, meanAnomalyRad };

@@ -27,7 +27,11 @@ function readSixNumbers(entry: OrbitEntry, reader: FieldReader): StateVector | n
   const perUnit = entry.stateUnit === 'm' ? 1e-3 : 1;
   const numbers = stateFieldIds.map((field, index) => {
     const unit = index < 3 ? entry.stateUnit : `${entry.stateUnit}/s`;
-    const value = reader.number({ field, label: field, expected: `a number in ${unit}` });
+    const value = reader.number({
+      field,
+      label: index < 3 ? `Position ${field}` : `Velocity ${field.slice(1)}`,
+      expected: `a number in ${unit}`,
+    });
     return value === null ? null : value * perUnit;
   });
   const [x, y, z, vx, vy, vz] = numbers;

@@ -1,11 +1,12 @@
 /**
  * How wrong a rate by the closed form may be, as a rate now, from the zonals that its order leaves
- * out. Sun, Moon and drag are another matter and not in it.
+ * out. Sun, Moon and drag are another matter and not in it; where Sun and Moon dominate no figure is given.
  *
  * Shares of the node rate: measured against numerical integrations in the field of the Earth to
  * degree 14, low orbits, 1.6e-4 near 98°, 4e-4 near 52°, 1–3e-3 within 15° of the equator, rounded up;
- * between 15° and 30° interpolated. Higher orbits do better. Perigee: odd zonals shift its rate by
- * about e_frozen/e of itself (6 % at 0.02 near 98°).
+ * between 15° and 30° interpolated. Higher orbits do better. No rate is better known than 2e-5 of k, the size of
+ * the J2 rate, however small it is itself, as at 90°. Perigee: odd zonals shift its rate by about e_frozen/e of
+ * itself (6 % at 0.02 near 98°).
  */
 import { degPerRad, secondsPerDay, twoPi } from '../../numerics/angles';
 import type { Theory } from '../../orbit/elements';
@@ -19,15 +20,34 @@ export interface Doubt {
 }
 
 /** Eccentricity at which odd zonals hold perigee still in low orbit; its usual size. */
-const frozenEccentricity = 0.0012;
+export const frozenEccentricity = 0.0012;
+
+/** Above this the Sun and the Moon move the node of an orbit of the Earth more than J2 does. */
+export const sunAndMoonDominateKm = 50_000;
+
+const nodeFloor = 2e-5;
 
 /** Null where no honest figure is known. */
 export function doubtOf(id: ReadingId, point: ReadingPoint, theory: Theory): Doubt | null {
+  if (point.body.id === 'earth' && point.mean.semiMajorAxisKm > sunAndMoonDominateKm) return null;
   if (id === 'nodeRate') return rateDoubt(point, theory, 'nodeRadPerS');
   if (id === 'perigeeRate') return rateDoubt(point, theory, 'perigeeRadPerS');
+  if (id === 'apsidalPeriod') return periodDoubt(point, theory);
   if (id !== 'localTimeDrift') return null;
   const { size, reason } = rateDoubt(point, theory, 'nodeRadPerS');
   return { size: (size * secondsPerDay) / twoPi, reason };
+}
+
+/** The perigee rate's share, of the period; null where the rate may be zero. */
+function periodDoubt(point: ReadingPoint, theory: Theory): Doubt | null {
+  const rate = Math.abs(secularRates(point.body, point.mean, theory).perigeeRadPerS);
+  const { size, reason } = rateDoubt(point, theory, 'perigeeRadPerS');
+  return size < rate ? { size: (twoPi / rate) * (size / rate), reason } : null;
+}
+
+/** Whether perigee may stand still, or turn the other way, for all that is known. */
+export function perigeeRateInDoubt(point: ReadingPoint): boolean {
+  return periodDoubt(point, 'second') === null;
 }
 
 function rateDoubt(point: ReadingPoint, theory: Theory, rate: 'nodeRadPerS' | 'perigeeRadPerS'): Doubt {
@@ -36,11 +56,14 @@ function rateDoubt(point: ReadingPoint, theory: Theory, rate: 'nodeRadPerS' | 'p
   const betweenOrders = Math.abs(second[rate] - first[rate]);
   if (point.body.id !== 'earth') {
     return {
-      size: betweenOrders,
+      size: Math.max(betweenOrders, 0.1 * secondOrderSize(point)),
       reason: 'At least the difference between first and second order; the field beyond J4 is left out.',
     };
   }
-  const left = rate === 'nodeRadPerS' ? nodeShare(point) * Math.abs(second[rate]) : perigeeSize(point, second[rate]);
+  const left =
+    rate === 'nodeRadPerS'
+      ? Math.max(nodeShare(point) * Math.abs(second[rate]), nodeFloor * oblateRate(point))
+      : perigeeSize(point, second[rate]);
   return theory === 'first'
     ? { size: betweenOrders + left, reason: 'First order leaves out J2², J4 and above.' }
     : { size: left, reason: 'Second order leaves out odd zonals, J6 and above.' };
@@ -55,13 +78,27 @@ function nodeShare({ mean }: ReadingPoint): number {
 }
 
 /** Odd zonals by e_frozen/e, at most the whole rate; J6 and above against the size of J2's own terms. */
-function perigeeSize({ body, mean }: ReadingPoint, radPerS: number): number {
-  const { semiMajorAxisKm: a, eccentricity: e } = mean;
-  const oblate =
-    1.5 *
-    Math.sqrt(body.muKm3PerS2 / a ** 3) *
-    Math.abs(body.zonals[2] ?? 0) *
-    (body.radiusKm / (a * (1 - e * e))) ** 2;
+function perigeeSize(point: ReadingPoint, radPerS: number): number {
+  const e = point.mean.eccentricity;
   const share = e > frozenEccentricity ? frozenEccentricity / e : 1;
-  return share * Math.abs(radPerS) + 5e-4 * oblate;
+  return share * Math.abs(radPerS) + 5e-4 * oblateRate(point);
+}
+
+/** (R/p)² and the mean motion. */
+function scalesOf({ body, mean }: ReadingPoint): readonly [ratio2: number, radPerS: number] {
+  const { semiMajorAxisKm: a, eccentricity: e } = mean;
+  return [(body.radiusKm / (a * (1 - e * e))) ** 2, Math.sqrt(body.muKm3PerS2 / a ** 3)];
+}
+
+/** k of first order, rad/s, whatever the sign of J2. */
+function oblateRate(point: ReadingPoint): number {
+  const [ratio2, n] = scalesOf(point);
+  return 1.5 * n * Math.abs(point.body.zonals[2] ?? 0) * ratio2;
+}
+
+/** What J2² and J4 move at all, rad/s, where their terms do not happen to cancel. */
+function secondOrderSize(point: ReadingPoint): number {
+  const [ratio2, n] = scalesOf(point);
+  const { zonals } = point.body;
+  return 1.5 * n * ((zonals[2] ?? 0) ** 2 + Math.abs(zonals[4] ?? 0)) * ratio2 * ratio2;
 }

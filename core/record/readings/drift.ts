@@ -3,6 +3,8 @@ import { secondsPerDay, twoPi } from '../../numerics/angles';
 import { localTimeDriftSPerS } from '../../orbit/localTime';
 import { periods } from '../../orbit/periods';
 import { secularRates } from '../../orbit/secularRates';
+import { inSentence } from '../bodyWords';
+import { perigeeRateInDoubt } from './doubt';
 import type { Alternate, ReadingPoint, ReadingSpec } from './reading';
 import { noRotation } from './time';
 
@@ -43,15 +45,17 @@ export const driftReadings: readonly ReadingSpec[] = [
   {
     id: 'apsidalPeriod',
     label: 'Apsidal period',
-    symbol: 'T_ω',
+    symbol: 'Tω',
     quantity: 'longDuration',
     mark: 'perigee',
     ordered: true,
     evaluate: ({ body, mean }, theory) => twoPi / Math.abs(secularRates(body, mean, theory).perigeeRadPerS),
-    remark: (_, value) =>
-      value > stationaryS
-        ? `Perigee stands still now: no turn within ${stationaryYears} years at this rate.`
-        : undefined,
+    remark: (point, value) => {
+      if (value > stationaryS) return `Perigee stands still now: no turn within ${stationaryYears} years at this rate.`;
+      return perigeeRateInDoubt(point)
+        ? 'The perigee rate is no larger than its doubt: no turn can be told.'
+        : undefined;
+    },
   },
   {
     id: 'localTimeDrift',
@@ -61,7 +65,7 @@ export const driftReadings: readonly ReadingSpec[] = [
     mark: 'node',
     ordered: true,
     missing: (point) =>
-      point.body.yearDays === null ? `Needs the length of the year of ${point.body.name}.` : noRotation(point),
+      point.body.yearDays === null ? `Needs the length of the year of ${inSentence(point.body)}.` : noRotation(point),
     evaluate: ({ body, mean }, theory) => {
       const drift = localTimeDriftSPerS(secularRates(body, mean, theory).nodeRadPerS, body);
       return drift ?? Number.NaN;

@@ -1,5 +1,6 @@
 /** The registry: every reading of an orbit, in the order in which they are shown. */
 import type { Theory } from '../../orbit/elements';
+import { apsidesAt } from '../bodyWords';
 import { doubtOf } from './doubt';
 import { driftReadings } from './drift';
 import { type HeightId, heightValues, isHeight } from './heights';
@@ -66,7 +67,7 @@ export function absentReadings(orbit: ReadingPoint): AbsentReading[] {
   return specs.flatMap((spec) => {
     const reason =
       noHeights && isHeight(spec.id) ? 'J2 is too large a correction on this orbit.' : spec.missing?.(orbit);
-    return reason ? [{ id: spec.id, label: labelAt(spec.label, orbit), reason }] : [];
+    return reason ? [{ id: spec.id, label: apsidesAt(spec.label, orbit.body), reason }] : [];
   });
 }
 
@@ -78,7 +79,7 @@ function readingOf(spec: ReadingSpec, orbit: ReadingPoint, theory: Theory, known
   const alternates: readonly Alternate[] = spec.alternates?.(orbit, value) ?? [];
   return {
     id,
-    label: labelAt(spec.label, orbit),
+    label: apsidesAt(spec.label, orbit.body),
     symbol,
     quantity,
     value,
@@ -91,12 +92,6 @@ function readingOf(spec: ReadingSpec, orbit: ReadingPoint, theory: Theory, known
         : sensitivitiesOf(orbit, spec.slopeOf?.(orbit) ?? ((point) => spec.evaluate(point, theory))),
     alternates,
     doubt: doubtOf(id, orbit, theory),
-    ...(remark === undefined ? {} : { remark }),
+    ...(remark === undefined ? {} : { remark: apsidesAt(remark, orbit.body) }),
   };
-}
-
-/** At other bodies the trade speaks of periapsis and apoapsis. */
-function labelAt(label: string, { body }: ReadingPoint): string {
-  if (body.id === 'earth') return label;
-  return label.replace(/erigee/, 'eriapsis').replace(/pogee/, 'poapsis');
 }

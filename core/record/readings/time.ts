@@ -2,10 +2,11 @@
 import { secondsPerDay } from '../../numerics/angles';
 import { periods } from '../../orbit/periods';
 import { secularRates } from '../../orbit/secularRates';
+import { inSentence } from '../bodyWords';
 import type { ReadingPoint, ReadingSpec } from './reading';
 
 export function noRotation({ body }: ReadingPoint): string | null {
-  return body.rotationRadPerS === null ? `Needs the length of the day of ${body.name}.` : null;
+  return body.rotationRadPerS === null ? `Needs the length of the day of ${inSentence(body)}.` : null;
 }
 
 /** (rad/s) Throws where `noRotation` has a reason. */

@@ -22,6 +22,12 @@ describe('writing numbers', () => {
     expect(formatNumber(Number.NaN, { digits: 2 })).toBe('–');
   });
 
+  it('gives no digits to a perigee that takes over 1000 years to go round', () => {
+    expect(formatQuantity('longDuration', 7e15)).toBe('over 365\u2009250');
+    expect(formatQuantity('longDuration', 7e15, 'yr')).toBe('over 1000');
+    expect(formatQuantity('longDuration', 86_400 * 100)).toBe('100.00');
+  });
+
   it('writes formula numbers by significant digits', () => {
     expect(formatSignificant(0.00108262617)).toBe('0.00108262617');
     expect(formatSignificant(7.292115e-5)).toBe('7.292115 × 10⁻⁵');

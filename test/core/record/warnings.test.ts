@@ -41,6 +41,24 @@ describe('warnings', () => {
     expect(ids({ ...circle(35_786), inclination: '30' })).toContain('tesseralResonance');
   });
 
+  it('say that Sun and Moon dominate far out, and that the equator has no node', () => {
+    expect(ids({ ...circle(100_000), inclination: '55' })).toEqual(['smallEccentricity', 'sunAndMoonDominate']);
+    expect(ids({ ...high, inclination: '0' })).toEqual(['nearEquator', 'noNode']);
+    expect(ids({ ...high, inclination: '180' })).toContain('noNode');
+  });
+
+  it('speak of the apsides of the body, and of the Moon with its article', () => {
+    const said = (body: 'mars' | 'moon', texts = {}) => {
+      const orbit = resolved({ ...high, apogeeAltitude: '710', ...texts }, { body });
+      return warningsOf(orbit, readingsOf(orbit))
+        .map(({ text }) => text)
+        .join(' ');
+    };
+    expect(said('mars')).toContain('periapsis drift');
+    expect(said('mars', { perigeeAltitude: '-5' })).not.toMatch(/perigee/i);
+    expect(said('moon')).toContain('At the Moon J2');
+  });
+
   it('say resonance near synchronous orbits at Mars', () => {
     expect(ids({ ...circle(17_032), inclination: '30' }, { body: 'mars' })).toContain('tesseralResonance');
   });

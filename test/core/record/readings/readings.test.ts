@@ -145,8 +145,26 @@ describe('the doubt of a rate', () => {
     expect(share(0.02)).toBeCloseTo(0.06, 2);
   });
 
-  it('is given for rates alone', () => {
+  it('never comes to nothing, whatever the rate itself', () => {
+    const polar = (body: ReadingPoint['body'], semiMajorAxisKm: number) =>
+      reading('nodeRate', { ...earth, body, mean: { ...mean, semiMajorAxisKm, inclinationRad: Math.PI / 2 } });
+    const perDay = unitOf('angleRate').perCore;
+    expect((polar(bodies.earth, 7078).doubt?.size ?? 0) * perDay).toBeGreaterThan(1e-5);
+    expect((polar(bodies.mars, 3796).doubt?.size ?? 0) * perDay).toBeGreaterThan(1e-4);
+  });
+
+  it('of the apsidal period is the share of the perigee rate; none where that may be zero, which is said', () => {
+    const point = { ...earth, mean: { ...mean, eccentricity: 0.05 } };
+    const [rate, period] = [reading('perigeeRate', point), reading('apsidalPeriod', point)];
+    const share = ({ doubt, value }: Reading) => (doubt?.size ?? 0) / Math.abs(value);
+    expect(share(period)).toBeCloseTo(share(rate), 12);
+    expect(reading('apsidalPeriod')).toMatchObject({ doubt: null });
+    expect(reading('apsidalPeriod').remark).toContain('no larger than its doubt');
+  });
+
+  it('is given for rates alone, and not where Sun and Moon dominate', () => {
     expect(reading('nodalPeriod').doubt).toBeNull();
+    expect(reading('nodeRate', { ...earth, mean: { ...mean, semiMajorAxisKm: 1e6 } }).doubt).toBeNull();
   });
 });
 
