@@ -21,11 +21,14 @@ export function createConditions(
   const settle = signal<typeof settleOrbit | null>(null);
   const hasConditions = computed(() => draft.value.conditions.length > 0);
   effect(() => {
-    if (hasConditions.value && !settle.peek()) {
-      void load().then((loaded) => {
+    if (draft.value.conditions.length === 0 || settle.peek()) return;
+    load().then(
+      (loaded) => {
         settle.value = loaded;
-      });
-    }
+      },
+      // Out of reach for now: the next edit tries again.
+      () => undefined,
+    );
   });
   const settlement = computed(() => {
     const entry = entered.value;

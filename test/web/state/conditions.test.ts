@@ -36,6 +36,19 @@ describe('solving', () => {
     expect(conditionsOf(candidateOf({}, {}, { conditions: [{ ...sunSynchronous }] })).load).toHaveBeenCalledTimes(1);
   });
 
+  it('that could not be fetched is fetched with the next edit, and nothing typed is lost', async () => {
+    const load = vi.fn(async () => settleOrbit).mockRejectedValueOnce(new Error('no network'));
+    const { draft, conditions } = conditionsOf(candidateOf(), load);
+    conditions.add(sunSynchronous);
+    await expect.poll(() => load.mock.settledResults[0]?.type).toBe('rejected');
+    expect(conditions.settlement.value).toBeNull();
+    expect(draft.value.conditions).toEqual([sunSynchronous]);
+    draft.value = { ...draft.value, name: 'Shore' };
+    await expect.poll(() => conditions.settlement.value?.ok).toBe(true);
+    draft.value = { ...draft.value, name: 'Coast' };
+    expect(load).toHaveBeenCalledTimes(2);
+  });
+
   it('comes to no orbit before it is there, and to no message either', () => {
     const { conditions } = conditionsOf(candidateOf({}, {}, { conditions: [{ ...sunSynchronous }] }));
     expect(conditions.settlement.value).toBeNull();
