@@ -3,13 +3,13 @@
  *
  * Oblateness in closed form (J2, or J2 and J2²) plus Gauss's equations averaged for every force given. J2 is not
  * averaged numerically, because its square, which an average along the mean orbit cannot see, matters as much as J3.
- * Products of J2 with other forces are left out: about a thousandth of those forces.
+ * Products of J2 with other forces are left out (about a thousandth of those forces) unless `coupling` brings them.
  */
 import type { Body } from '../bodies/body';
 import type { Force } from '../forces/force';
 import type { Sense } from './equinoctial';
 import { gaussAverage } from './gaussAverage';
-import { type OblatenessOrder, oblateness } from './oblateness';
+import { type AddOblateness, type OblatenessOrder, oblateness } from './oblateness';
 
 export interface AveragedModel {
   readonly body: Body;
@@ -19,6 +19,8 @@ export interface AveragedModel {
   readonly oblateness: OblatenessOrder | 'none';
   /** Everything but J2, unless `oblateness` is `none`. */
   readonly forces: readonly Force[];
+  /** Secular rates by products of J2 with the higher zonals. */
+  readonly coupling?: AddOblateness | undefined;
 }
 
 /**
@@ -36,7 +38,7 @@ export class NotAnOrbitError extends Error {
 }
 
 /** The rates of a model. The call throws a NotAnOrbitError for e outside [0, 1), a ≤ 0 or elements that are not finite. */
-export function averagedRates({ body, sense, oblateness: order, forces }: AveragedModel): AveragedRates {
+export function averagedRates({ body, sense, oblateness: order, forces, coupling }: AveragedModel): AveragedRates {
   const addAverage = gaussAverage(body.muKm3PerS2, forces, sense);
   const addOblateness = order === 'none' ? null : oblateness(body, order, sense);
   return (rates, values, jd) => {
@@ -48,6 +50,7 @@ export function averagedRates({ body, sense, oblateness: order, forces }: Averag
     rates.fill(0);
     rates[5] = Math.sqrt(body.muKm3PerS2 / a) / a;
     addOblateness?.(rates, values);
+    coupling?.(rates, values);
     addAverage(rates, values, jd);
   };
 }

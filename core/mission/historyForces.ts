@@ -15,6 +15,8 @@ export interface LeftOutForce {
 export interface HistoryModel {
   /** J2 and its square in closed form, or nothing. */
   readonly oblateness: 'second' | 'none';
+  /** Highest zonal whose product with J2 counts; 0 where there is none. */
+  readonly coupledDegree: number;
   /** Averaged by quadrature. */
   readonly forces: readonly Force[];
   readonly leftOut: readonly LeftOutForce[];
@@ -27,7 +29,8 @@ export function historyModel(body: Body, asked: HistoryForces, epochJdUtc: numbe
   const { zonalDegree, sun, moon, drag } = asked;
   const known = body.zonals.length - 1;
   const highest = Math.min(zonalDegree, known);
-  if (highest >= 3 && body.zonals.some((zonal, n) => n >= 3 && n <= highest && zonal !== 0)) {
+  const higher = highest >= 3 && body.zonals.some((zonal, n) => n >= 3 && n <= highest && zonal !== 0);
+  if (higher) {
     forces.push(zonalForce(body, { from: 3, to: highest }));
   }
   if (zonalDegree > known) {
@@ -41,5 +44,6 @@ export function historyModel(body: Body, asked: HistoryForces, epochJdUtc: numbe
   else if (moon) leftOut.push({ force: 'moon', reason: why('a moon of') });
   if (drag && isEarth) forces.push(dragForce(body, drag, { along: 'mean' }));
   else if (drag) leftOut.push({ force: 'drag', reason: why('the air of') });
-  return { oblateness: zonalDegree >= 2 ? 'second' : 'none', forces, leftOut };
+  const oblateness = zonalDegree >= 2 ? 'second' : 'none';
+  return { oblateness, coupledDegree: higher ? highest : 0, forces, leftOut };
 }

@@ -7,6 +7,7 @@ import type { HistoryModel } from './historyForces';
 import type { HistoryRequest } from './historyRequest';
 import { type HistorySample, sampleTaker } from './historySamples';
 import { perigeeHeightKm, stepLimit } from './historyStepLimit';
+import { zonalCoupling } from './zonalCoupling';
 
 /** `escape`: the orbit opened, or changed faster than any step; averaging has lost its meaning. */
 export type HistoryEnd = 'span' | 'decay' | 'escape';
@@ -39,7 +40,8 @@ interface Place {
 export function historyTrack(request: HistoryRequest, model: HistoryModel, setting: TrackSetting): HistoryTrack {
   const { body, mean, spanDays, epochJd } = request;
   const sense = senseOf(mean.inclinationRad);
-  const rates = averagedRates({ body, sense, oblateness: model.oblateness, forces: model.forces });
+  const coupling = model.coupledDegree > 2 ? zonalCoupling(body, model.coupledDegree, sense) : undefined;
+  const rates = averagedRates({ body, sense, oblateness: model.oblateness, forces: model.forces, coupling });
   const taker = sampleTaker(mean, request.sampleDays, sense);
   const ended = (endedBy: HistoryEnd, endDays: number): HistoryTrack => ({ samples: taker.samples, endedBy, endDays });
   const drags = model.forces.some(({ id }) => id === 'drag');
