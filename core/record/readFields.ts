@@ -6,12 +6,15 @@
 import type { FieldId } from './candidate';
 import { type NumberResult, readNumber } from './numberText';
 import type { FieldError, Notice } from './resolved';
+import { typedUnit } from './typedUnit';
 
 /** A field by its name on screen and what it expects, as an end to "type …". */
 export interface FieldWords<Field extends string = FieldId> {
   readonly field: Field;
   readonly label: string;
   readonly expected: string;
+  /** The unit of the field; with it, or another of its kind, typed behind the number, the number is read in that. */
+  readonly unit?: string | undefined;
   /** Which values can be meant here: where only one reading of "97,679" can, it is taken. */
   readonly meant?: (value: number) => boolean;
 }
@@ -45,9 +48,10 @@ export function fieldReader<Field extends string>(texts: Readonly<Record<Field, 
   const number = (words: FieldWords<Field>): number | null => {
     const text = texts[words.field];
     if (text.length > longest) return leave(words.field, tooLong(text, words));
-    const result = meantReading(readNumber(text.trim()), words);
-    if (result.ok && Math.abs(result.value) <= largest) return result.value;
-    return leave(words.field, result.ok ? tooLarge(words) : numberError(result, words, text));
+    const typed = typedUnit(text.trim(), words.unit);
+    const result = meantReading(readNumber(typed.number), words);
+    if (result.ok && Math.abs(result.value * typed.factor) <= largest) return result.value * typed.factor;
+    return leave(words.field, result.ok ? tooLarge(words) : numberError(result, words, { text, unit: typed.unit }));
   };
   return {
     errors,
@@ -69,10 +73,27 @@ function meantReading(result: NumberResult, { meant }: Pick<FieldWords, 'meant'>
   return only !== undefined && others.length === 0 ? { ok: true, value: only.value } : result;
 }
 
-type Words = Pick<FieldWords, 'label' | 'expected'>;
+type Words = Pick<FieldWords, 'label' | 'expected' | 'unit'>;
 type Unread = Extract<NumberResult, { ok: false }>;
 
-function numberError(result: Unread, words: Words, text: string): FieldError {
+interface Typed {
+  readonly text: string;
+  /** The unit behind the number, if one was typed. */
+  readonly unit: string | null;
+}
+
+/** Each reading in words: "1.234 km (decimal)". */
+function choicesOf(result: Unread, words: Words, typed: Typed): NonNullable<FieldError['choices']> {
+  const unit = typed.unit ?? words.unit ?? '';
+  const shown = unit === '°' || unit === '' ? unit : ` ${unit}`;
+  return (result.readings ?? []).map(({ text }) => ({
+    text: typed.unit === null ? text : `${text} ${typed.unit}`,
+    label: `${text.replace('-', '\u2212')}${shown} (${text.includes('.') ? 'decimal' : 'thousands'})`,
+  }));
+}
+
+function numberError(result: Unread, words: Words, typed: Typed): FieldError {
+  const { text } = typed;
   const { label, expected } = words;
   switch (result.problem) {
     case 'empty':
@@ -80,7 +101,7 @@ function numberError(result: Unread, words: Words, text: string): FieldError {
     case 'ambiguous':
       return {
         message: `${label}: “${quoted(text)}” can be read two ways; choose which is meant.`,
-        choices: (result.readings ?? []).map((reading) => ({ text: reading.text, label: reading.text })),
+        choices: choicesOf(result, words, typed),
       };
     case 'tooLarge':
       return tooLarge(words);

@@ -10,8 +10,13 @@ export function readAltitudes(entry: OrbitEntry, body: Body | null, reader: Fiel
   const unit = entry.lengthUnit;
   const example = unit === 'km' ? '550' : '297';
   const expected = `the altitude above the equatorial radius in ${unit}, such as ${example}`;
-  const perigee = reader.number({ field: 'perigeeAltitude', label: apsidesAt('Perigee altitude', body), expected });
-  const apogee = reader.number({ field: 'apogeeAltitude', label: apsidesAt('Apogee altitude', body), expected });
+  const perigee = reader.number({
+    field: 'perigeeAltitude',
+    label: apsidesAt('Perigee altitude', body),
+    expected,
+    unit,
+  });
+  const apogee = reader.number({ field: 'apogeeAltitude', label: apsidesAt('Apogee altitude', body), expected, unit });
   if (perigee !== null && apogee !== null && apogee < perigee) {
     const message = `Apogee altitude ${plainNumber(apogee)} ${unit} is below the perigee altitude ${plainNumber(perigee)} ${unit}; type the larger one as apogee.`;
     return reader.fail('apogeeAltitude', apsidesAt(message, body));

@@ -35,7 +35,8 @@ export function readBody(candidate: Candidate, reader: FieldReader): Body | null
 }
 
 function positive(reader: FieldReader, field: FieldId, label: string, unitAndExample: string): number | null {
-  const value = reader.number({ field, label, expected: `a number above 0, in ${unitAndExample}` });
+  const unit = unitAndExample.split(',')[0];
+  const value = reader.number({ field, label, unit, expected: `a number above 0, in ${unitAndExample}` });
   if (value === null || value > 0) return value;
   return reader.fail(field, `${label} is ${plainNumber(value)}; expected a number above 0, in ${unitAndExample}.`);
 }
@@ -60,7 +61,7 @@ function readFlattening(reader: FieldReader): number | null | undefined {
 /** A sidereal day in hours, negative on a retrograde rotator, becomes a rate. */
 function readRotation(reader: FieldReader): number | null | undefined {
   const expected = 'the sidereal day in hours, such as 23.9345, negative where the body turns backwards';
-  const hours = reader.optionalNumber({ field: 'bodyDay', label: 'Sidereal day', expected });
+  const hours = reader.optionalNumber({ field: 'bodyDay', label: 'Sidereal day', unit: 'h', expected });
   if (hours === null || hours === undefined) return hours;
   if (Math.abs(hours) < 0.01)
     return reader.fail('bodyDay', `Sidereal day is ${plainNumber(hours)} h; expected ${expected}.`);
@@ -69,7 +70,7 @@ function readRotation(reader: FieldReader): number | null | undefined {
 
 function readYear(reader: FieldReader): number | null | undefined {
   const expected = 'the year in days of 86 400 s, above 0, such as 365.2422';
-  const days = reader.optionalNumber({ field: 'bodyYear', label: 'Year', expected });
+  const days = reader.optionalNumber({ field: 'bodyYear', label: 'Year', unit: 'd', expected });
   if (days === null || days === undefined || days > 0) return days;
   return reader.fail('bodyYear', `Year is ${plainNumber(days)}; expected ${expected}.`);
 }

@@ -17,7 +17,7 @@ export function readShape(entry: OrbitEntry, body: Body | null, reader: FieldRea
 function readSemiMajorAxis(entry: OrbitEntry, body: Body | null, reader: FieldReader): number | null {
   const unit = entry.lengthUnit;
   const expected = `a length above 0 in ${unit}, from the centre of the body, such as ${unit === 'km' ? '6928' : '3741'}`;
-  const typed = reader.number({ field: 'semiMajorAxis', label: 'Semi-major axis', expected });
+  const typed = reader.number({ field: 'semiMajorAxis', label: 'Semi-major axis', unit, expected });
   if (typed === null) return null;
   const km = typed * kmPerLengthUnit(entry);
   if (km > leastShare * (body?.radiusKm ?? 0) && km <= largestRadiusKm) return km;

@@ -33,7 +33,7 @@ export function readOrientation(
 function readInclination(reader: FieldReader): number | null {
   const expected = 'degrees from 0 to 180';
   const meant = (value: number) => value >= 0 && value <= 180;
-  const degrees = reader.number({ field: 'inclination', label: 'Inclination', expected, meant });
+  const degrees = reader.number({ field: 'inclination', label: 'Inclination', unit: '°', expected, meant });
   if (degrees === null) return null;
   if (meant(degrees)) return degrees * radPerDeg;
   return reader.fail('inclination', `Inclination is ${plainNumber(degrees)}°; expected ${expected}.`);
@@ -42,7 +42,7 @@ function readInclination(reader: FieldReader): number | null {
 /** Any real number of degrees; whole turns are taken off. */
 function readAngle(reader: FieldReader, field: FieldId, label: string): number | null {
   const meant = (value: number) => Math.abs(value) <= 360;
-  const degrees = reader.number({ field, label, expected: 'degrees, such as 247.5', meant });
+  const degrees = reader.number({ field, label, unit: '°', expected: 'degrees, such as 247.5', meant });
   return degrees === null ? null : wrapTwoPi((degrees % 360) * radPerDeg);
 }
 

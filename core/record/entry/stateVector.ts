@@ -30,6 +30,7 @@ function readSixNumbers(entry: OrbitEntry, reader: FieldReader): StateVector | n
     const value = reader.number({
       field,
       label: index < 3 ? `Position ${field}` : `Velocity ${field.slice(1)}`,
+      unit,
       expected: `a number in ${unit}`,
     });
     return value === null ? null : value * perUnit;

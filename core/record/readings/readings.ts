@@ -61,9 +61,9 @@ export interface AbsentReading {
   readonly reason: string;
 }
 
-/** Readings the orbit does not have, each with the reason. */
-export function absentReadings(orbit: ReadingPoint): AbsentReading[] {
-  const noHeights = heightValues(orbit) === null;
+/** Readings the orbit does not have, each with the reason; given those it has, heights need no second walk along it. */
+export function absentReadings(orbit: ReadingPoint, present?: readonly Reading[]): AbsentReading[] {
+  const noHeights = present ? !present.some(({ id }) => isHeight(id)) : heightValues(orbit) === null;
   return specs.flatMap((spec) => {
     const reason =
       noHeights && isHeight(spec.id) ? 'J2 is too large a correction on this orbit.' : spec.missing?.(orbit);

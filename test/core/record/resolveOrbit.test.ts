@@ -53,7 +53,41 @@ describe('altitudes', () => {
     const result = resolveOrbit(candidateWith({ apogeeAltitude: '1,234' }));
     expect(result).toMatchObject({
       ok: false,
-      errors: { apogeeAltitude: { choices: [{ text: '1.234' }, { text: '1234' }] } },
+      errors: {
+        apogeeAltitude: {
+          choices: [
+            { text: '1.234', label: '1.234 km (decimal)' },
+            { text: '1234', label: '1234 km (thousands)' },
+          ],
+        },
+      },
+    });
+    expect(resolveOrbit(candidateWith({ node: '1,234' }))).toMatchObject({ ok: true });
+  });
+
+  it('may carry their unit, or another of its kind', () => {
+    const plain = resolved({ perigeeAltitude: '550', apogeeAltitude: '561', inclination: '97.4' }).mean;
+    for (const apogeeAltitude of ['561 km', '561km', '561000 m', '561,0 km']) {
+      const typed = { perigeeAltitude: '550', apogeeAltitude, inclination: '97.4°' };
+      expect(resolved(typed).mean.semiMajorAxisKm).toBeCloseTo(plain.semiMajorAxisKm, 9);
+    }
+    for (const inclination of ['97.4°', '97.4 deg', '97.4 degrees']) {
+      expect(resolved({ inclination }).mean.inclinationRad).toBe(plain.inclinationRad);
+    }
+    const miles = resolved({ perigeeAltitude: '300 NM', apogeeAltitude: '300 nmi' }).mean;
+    expect(miles.semiMajorAxisKm).toBeCloseTo(6378.137 + 300 * 1.852, 9);
+    expect(resolved({ perigeeAltitude: '300', apogeeAltitude: '555.6 km' }, { lengthUnit: 'NM' }).mean).toEqual(
+      resolved({ perigeeAltitude: '300', apogeeAltitude: '300' }, { lengthUnit: 'NM' }).mean,
+    );
+  });
+
+  it.each(['561 nm', '561 ft', '561 °', '561 km/s', 'km', '561 km 3'])('with another unit are refused: %s', (text) => {
+    expect(Object.keys(messages({ apogeeAltitude: text }))).toEqual(['apogeeAltitude']);
+  });
+
+  it('that read two ways keep the unit typed', () => {
+    expect(resolveOrbit(candidateWith({ apogeeAltitude: '1,234 NM' }))).toMatchObject({
+      errors: { apogeeAltitude: { choices: [{ text: '1.234 NM', label: '1.234 NM (decimal)' }, { text: '1234 NM' }] } },
     });
   });
 });
