@@ -7,8 +7,8 @@ import { offlineWorker } from './web/build/offlineWorker.ts';
 
 const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
 
-/** What conditions are called and how they are read: none of it is needed for an orbit that has none. */
-const conditions = /[\\/]core[\\/]record[\\/]conditions[\\/](kinds|readConditions)/;
+/** What conditions and limits are called and how they are read: none of it is needed for an orbit that has none. */
+const conditions = /[\\/]core[\\/]record[\\/](conditions[\\/](kinds|readConditions)|limit|storedLimit)/;
 
 /** Fetched when a condition, a chart or the book asks for it. */
 const onDemand =

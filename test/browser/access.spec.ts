@@ -1,7 +1,4 @@
-import { readFile } from 'node:fs/promises';
-import { createRequire } from 'node:module';
 import { expect, type Page, test } from '@playwright/test';
-import type { AxeResults } from 'axe-core';
 import {
   button,
   choose,
@@ -17,37 +14,19 @@ import {
   startBrowser,
   unfold,
 } from './app';
+import { violations } from './axe';
 import { type StaticServer, startServer } from './server';
 
 /** axe-core on every place, in every lighting, at every size, and in the states that are seldom looked at. */
 test.describe.configure({ mode: 'parallel' });
 
 let server: StaticServer;
-let axeSource: string;
 test.beforeAll(async () => {
   server = await startServer();
-  axeSource = await readFile(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
 });
 test.afterAll(async () => {
   await server.stop();
 });
-
-/** Every violation as one line, with how many elements it is found at and the first of them. */
-async function violations(page: Page, where: string): Promise<string[]> {
-  // The policy of the page blocks a script element; evaluation by the browser's own tools is not under it.
-  if (!(await page.evaluate(() => 'axe' in window))) await page.evaluate(axeSource);
-  // A fade that is still going on would be measured half way.
-  await page.evaluate(() => Promise.all(document.getAnimations().map(({ finished }) => finished)));
-  const results = (await page.evaluate(() => {
-    const axe = Reflect.get(window, 'axe') as { run(): Promise<unknown> };
-    return axe.run();
-  })) as AxeResults;
-  return results.violations.map(({ id, help, nodes }) => {
-    const first = nodes[0];
-    const why = [...(first?.any ?? []), ...(first?.all ?? []), ...(first?.none ?? [])].map(({ message }) => message);
-    return `${where}: ${id} (${help}) at ${nodes.length}, as ${first?.target.join(' ')}: ${why.join('; ')}`;
-  });
-}
 
 const lightings = ['room', 'sunlight', 'night'] as const;
 

@@ -1,7 +1,9 @@
 /** The readings: value large, what would change it small, the working behind a tap. */
 import { useEffect, useRef } from 'preact/hooks';
-import { kmPerLengthUnit, marginText, type Reading } from '../../core/index';
+import { kmPerLengthUnit, type Reading } from '../../core/index';
 import { doubtText, quantityText, roundedText, usePreferredUnit, useReadingText } from '../parts/readingText';
+import { useInView } from '../parts/useInView';
+import { useRested } from '../parts/useRested';
 import { useApp } from '../state/appContext';
 
 const levelNames = { geometry: '', first: 'first order', second: 'second order' } as const;
@@ -17,11 +19,7 @@ export function ReadingsList() {
   return (
     <section class="readings" aria-label="Readings">
       {isStale && <p class="stale-says">Readings of the last good entry; the one above is being changed.</p>}
-      <ul class={isStale ? 'is-stale' : ''}>
-        {readings.map((reading) => (
-          <ReadingRow key={reading.id} reading={reading} />
-        ))}
-      </ul>
+      <Rows readings={readings} isStale={isStale} />
       {absent.length > 0 && (
         <ul class="readings-absent">
           {absent.map(({ label, reason }) => (
@@ -35,13 +33,42 @@ export function ReadingsList() {
   );
 }
 
-function ReadingRow({ reading }: { readonly reading: Reading }) {
+interface RowsProps {
+  readonly readings: readonly Reading[];
+  readonly isStale: boolean;
+}
+
+/**
+ * While the orbit moves, rows in view follow every step; rows out of view, and what would change each number, wait until
+ * it rests, so that a drag stays ahead of the finger on a slow tablet.
+ */
+function Rows({ readings, isStale }: RowsProps) {
+  const list = useRef<HTMLUListElement>(null);
+  const rested = useRested(readings);
+  const isInView = useInView(list, readings.length);
+  return (
+    <ul ref={list} class={isStale ? 'is-stale' : ''}>
+      {readings.map((reading) => {
+        const calm = rested.find(({ id }) => id === reading.id) ?? reading;
+        return <ReadingRow key={reading.id} reading={isInView(reading.id) ? reading : calm} calm={calm} />;
+      })}
+    </ul>
+  );
+}
+
+interface RowProps {
+  readonly reading: Reading;
+  /** As of when the orbit last rested. */
+  readonly calm: Reading;
+}
+
+function ReadingRow({ reading, calm }: RowProps) {
   const { openWorking } = useApp();
   const text = useReadingText(reading);
   const isOpen = openWorking.value === reading.id;
   const button = useFocusAfter(isOpen);
   return (
-    <li>
+    <li data-reading={reading.id}>
       <button
         ref={button}
         type="button"
@@ -55,7 +82,7 @@ function ReadingRow({ reading }: { readonly reading: Reading }) {
         <span class="reading-value">
           {text.value} <span class="unit">{text.unit}</span>
         </span>
-        <Sensitivity reading={reading} />
+        <Sensitivity reading={calm} />
         <Order reading={reading} />
         <Margins reading={reading} />
         {reading.remark && <span class="reading-remark">{reading.remark}</span>}
@@ -68,13 +95,14 @@ function ReadingRow({ reading }: { readonly reading: Reading }) {
 function Margins({ reading }: { readonly reading: Reading }) {
   const { document } = useApp();
   const unit = usePreferredUnit()(reading.quantity);
+  const reader = document.limits.reader.value;
   const margins = document.limits.margins.value.filter(({ entry }) => entry.reading === reading.id);
-  if (margins.length === 0) return null;
+  if (!reader || margins.length === 0) return null;
   return (
     <span class="reading-margins">
       {margins.map((margin) => (
         <span key={margin.place} class={`margin is-${margin.state}`}>
-          {marginText(margin, unit)}
+          {reader.marginText(margin, unit)}
         </span>
       ))}
     </span>
@@ -105,11 +133,14 @@ function Sensitivity({ reading }: { readonly reading: Reading }) {
     { value: perKm * kmPerUnit, per: `1 ${lengthUnit}` },
     { value: perHundredthDegree, per: '0.01°' },
     { value: perThousandth, per: '0.001 e' },
-  ].map(({ value, per }) => `+${per} ${roundedText(reading.quantity, value, { unitId, plus: true })}`);
+  ].map(({ value, per }) => ({
+    per,
+    text: `+${per} ${roundedText(reading.quantity, value, { unitId, plus: true })}`,
+  }));
   return (
     <span class="reading-sub">
-      {parts.map((part) => (
-        <span key={part}>{part}</span>
+      {parts.map(({ per, text }) => (
+        <span key={per}>{text}</span>
       ))}
     </span>
   );

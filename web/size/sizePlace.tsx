@@ -1,5 +1,5 @@
 /** Which orbit? The answer, its picture, the entry and the readings. */
-import { headlineOf, limitsSentence, type Reading, type ReadingId } from '../../core/index';
+import { headlineOf, type Reading, type ReadingId } from '../../core/index';
 import { later } from '../parts/later';
 import { useReadingText } from '../parts/readingText';
 import { useScrollFocus } from '../parts/useScrollFocus';
@@ -52,7 +52,7 @@ function Headline() {
   return (
     <h1 class={`headline${document.stale.value ? ' is-stale' : ''}`}>
       {spans.map((span, index) => (
-        <span key={`${index}${span.text}`} class={spanClass(span)}>
+        <span key={`${index}${span.mark}`} class={spanClass(span)}>
           {span.text.replace('deg/', '°/')}
         </span>
       ))}
@@ -63,8 +63,9 @@ function Headline() {
 /** Only what is wrong: limits that are kept stand at their readings. */
 function BrokenLimits() {
   const { document } = useApp();
-  const { read, margins } = document.limits;
-  const text = limitsSentence({ read: read.value, margins: margins.value }, document.readings.value);
+  const { reader, read, margins } = document.limits;
+  const judged = { read: read.value, margins: margins.value };
+  const text = reader.value?.limitsSentence(judged, document.readings.value);
   return <div role="status">{text && <p class="limits-broken">{text}</p>}</div>;
 }
 

@@ -80,13 +80,13 @@ export function createDocument(initial: OpenCandidate): OrbitDocument {
     baseRevision,
     entered,
     conditions,
-    limits: createLimits(draft, readings),
+    limits: createLimits(draft, readings, () => import('./limitReader')),
     settled: computed(() => settledFields(conditions.settlement.value, draft.value.entry)),
     resolution,
     orbit,
     readings,
     stale: computed(() => !resolution.value.ok),
-    absentReadings: computed(() => (orbit.value ? absentReadings(orbit.value) : [])),
+    absentReadings: computed(() => (orbit.value ? absentReadings(orbit.value, readings.value) : [])),
     notices: computed(() => {
       const said = resolution.value.notices;
       const warnings = orbit.value ? warningsOf(orbit.value, readings.value) : [];
