@@ -11,7 +11,6 @@ import { drawMarks } from './drawMarks';
 import { type LabelBox, labelPlaces } from './labels';
 import { nameAtTop } from './nameAtTop';
 import { nameRates, nameRepeats } from './nameCurves';
-import { curvesUnder } from './nearText';
 import type { OtherOrbit } from './otherOrbits';
 
 export interface LayerInput {
@@ -108,7 +107,7 @@ function drawAbove(surface: ChartSurface, { chart, others, written }: AboveParts
   if (!mapping || !point) return;
   const units = chart.app.preferences.values.peek();
   const isDragging = chart.isDragging.peek();
-  const under = curvesUnder(point, chart.curves.peek());
+  const under = chart.under.peek();
   // At rest what is held needs no name here: it stands beside the entry.
   const on = under.filter(({ isHeld }) => isDragging || !isHeld).map(({ curve }) => curveName(curve.condition, units));
   const isOn = under.length > 0;

@@ -13,6 +13,7 @@ import type { AppState } from '../../state/appState';
 import { type ShownCurve, shownCurves } from './chartCurvesShown';
 import { isWithin, wholeWindow } from './chartWindow';
 import { type Held, heldBy } from './heldCurves';
+import { curvesUnder } from './nearText';
 import { type ChartSize, type Mapping, mappingOf, plotBoxOf } from './plotBox';
 
 export interface Chart {
@@ -32,6 +33,8 @@ export interface Chart {
   readonly curves: ReadonlySignal<readonly ShownCurve[]>;
   /** Where the orbit stands. */
   readonly point: ReadonlySignal<ChartPoint | null>;
+  /** The curves it lies on. */
+  readonly under: ReadonlySignal<readonly ShownCurve[]>;
 }
 
 export function createChart(app: AppState): Chart {
@@ -56,27 +59,11 @@ export function createChart(app: AppState): Chart {
     return size.value && window ? mappingOf(plotBoxOf(size.value), window) : null;
   });
   const held = heldIn(app, point);
-  return {
-    app,
-    holds,
-    size,
-    zoom,
-    isDragging,
-    body,
-    shape,
-    mapping,
-    held,
-    curves: computed(() =>
-      curvesOf(app, {
-        body: body.value,
-        shape: shape.value,
-        mapping: mapping.value,
-        size: size.value,
-        held: held.value,
-      }),
-    ),
-    point,
-  };
+  const curves = computed(() => curvesOf(app, { body, shape, mapping, size, held }));
+  const under = computed(() =>
+    point.value && mapping.value ? curvesUnder(point.value, curves.value, mapping.value.scale) : [],
+  );
+  return { app, holds, size, zoom, isDragging, body, shape, mapping, held, curves, point, under };
 }
 
 /** Read when the conditions change, or 90° is passed, rather than in every frame of a drag. */
@@ -88,18 +75,13 @@ function heldIn({ document }: AppState, point: ReadonlySignal<ChartPoint | null>
 
 const nothingHeld: Held = { conditions: [], settled: new Set() };
 
-interface CurveParts {
-  readonly body: Body | null;
-  readonly shape: ChartShape | null;
-  readonly mapping: Mapping | null;
-  readonly size: ChartSize | null;
-  readonly held: Held;
-}
+type CurveParts = Pick<Chart, 'body' | 'shape' | 'mapping' | 'size' | 'held'>;
 
-function curvesOf(app: AppState, { body, shape, mapping, size, held }: CurveParts): readonly ShownCurve[] {
+function curvesOf(app: AppState, chart: CurveParts): readonly ShownCurve[] {
   const { rateUnit } = app.preferences.values.value;
+  const [body, shape, mapping, size] = [chart.body.value, chart.shape.value, chart.mapping.value, chart.size.value];
   if (!body || !shape || !mapping || !size) return [];
-  return shownCurves({ body, shape, mapping, fontPx: size.fontPx, held: held.conditions, rateUnit });
+  return shownCurves({ body, shape, mapping, fontPx: size.fontPx, held: chart.held.value.conditions, rateUnit });
 }
 
 /** A computed value that stays the very same object while it is as good as the one before. */
@@ -120,9 +102,9 @@ function sameBody(before: Body | null, now: Body | null): boolean {
 /** What fields of altitudes round e and perigee to makes no new chart. */
 function sameShape(before: ChartShape | null, now: ChartShape | null): boolean {
   if (before?.kind === 'eccentricity' && now?.kind === 'eccentricity') {
-    return Math.abs(before.eccentricity - now.eccentricity) < 1e-8;
+    return Math.abs(before.eccentricity - now.eccentricity) < 5e-8;
   }
-  if (before?.kind === 'perigeeAltitude' && now?.kind === 'perigeeAltitude') return Math.abs(before.km - now.km) < 1e-4;
+  if (before?.kind === 'perigeeAltitude' && now?.kind === 'perigeeAltitude') return Math.abs(before.km - now.km) < 5e-4;
   return before === now;
 }
 

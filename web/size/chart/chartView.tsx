@@ -1,10 +1,11 @@
 /** The rate chart: inclination over mean altitude, the curves of the conditions, the candidate as a mark to drag. */
-import type { Signal } from '@preact/signals';
+import { type Signal, useComputed } from '@preact/signals';
 import { useEffect, useMemo, useRef, useState } from 'preact/hooks';
-import { type Candidate, type ChartShape, formatNumber, type ResolvedOrbit, unitOf } from '../../../core/index';
+import { type Candidate, type ChartShape, formatNumber, unitOf } from '../../../core/index';
 import { Choice } from '../../parts/choice';
 import { createFrame } from '../../parts/frame';
 import { useApp } from '../../state/appContext';
+import type { AppState } from '../../state/appState';
 import './chart.css';
 import { drawLayers } from './chartLayers';
 import { type Chart, createChart } from './chartState';
@@ -14,33 +15,36 @@ import { moveByKey } from './keys';
 import { useOtherOrbits } from './otherOrbits';
 import { zoomAt } from './steering';
 
-export function ChartView({ orbit }: { readonly orbit: ResolvedOrbit }) {
+/** Drawn once: whatever moves in it follows the signals of the chart by itself. */
+export function ChartView() {
   const app = useApp();
   const chart = useMemo(() => createChart(app), [app]);
   const [before, setBefore] = useState<Candidate | null>(null);
-  return (
-    <figure class="rate-map">
-      <figcaption>
-        <span class="figure-title">Rate chart</span>
-        <ChartTools chart={chart} orbit={orbit} />
-      </figcaption>
-      <Plot chart={chart} onMoved={setBefore} />
-      <ChartWords chart={chart} before={before} onPutBack={() => setBefore(null)} />
-    </figure>
+  return useMemo(
+    () => (
+      <figure class="rate-map">
+        <figcaption>
+          <span class="figure-title">Rate chart</span>
+          <ChartTools chart={chart} />
+        </figcaption>
+        <Plot chart={chart} onMoved={setBefore} />
+        <ChartWords chart={chart} before={before} onPutBack={() => setBefore(null)} />
+      </figure>
+    ),
+    [chart, before],
   );
 }
 
 const zoomStep = 1.8;
 
-function ChartTools({ chart, orbit }: { readonly chart: Chart; readonly orbit: ResolvedOrbit }) {
-  const { lengthUnit } = chart.app.preferences.values.value;
-  const { symbol, perCore } = unitOf('length', lengthUnit);
-  const { semiMajorAxisKm: a, eccentricity: e } = orbit.mean;
-  const perigee = formatNumber((a * (1 - e) - orbit.body.equatorialRadiusKm) * perCore, { digits: 0 });
-  const apsis = orbit.body.id === 'earth' ? 'perigee' : 'periapsis';
+function ChartTools({ chart }: { readonly chart: Chart }) {
+  const eccentricity = useComputed(
+    () => `e ${formatNumber(chart.app.document.orbit.value?.mean.eccentricity ?? 0, { digits: 4 })}`,
+  );
+  const perigee = useComputed(() => perigeeText(chart.app));
   const options: readonly { readonly value: ChartShape['kind']; readonly label: string }[] = [
-    { value: 'eccentricity', label: `e ${formatNumber(e, { digits: 4 })}` },
-    { value: 'perigeeAltitude', label: `${apsis} ${perigee} ${symbol}` },
+    { value: 'eccentricity', label: eccentricity.value },
+    { value: 'perigeeAltitude', label: perigee.value },
   ];
   return (
     <div class="rate-map-tools">
@@ -64,6 +68,15 @@ function ChartTools({ chart, orbit }: { readonly chart: Chart; readonly orbit: R
       </div>
     </div>
   );
+}
+
+function perigeeText({ document, preferences }: AppState): string {
+  const orbit = document.orbit.value;
+  if (!orbit) return 'perigee';
+  const { symbol, perCore } = unitOf('length', preferences.values.value.lengthUnit);
+  const { semiMajorAxisKm: a, eccentricity: e } = orbit.mean;
+  const altitude = formatNumber((a * (1 - e) - orbit.body.equatorialRadiusKm) * perCore, { digits: 0 });
+  return `${orbit.body.id === 'earth' ? 'perigee' : 'periapsis'} ${altitude} ${symbol}`;
 }
 
 function choose<Value>(target: Signal<Value>): (value: Value) => void {

@@ -1,12 +1,12 @@
 /** Under the chart: what is near, in words, and the one tap that holds what the orbit snapped to. */
-import { useComputed } from '@preact/signals';
+import { type ReadonlySignal, useComputed } from '@preact/signals';
 import { useEffect, useState } from 'preact/hooks';
 import type { Candidate } from '../../../core/index';
 import type { ShownCurve } from './chartCurvesShown';
 import type { Chart } from './chartState';
 import { curveName } from './curveNames';
 import { heldCurve, holdCurves } from './moveOrbit';
-import { curvesUnder, nearText } from './nearText';
+import { nearText } from './nearText';
 
 interface WordsProps {
   readonly chart: Chart;
@@ -16,53 +16,47 @@ interface WordsProps {
 }
 
 export function ChartWords({ chart, before, onPutBack }: WordsProps) {
-  const { document, store } = chart.app;
-  const words = useComputed(() => {
-    const { mapping, point, curves } = {
-      mapping: chart.mapping.value,
-      point: chart.point.value,
-      curves: chart.curves.value,
-    };
-    if (!mapping || !point) return '';
-    const near = nearText(point, curves, mapping.scale, chart.app.preferences.values.value);
-    return chart.held.value && heldCurve(chart).isFixed
-      ? `${near} Conditions settle both altitude and inclination.`
-      : near;
-  });
-  const canPutBack = before !== null && before.id === document.draft.value.id && before !== document.draft.value;
+  const { store } = chart.app;
+  const words = useComputed(() => wordsOf(chart));
   return (
     <div class="rate-map-words">
-      <p class="small">{words.value}</p>
-      <Spoken text={words.value} />
+      <p class="small">{words}</p>
+      <Spoken words={words} />
       {!store.tabs.editorElsewhere.value && (
         <div class="rate-map-holds">
-          <Holds chart={chart} />
-          {canPutBack && (
-            <button
-              type="button"
-              onClick={() => {
-                if (before) document.restoreDraft(before);
-                onPutBack();
-              }}
-            >
-              Put back
-            </button>
-          )}
+          <Hold chart={chart} />
+          {before && <PutBack chart={chart} before={before} onPutBack={onPutBack} />}
         </div>
       )}
     </div>
   );
 }
 
+function wordsOf(chart: Chart): string {
+  const [mapping, point] = [chart.mapping.value, chart.point.value];
+  if (!mapping || !point) return '';
+  const around = { point, shown: chart.curves.value, under: chart.under.value, scale: mapping.scale };
+  const near = nearText(around, chart.app.preferences.values.value);
+  const { isFixed } = heldCurve(chart, chart.held.value);
+  return isFixed ? `${near} Conditions settle both altitude and inclination.` : near;
+}
+
 const quietMs = 600;
 
 /** Said once the orbit has come to rest, not at every step of a drag. */
-function Spoken({ text }: { readonly text: string }) {
+function Spoken({ words }: { readonly words: ReadonlySignal<string> }) {
   const [said, setSaid] = useState('');
   useEffect(() => {
-    const timer = setTimeout(() => setSaid(text), quietMs);
-    return () => clearTimeout(timer);
-  }, [text]);
+    let timer = 0;
+    const stop = words.subscribe((text) => {
+      clearTimeout(timer);
+      timer = window.setTimeout(() => setSaid(text), quietMs);
+    });
+    return () => {
+      clearTimeout(timer);
+      stop();
+    };
+  }, [words]);
   return (
     <p class="hidden-visually" role="status">
       {said}
@@ -70,17 +64,34 @@ function Spoken({ text }: { readonly text: string }) {
   );
 }
 
-function Holds({ chart }: { readonly chart: Chart }) {
-  const point = chart.point.value;
-  const under = point ? curvesUnder(point, chart.curves.value).filter(({ isHeld }) => !isHeld) : [];
+/** Repeat tracks first: that is how the pair is spoken of. */
+function Hold({ chart }: { readonly chart: Chart }) {
+  const free = chart.under.value.filter(({ isHeld }) => !isHeld);
   const isTrack = ({ curve }: ShownCurve) => curve.condition.kind === 'repeat';
-  const free = [...under.filter(isTrack), ...under.filter((each) => !isTrack(each))];
-  if (free.length === 0) return null;
+  const offered = [...free.filter(isTrack), ...free.filter((each) => !isTrack(each))];
+  if (offered.length === 0) return null;
   const units = chart.app.preferences.values.value;
-  const names = free.map(({ curve }) => curveName(curve.condition, units)).join(' and ');
+  const names = offered.map(({ curve }) => curveName(curve.condition, units)).join(' and ');
   return (
-    <button type="button" onClick={() => holdCurves(chart, free)}>
+    <button type="button" onClick={() => holdCurves(chart, offered)}>
       Hold {names}
+    </button>
+  );
+}
+
+function PutBack({ chart, before, onPutBack }: WordsProps & { readonly before: Candidate }) {
+  const { document } = chart.app;
+  const canPutBack = useComputed(() => before.id === document.draft.value.id && before !== document.draft.value);
+  if (!canPutBack.value) return null;
+  return (
+    <button
+      type="button"
+      onClick={() => {
+        document.restoreDraft(before);
+        onPutBack();
+      }}
+    >
+      Put back
     </button>
   );
 }

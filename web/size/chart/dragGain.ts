@@ -1,6 +1,6 @@
 /** How far the mark follows the finger: all the way when quick, an eighth of it when slow, for a fine drag. */
-const slowPxPerMs = 0.03;
-const quickPxPerMs = 0.2;
+const slowPxPerMs = 0.015;
+const quickPxPerMs = 0.12;
 const finest = 0.125;
 
 export function dragGain(speedPxPerMs: number): number {

@@ -27,6 +27,18 @@ function overlaps(one: LabelBox, other: LabelBox): boolean {
   return one.left < other.right && other.left < one.right && one.top < other.bottom && other.top < one.bottom;
 }
 
+/** The pieces of a stretch that keep out of what blocks it, each by its two ends. */
+export function clearPieces(from: number, to: number, blocked: readonly (readonly [number, number])[]) {
+  const pieces: [number, number][] = [];
+  let at = from;
+  for (const [start, end] of [...blocked].sort(([one], [other]) => one - other)) {
+    if (start > at) pieces.push([at, Math.min(start, to)]);
+    at = Math.max(at, end);
+  }
+  if (at < to) pieces.push([at, to]);
+  return pieces.filter(([start, end]) => end > start);
+}
+
 export interface BoxSize {
   readonly width: number;
   readonly height: number;

@@ -3,7 +3,9 @@ import {
   type ChartCurve,
   type ChartPoint,
   chartFloor,
+  distanceToLinePx,
   eccentricityAt,
+  footOn,
   newCondition,
   readConditions,
   type SnapRequest,
@@ -13,6 +15,7 @@ import { takeElements } from '../../state/entryActions';
 import type { ShownCurve } from './chartCurvesShown';
 import type { Chart } from './chartState';
 import { wishOf } from './curveNames';
+import type { Held } from './heldCurves';
 
 /** Distances, in px, from which a curve and a crossing draw the mark in, at a quick drag. */
 const curveReach = 9;
@@ -27,9 +30,10 @@ export function moveTo(chart: Chart, at: ChartPoint, pull: number): void {
   const { curve, isFixed } = heldCurve(chart);
   if (isFixed) return;
   const share = pull === 0 ? 0 : slowShare + (1 - slowShare) * pull;
+  const start = withinReason(chart, kept(chart, at, curve));
   const request: SnapRequest = {
-    at: withinReason(chart, kept(chart, at, curve)),
-    curves: canSnap(chart, curve) ? chart.curves.peek().map((shown) => shown.curve) : [],
+    at: start,
+    curves: canSnap(chart, curve) ? curvesAround(chart, start, crossingReach) : [],
     scale: mapping.scale,
     reach: { curve: share * curveReach, crossing: share * crossingReach },
     held: curve,
@@ -43,9 +47,23 @@ export function snapToNearest(chart: Chart): void {
   const mapping = chart.mapping.peek();
   const { curve, isFixed } = heldCurve(chart);
   if (!point || !mapping || isFixed || !canSnap(chart, curve)) return;
-  const curves = chart.curves.peek().map((shown) => shown.curve);
   const reach = { curve: 60, crossing: 24 };
+  const curves = curvesAround(chart, point, reach.curve);
   write(chart, snapPoint({ at: point, curves, scale: mapping.scale, reach, held: curve }).point);
+}
+
+/** Those whose drawn line comes near the point, or near the foot of the point on what is held. */
+function curvesAround(chart: Chart, at: ChartPoint, reachPx: number): ChartCurve[] {
+  const mapping = chart.mapping.peek();
+  if (!mapping) return [];
+  const { scale } = mapping;
+  const { curve: held } = heldCurve(chart);
+  const around = held ? (footOn(held, at, scale) ?? at) : at;
+  // The line cuts the curve's corners by less than a few pixels.
+  return chart.curves
+    .peek()
+    .filter(({ line }) => distanceToLinePx(line, around, scale) < reachPx + 6)
+    .map(({ curve }) => curve);
 }
 
 interface HeldCurve {
@@ -54,8 +72,8 @@ interface HeldCurve {
   readonly isFixed: boolean;
 }
 
-export function heldCurve(chart: Chart): HeldCurve {
-  const { settled } = chart.held.peek();
+export function heldCurve(chart: Chart, held: Held = chart.held.peek()): HeldCurve {
+  const { settled } = held;
   const coordinates = Number(settled.has('semiMajorAxisKm')) + Number(settled.has('inclinationRad'));
   const shown = coordinates === 1 ? chart.curves.peek().find(({ isHeld }) => isHeld) : undefined;
   return { curve: shown?.curve, isFixed: coordinates === 2 };

@@ -3,8 +3,7 @@ import {
   type ChartPoint,
   type ChartScale,
   degPerRad,
-  distancePx,
-  footOn,
+  distanceToLinePx,
   formatNumber,
   unitOf,
 } from '../../../core/index';
@@ -20,8 +19,9 @@ const onDeg = 1e-5;
 const onKm = 1e-3;
 
 /** The curves that the orbit lies on, to the rounding of what is typed. */
-export function curvesUnder(at: ChartPoint, curves: readonly ShownCurve[]): ShownCurve[] {
-  return curves.filter(({ curve }) => {
+export function curvesUnder(at: ChartPoint, curves: readonly ShownCurve[], scale: ChartScale): ShownCurve[] {
+  return curves.filter(({ curve, line }) => {
+    if (distanceToLinePx(line, at, scale) > 6) return false;
     const there = curve.inclinationAt?.(at.altitudeKm) ?? null;
     if (there !== null) return Math.abs(there - at.inclinationRad) * degPerRad < onDeg;
     const km = curve.altitudeAt?.(at.inclinationRad) ?? null;
@@ -29,15 +29,22 @@ export function curvesUnder(at: ChartPoint, curves: readonly ShownCurve[]): Show
   });
 }
 
+export interface Surroundings {
+  readonly point: ChartPoint;
+  readonly shown: readonly ShownCurve[];
+  /** Those of them that the orbit lies on. */
+  readonly under: readonly ShownCurve[];
+  readonly scale: ChartScale;
+}
+
 /** Such as "On Sun-synchronous. Near: 15/1 repeat 3.1 km lower." */
-export function nearText(at: ChartPoint, shown: readonly ShownCurve[], scale: ChartScale, units: NearUnits): string {
-  const on = curvesUnder(at, shown);
-  const others = shown.filter((each) => !on.includes(each));
-  const near = [nearestOf(at, others, scale, false), nearestOf(at, others, scale, true)].flatMap((each) =>
-    each ? [awayText(at, each, units)] : [],
+export function nearText({ point, shown, under, scale }: Surroundings, units: NearUnits): string {
+  const others = shown.filter((each) => !under.includes(each));
+  const near = [nearestOf(point, others, scale, false), nearestOf(point, others, scale, true)].flatMap((each) =>
+    each ? [awayText(point, each, units)] : [],
   );
-  const names = on.map((each) => named(each, units)).join(' and ');
-  const sentences = [on.length > 0 ? `On ${names}.` : '', near.length > 0 ? `Near: ${near.join(', ')}.` : ''];
+  const names = under.map((each) => named(each, units)).join(' and ');
+  const sentences = [under.length > 0 ? `On ${names}.` : '', near.length > 0 ? `Near: ${near.join(', ')}.` : ''];
   return sentences.filter(Boolean).join(' ') || 'Near none of the curves.';
 }
 
@@ -48,8 +55,7 @@ function nearestOf(at: ChartPoint, shown: readonly ShownCurve[], scale: ChartSca
   let best: { readonly shown: ShownCurve; readonly px: number } | null = null;
   for (const each of shown) {
     if ((each.curve.condition.kind === 'repeat') !== repeats) continue;
-    const foot = footOn(each.curve, at, scale);
-    const px = foot ? distancePx(foot, at, scale) : Number.POSITIVE_INFINITY;
+    const px = distanceToLinePx(each.line, at, scale);
     if (px < (best?.px ?? Number.POSITIVE_INFINITY)) best = { shown: each, px };
   }
   return best && best.px < nearPx ? best.shown : null;
