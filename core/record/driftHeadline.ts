@@ -8,10 +8,11 @@ import { localTimeDriftSPerS } from '../orbit/localTime';
 import { secularRates } from '../orbit/secularRates';
 import { apsisName, inSentence } from './bodyWords';
 import type { HeadlineSpan } from './headline';
-import { doubtOf } from './readings/doubt';
+import { doubtOf, sunAndMoonDominate } from './readings/doubt';
 import type { ResolvedOrbit } from './resolved';
+import { turnWords } from './turnWords';
 import { formatNumber, unitOf } from './units';
-import { perigeeOffText, smallEccentricity, sunAndMoonDominate, tinyEccentricity } from './warnings';
+import { perigeeOffText, smallEccentricity, tinyEccentricity } from './warnings';
 
 export type RateUnitId = 'degPerDay' | 'degPerYear';
 
@@ -76,7 +77,7 @@ function localTimeSpans(orbit: ResolvedOrbit): HeadlineSpan[] {
   if (perDayMin === null) return [{ text: `Local time needs the year and the spin of ${inSentence(orbit.body)}.` }];
   const doubtPerDayMin = ((doubtOf('localTimeDrift', orbit, 'second')?.size ?? 0) * secondsPerDay) / 60;
   const turnDays = turnMin / Math.abs(perDayMin);
-  const turn = `, once round in ${formatNumber(turnDays, { digits: turnDays < 100 ? 1 : 0 })} days.`;
+  const turn = `, once round in ${turnWords(turnDays)}.`;
   return [
     { text: 'Local time', mark: 'node', strong: true },
     { text: ' drifts ' },

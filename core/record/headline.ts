@@ -5,11 +5,13 @@
  */
 import { degPerRad, secondsPerDay, twoPi } from '../numerics/angles';
 import { apsisName } from './bodyWords';
+import { sunAndMoonDominate } from './readings/doubt';
 import { stationaryYears } from './readings/drift';
 import type { Reading, ReadingId, ReadingMark } from './readings/reading';
 import type { ResolvedOrbit } from './resolved';
+import { turnWords } from './turnWords';
 import { formatNumber, unitOf } from './units';
-import { isEquatorial, perigeeOffText, smallEccentricity, sunAndMoonDominate, tinyEccentricity } from './warnings';
+import { isEquatorial, perigeeOffText, smallEccentricity, tinyEccentricity } from './warnings';
 
 export interface HeadlineSpan {
   readonly text: string;
@@ -80,7 +82,7 @@ function nodeSpans(rates: Rates, drift: Reading | undefined): HeadlineSpan[] {
   }
   if (isStill(rates.node)) return [{ text: 'The node stands still now', mark: 'node', strong: true }, { text: '.' }];
   const sense = rates.node < 0 ? 'regresses' : 'advances';
-  return [{ text: `The node ${sense} now, ` }, rate, { text: `: once round in ${turnText(rates.node)}.` }];
+  return [{ text: `The node ${sense} now, ` }, rate, { text: `: once round in ${turnWords(turnDays(rates.node))}.` }];
 }
 
 function synchronousSpans(rate: HeadlineSpan, minutes: number, doubt: number): HeadlineSpan[] {
@@ -118,7 +120,7 @@ function perigeeSpans(rates: Rates, orbit: Pick<ResolvedOrbit, 'body' | 'mean'>)
     { text: `${name} moves ` },
     { text: rateText(rates.perigee, rates), mark: 'perigee', strong: true },
     { text: ` now${eccentricity < smallEccentricity ? `, off by ${perigeeOffText(orbit)} at this e` : ''}: ` },
-    { text: `once round in ${turnText(rates.perigee)}.` },
+    { text: `once round in ${turnWords(turnDays(rates.perigee))}.` },
   ];
 }
 
@@ -138,16 +140,4 @@ function smallRateText(radPerS: number, { rateUnit }: Rates): string {
   return `${formatNumber(radPerS * perCore, { digits: Math.min(12, Math.max(0, digits)), plus: true })} ${symbol}`;
 }
 
-/** Three figures are as much as a rate of now is worth as a span. */
-function turnText(radPerS: number): string {
-  const days = twoPi / (Math.abs(radPerS) * secondsPerDay);
-  if (days < 2) return shortTurnText(days);
-  if (days < 730) return `${formatNumber(days, { digits: days < 100 ? 1 : 0 })} days`;
-  const years = days / 365.25;
-  return `${formatNumber(years, { digits: years < 10 ? 1 : 0 })} years`;
-}
-
-function shortTurnText(days: number): string {
-  const [count, unit] = days * 24 < 2 ? [days * 1440, 'minutes'] : [days * 24, 'hours'];
-  return `${formatNumber(count, { digits: Math.min(6, Math.max(0, 2 - Math.floor(Math.log10(count)))) })} ${unit}`;
-}
+const turnDays = (radPerS: number): number => twoPi / (Math.abs(radPerS) * secondsPerDay);

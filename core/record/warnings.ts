@@ -7,7 +7,7 @@
 import { degPerRad } from '../numerics/angles';
 import { apsidesAt, inSentence } from './bodyWords';
 import { perigeeAltitudeKm } from './entry/shape';
-import { frozenEccentricity, sunAndMoonDominateKm } from './readings/doubt';
+import { frozenEccentricity, sunAndMoonDominate } from './readings/doubt';
 import type { Reading, ReadingId } from './readings/reading';
 import type { Notice, ResolvedOrbit } from './resolved';
 
@@ -102,8 +102,7 @@ const warnings: readonly Warning[] = [
   {
     id: 'sunAndMoon',
     severity: 'caution',
-    applies: (orbit) =>
-      isEarth(orbit) && orbit.mean.semiMajorAxisKm > 20_000 && orbit.mean.semiMajorAxisKm <= sunAndMoonDominateKm,
+    applies: (orbit) => isEarth(orbit) && orbit.mean.semiMajorAxisKm > 20_000 && !sunAndMoonDominate(orbit),
     text: () =>
       'This high the Sun and the Moon move node, perigee and inclination as much as a good part of J2, or more: take the rates as the share of J2 alone.',
   },
@@ -134,11 +133,6 @@ const warnings: readonly Warning[] = [
 
 /** Where an orbit of the Earth ends, about: the radius within which it outweighs the Sun. */
 const farthestKm = 900_000;
-
-/** True where the closed form gives the smaller share of what moves the orbit. */
-export function sunAndMoonDominate({ body, mean }: Pick<ResolvedOrbit, 'body' | 'mean'>): boolean {
-  return body.id === 'earth' && mean.semiMajorAxisKm > sunAndMoonDominateKm;
-}
 
 /** A plane within 1e-6° of the equator's has no node. */
 export function isEquatorial(inclinationRad: number): boolean {

@@ -22,14 +22,26 @@ export interface Doubt {
 /** Eccentricity at which odd zonals hold perigee still in low orbit; its usual size. */
 export const frozenEccentricity = 0.0012;
 
-/** Above this the Sun and the Moon move the node of an orbit of the Earth more than J2 does. */
-export const sunAndMoonDominateKm = 50_000;
+/** μ/r³ of the Sun and of the Moon together, 1/s², at their mean distances from the Earth. */
+const tidePerS2 = 1.26e-13;
+
+/**
+ * True where Sun and Moon move an orbit of the Earth more than J2 does, from about 50 000 km on if it is round. Their
+ * secular rates, to a factor of the inclination: 3/4 μ/r³ / n · (1 + 3/2 e²)/√(1 − e²) (Cook, Geophys. J. 6, 271
+ * (1962), from memory).
+ */
+export function sunAndMoonDominate(point: Pick<ReadingPoint, 'body' | 'mean'>): boolean {
+  const e2 = point.mean.eccentricity ** 2;
+  const [, n] = scalesOf(point);
+  const others = (((0.75 * tidePerS2) / n) * (1 + 1.5 * e2)) / Math.sqrt(1 - e2);
+  return point.body.id === 'earth' && others > oblateRate(point);
+}
 
 const nodeFloor = 2e-5;
 
 /** Null where no honest figure is known. */
 export function doubtOf(id: ReadingId, point: ReadingPoint, theory: Theory): Doubt | null {
-  if (point.body.id === 'earth' && point.mean.semiMajorAxisKm > sunAndMoonDominateKm) return null;
+  if (sunAndMoonDominate(point)) return null;
   if (id === 'nodeRate') return rateDoubt(point, theory, 'nodeRadPerS');
   if (id === 'perigeeRate') return rateDoubt(point, theory, 'perigeeRadPerS');
   if (id === 'apsidalPeriod') return periodDoubt(point, theory);
@@ -85,13 +97,13 @@ function perigeeSize(point: ReadingPoint, radPerS: number): number {
 }
 
 /** (R/p)² and the mean motion. */
-function scalesOf({ body, mean }: ReadingPoint): readonly [ratio2: number, radPerS: number] {
+function scalesOf({ body, mean }: Pick<ReadingPoint, 'body' | 'mean'>): readonly [ratio2: number, radPerS: number] {
   const { semiMajorAxisKm: a, eccentricity: e } = mean;
   return [(body.radiusKm / (a * (1 - e * e))) ** 2, Math.sqrt(body.muKm3PerS2 / a ** 3)];
 }
 
 /** k of first order, rad/s, whatever the sign of J2. */
-function oblateRate(point: ReadingPoint): number {
+function oblateRate(point: Pick<ReadingPoint, 'body' | 'mean'>): number {
   const [ratio2, n] = scalesOf(point);
   return 1.5 * n * Math.abs(point.body.zonals[2] ?? 0) * ratio2;
 }
