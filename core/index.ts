@@ -19,7 +19,7 @@ export { equationOfTimeS, meanSunRightAscensionRad, type SunPosition, sunPositio
 export { type SunAt, type SunModel, type SunSeen, sunSeenFrom } from './bodies/sunSeenFrom';
 export { deltaTSeconds, terrestrialTimeJd } from './bodies/timeScales';
 export { type ChartCondition, type ChartCurve, chartCurve } from './design/chartCurves';
-export { type ChartLine, type ChartWindow, chartLine } from './design/chartLines';
+export { type ChartLine, type ChartWindow, chartLine, distanceToLinePx } from './design/chartLines';
 export { chartRepeats, type RepeatRoom } from './design/chartRepeats';
 export {
   type ChartFloor,
@@ -98,8 +98,19 @@ export { type AveragedModel, type AveragedRates, averagedRates } from './mission
 export { type CircularShadow, circularEclipseShare, eclipseFreeBetaRad } from './mission/circularEclipse';
 export { type ClosedFormDrift, closedFormDrift, type DriftLines } from './mission/closedFormDrift';
 export { elementsFromEquinoctial, equinoctialFromElements, type Sense, senseOf } from './mission/equinoctial';
+export type {
+  AltitudeLimit,
+  EventKind,
+  EventsRequest,
+  EventValue,
+  LocalTimeBox,
+  MissionEvent,
+  MissionEvents,
+} from './mission/event';
+export { missionEvents } from './mission/events';
 export type { GroundLine } from './mission/groundLines';
 export { type GroundTrack, type GroundTrackProblem, type GroundTrackRequest, groundTrack } from './mission/groundTrack';
+export { type DatedMean, type HistoryCurve, historyCurve } from './mission/historyCurve';
 export type { LeftOutForce } from './mission/historyForces';
 export {
   type HistoryField,
@@ -121,7 +132,32 @@ export {
   type IntegrationRequest,
   integrateOrbit,
 } from './mission/integrateOrbit';
+export {
+  type EffectChange,
+  type EffectsLedger,
+  effectsLedger,
+  type LedgerRow,
+} from './mission/ledger';
+export type { LedgerEffect } from './mission/ledgerStages';
+export type { LeftOutBound } from './mission/leftOutBounds';
 export { betaRad, type EclipseTimes, eclipse, LightError } from './mission/light';
+export {
+  type LightHistory,
+  type LightRequest,
+  type LightRow,
+  type LightSummary,
+  lightHistory,
+  type Season,
+} from './mission/lightHistory';
+export {
+  type LocalTimeAt,
+  type LocalTimeHistory,
+  type LocalTimeModel,
+  type LocalTimePoint,
+  type LocalTimeRequest,
+  localTimeHistory,
+  localTimeModel,
+} from './mission/localTimeHistory';
 export { decayHeightKm, type HistoryOptions, type MissionHistory, missionHistory } from './mission/missionHistory';
 export { steadyMean } from './mission/steadyMean';
 export { degPerRad, radPerDeg, secondsPerDay, twoPi, wrapPi, wrapTwoPi } from './numerics/angles';

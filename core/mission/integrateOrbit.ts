@@ -65,6 +65,8 @@ export class IntegrationError extends Error {
 }
 
 const defaultTolerance = 1e-13;
+/** Nearer than this to the end, days, a sample is the end: a tenth of a second. */
+const sameDays = 1e-6;
 /** Calls of `onProgress` at most. */
 const progressCalls = 200;
 
@@ -147,7 +149,8 @@ function takeSamples(request: IntegrationRequest, step: OdeStep, end: End | null
   const { spanDays, sampleDays } = request;
   const untilS = end?.timeS ?? step.end;
   for (;;) {
-    const wanted = Math.min(samples.length * sampleDays, spanDays);
+    const next = samples.length * sampleDays;
+    const wanted = next < spanDays - sameDays ? next : spanDays;
     const last = samples[samples.length - 1] as IntegratedSample;
     if (wanted <= last.days || wanted * secondsPerDay > untilS) break;
     addSample(request.body, step, wanted, samples);
