@@ -1,4 +1,5 @@
 /** Wishes stated as conditions, what each settles, and what came of them. */
+import { useComputed } from '@preact/signals';
 import { useRef, useState } from 'preact/hooks';
 import {
   type ConditionEntry,
@@ -16,9 +17,12 @@ import './conditions.css';
 
 export function ConditionPanel() {
   const { document } = useApp();
-  const candidate = document.draft.value;
+  // Not the whole draft: an orbit dragged over the chart changes no condition.
+  const stored = useComputed(() => document.draft.value.conditions).value;
+  const lengthUnit = useComputed(() => document.draft.value.entry.lengthUnit).value;
   const settlement = document.conditions.settlement.value;
-  const conditions = settlement?.conditions ?? readConditions(candidate);
+  const entry = { ...document.draft.peek().entry, lengthUnit };
+  const conditions = settlement?.conditions ?? readConditions({ conditions: stored, entry });
   return (
     <section class="conditions" aria-label="Conditions">
       {conditions.map((condition, place) => (

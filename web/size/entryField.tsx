@@ -1,6 +1,7 @@
 /** A field of the open entry, bound to its text and its messages. */
+import { useComputed } from '@preact/signals';
 import type { ComponentChildren } from 'preact';
-import type { FieldId } from '../../core/index';
+import type { FieldErrors, FieldId, Resolution } from '../../core/index';
 import { NumberField } from '../parts/numberField';
 import { stepped } from '../parts/stepping';
 import { useApp } from '../state/appContext';
@@ -25,23 +26,31 @@ export interface EntryFieldProps {
 
 export function EntryField({ field, stepSize, within, step, alongside, ...rest }: EntryFieldProps) {
   const { document, store } = useApp();
-  const resolution = document.entered.value;
-  const settled = document.settled.value[field];
-  const notice = resolution.notices.find((each) => each.field === field);
+  // Each on its own, so that a drag on the chart draws only the fields that change.
+  const text = useComputed(() => document.draft.value.entry.texts[field]);
+  const settled = useComputed(() => document.settled.value[field]).value;
+  const error = useComputed(() => errorsIn(document.entered.value)[field]);
+  const notice = useComputed(() => document.entered.value.notices.find((each) => each.field === field));
+  const note = useComputed(() => notice.value?.text);
+  const isCaution = useComputed(() => notice.value?.severity === 'caution');
   const bySize =
     stepSize === undefined ? undefined : (text: string, count: number) => stepped(text, stepSize, count, within);
   return (
     <NumberField
       {...rest}
-      text={settled ?? document.draft.value.entry.texts[field]}
+      text={settled ?? text.value}
       isSettled={settled !== undefined}
-      error={resolution.ok ? undefined : resolution.errors[field]}
-      note={notice?.text}
-      noteIsCaution={notice?.severity === 'caution'}
+      error={error.value}
+      note={note.value}
+      noteIsCaution={isCaution.value}
       step={step ?? bySize}
       readOnly={store.tabs.editorElsewhere.value}
       onText={(text) => document.setText(field, text)}
       onStep={alongside && ((text) => document.setTexts({ ...alongside(text), [field]: text }))}
     />
   );
+}
+
+function errorsIn(resolution: Resolution): FieldErrors {
+  return resolution.ok ? {} : resolution.errors;
 }

@@ -1,4 +1,5 @@
 /** The entry: in the form the user has, with the rarer fields folded away until they are needed. */
+import { useComputed } from '@preact/signals';
 import type { ComponentChildren } from 'preact';
 import { useEffect, useRef } from 'preact/hooks';
 import type { EntryForm, FieldId, InputFrame } from '../../core/index';
@@ -25,7 +26,7 @@ const forms: readonly { readonly value: EntryForm; readonly label: string }[] = 
 
 export function EntryPanel() {
   const { document } = useApp();
-  const { form } = document.draft.value.entry;
+  const form = useComputed(() => document.draft.value.entry.form).value;
   const { box, isTyping } = useTyping<HTMLElement>();
   return (
     <section
@@ -67,8 +68,11 @@ const bodyFieldIds: readonly FieldId[] = [
 ];
 
 function useBodySummary(): string {
-  const { body, gravitySet, entry } = useApp().document.draft.value;
-  return `${bodySummary(body, gravitySet)}, ${entry.lengthUnit}`;
+  const { draft } = useApp().document;
+  return useComputed(() => {
+    const { body, gravitySet, entry } = draft.value;
+    return `${bodySummary(body, gravitySet)}, ${entry.lengthUnit}`;
+  }).value;
 }
 
 /** A paste that is a whole orbit is taken as one, wherever the finger was. */
@@ -91,9 +95,12 @@ function usePaste() {
 }
 
 function ElementEntry() {
-  const { texts, elementsAre, nodeForm } = useApp().document.draft.value.entry;
-  const epoch = texts.epoch.trim().slice(0, 10) || 'no epoch yet';
-  const says = `${epoch}, ${elementsAre}`;
+  const { draft } = useApp().document;
+  const nodeForm = useComputed(() => draft.value.entry.nodeForm).value;
+  const says = useComputed(() => {
+    const { texts, elementsAre } = draft.value.entry;
+    return `${texts.epoch.trim().slice(0, 10) || 'no epoch yet'}, ${elementsAre}`;
+  }).value;
   return (
     <>
       <div class="field-group">
@@ -188,8 +195,10 @@ interface FoldProps {
 /** Opens by itself where one of its fields is in error, since a message must not be folded away; never closes by itself. */
 function Fold({ title, says, holds, children }: FoldProps) {
   const { document } = useApp();
-  const resolution = document.entered.value;
-  const inError = !resolution.ok && holds.some((field) => resolution.errors[field]);
+  const inError = useComputed(() => {
+    const resolution = document.entered.value;
+    return !resolution.ok && holds.some((field) => resolution.errors[field]);
+  }).value;
   const fold = useRef<HTMLDetailsElement>(null);
   useEffect(() => {
     if (inError && fold.current) fold.current.open = true;
