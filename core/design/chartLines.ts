@@ -2,6 +2,7 @@
 import type { Body } from '../bodies/body';
 import type { ChartCurve } from './chartCurves';
 import { type ChartShape, chartFloor } from './chartShape';
+import type { ChartPoint, ChartScale } from './chartSnap';
 
 /** The part of the chart that is shown: inclinations in rad, mean altitudes in km. */
 export interface ChartWindow {
@@ -52,4 +53,22 @@ function overInclination({ altitudeAt }: ChartCurve, window: ChartWindow, floorK
     altitudeKm[step] = km >= floorKm ? km : Number.NaN;
   }
   return { inclinationRad, altitudeKm };
+}
+
+/** Distance, in pixels of the chart, from a point to the polyline: a quick look before a curve itself is worked out. */
+export function distanceToLinePx({ inclinationRad, altitudeKm }: ChartLine, at: ChartPoint, scale: ChartScale): number {
+  let least = Number.POSITIVE_INFINITY;
+  let [x0, y0] = [Number.NaN, Number.NaN];
+  for (let index = 0; index < altitudeKm.length; index += 1) {
+    const x1 = ((inclinationRad[index] ?? 0) - at.inclinationRad) * scale.perRad;
+    const y1 = ((altitudeKm[index] ?? 0) - at.altitudeKm) * scale.perKm;
+    const [dx, dy] = [x1 - x0, y1 - y0];
+    const length2 = dx * dx + dy * dy;
+    const share = length2 > 0 ? Math.min(1, Math.max(0, -(x0 * dx + y0 * dy) / length2)) : 0;
+    const [x, y] = [x0 + share * dx, y0 + share * dy];
+    const square = x * x + y * y;
+    if (square < least) least = square;
+    [x0, y0] = [x1, y1];
+  }
+  return Math.sqrt(least);
 }
