@@ -63,13 +63,13 @@ test('a limit is set, its margin seen, broken, said, and there again after a res
     await field(page, 'Perigee altitude').fill('603,2');
     await field(page, 'Apogee altitude').fill('610');
     await expect(margins(page, 'Perigee altitude')).toHaveText('limit ≤ 600: over by 3.20');
-    await expect(broken(page)).toHaveText('2 limits broken: Node rate, Perigee altitude.');
+    await expect(broken(page)).toHaveText('2 limits broken: Perigee altitude, Node rate.');
     await save(page);
     await first.close();
 
     const second = await startBrowser(profile);
     const again = await openApp(second, server.url);
-    await expect(broken(again)).toHaveText('2 limits broken: Node rate, Perigee altitude.');
+    await expect(broken(again)).toHaveText('2 limits broken: Perigee altitude, Node rate.');
     await reading(again, 'Node rate').click();
     await expect(field(again, 'At least')).toHaveValue('0,985');
     await second.close();

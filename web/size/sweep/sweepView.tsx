@@ -72,7 +72,7 @@ function SweepFigure({ shown, isStale }: FigureProps) {
 /** With the units of both axes. */
 function figureName({ reading, writing, sweep }: SweepShown): string {
   const { label, quantity } = sweptWords[sweep.request.element];
-  const inUnit = (name: string, { unit }: ReadingText) => (unit === '' ? name : `${name}, ${unit}`);
+  const inUnit = (name: string, { unit }: ReadingText) => (unit === '' ? name : `${name},\u00a0${unit}`);
   const against = inUnit(label.toLowerCase(), quantityText(quantity, 0, writing.elementUnit));
   return `${inUnit(writing.label, quantityText(reading.quantity, 0, writing.readingUnit))}, against ${against}`;
 }
