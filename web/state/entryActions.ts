@@ -16,11 +16,11 @@ import {
   type OrbitEntry,
   parseTle,
   readNumber,
-  readStateText,
   type StateTextResult,
   twoLineSetIn,
 } from '../../core/index';
 import type { OrbitDocument } from './document';
+import { fetched } from './fetched';
 
 type Tags = Partial<Omit<OrbitEntry, 'texts'>>;
 
@@ -109,6 +109,8 @@ export function switchBody(document: OrbitDocument, body: BodyId): void {
 
 const longestPaste = 20_000;
 
+export const stateReader = fetched(async () => (await import('./stateReader')).readState);
+
 export type PasteOutcome = 'notOurs' | { readonly said: string };
 
 /**
@@ -130,12 +132,21 @@ export function takePaste(document: OrbitDocument, text: string): PasteOutcome {
     });
     return { said: 'Read as two-line elements.' };
   }
-  const state = readStateText(text);
-  if (state.ok) return takeState(document, state);
+  if (numberCount(text) < 6) return 'notOurs';
+  const state = stateReader.now()?.(text);
+  if (state?.ok) return takeState(document, state);
   // A field of one number has no use for a mail; the lines of a set have a field that says what is wrong with them.
-  const isMail = text.length > 30 && (text.match(/\d+(?:[.,]\d+)?/g) ?? []).length >= 6;
-  if (!isMail || document.draft.value.entry.form === 'twoLine') return 'notOurs';
-  return { said: `${state.message} Nothing was changed.` };
+  if (text.length <= 30 || document.draft.value.entry.form === 'twoLine') return 'notOurs';
+  const why =
+    state?.message ?? 'What reads a paste has not been loaded yet: paste it once more, or load Driftbook again.';
+  return { said: `${why} Nothing was changed.` };
+}
+
+const datePattern = /\d{1,4}[-/.]\d{1,2}[-/.]\d{1,4}(?:[T ][\d:.,+Z-]+)?/g;
+
+/** Dates apart, which the field of the epoch takes. */
+function numberCount(text: string): number {
+  return text.replace(datePattern, ' ').match(/\d+(?:[.,]\d+)?/g)?.length ?? 0;
 }
 
 const frameNames: Readonly<Record<InputFrame, string>> = {

@@ -1,7 +1,7 @@
-import { describe, expect, it } from 'vitest';
+import { beforeAll, describe, expect, it } from 'vitest';
 import { blankCandidate } from '../../../core/index';
 import { createDocument, type OrbitDocument } from '../../../web/state/document';
-import { takePaste } from '../../../web/state/entryActions';
+import { stateReader, takePaste } from '../../../web/state/entryActions';
 import { twoLineSets } from '../../external/twoLineSets';
 
 const numbers = '6878137\n0\n0\n0\n7612.6\n10';
@@ -13,6 +13,8 @@ function pasted(text: string): { document: OrbitDocument; said: string | null } 
   return { document, said: outcome === 'notOurs' ? null : outcome.said };
 }
 const entryOf = (text: string) => pasted(text).document.draft.value.entry;
+
+beforeAll(() => stateReader.settled);
 
 describe('a paste', () => {
   it('brings its axes, unit and epoch along', () => {
@@ -41,6 +43,7 @@ describe('a paste', () => {
 
   it('of one number or a few words is for the field', () => {
     expect(pasted('97.4').said).toBeNull();
+    expect(pasted('2028-03-14T10:20:30.250000+02:00').said).toBeNull();
     expect(pasted('for the crew, about 3 of them, at noon').said).toBeNull();
   });
 });
