@@ -48,7 +48,7 @@ function drawLand({ context: pen, ink, widthPx, heightPx }: Sheet, land: GeoPerm
     .translate([widthPx / 2, heightPx / 2]);
   pen.beginPath();
   geoPath(projection, pen)(land);
-  pen.globalAlpha = 0.4;
+  pen.globalAlpha = 0.3;
   pen.fillStyle = ink.hair;
   pen.fill();
   pen.globalAlpha = 1;

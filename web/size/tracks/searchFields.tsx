@@ -1,4 +1,5 @@
 /** The fields of the search: band, longest cycle, swath and where it has to close the gaps; the rarer ones folded away. */
+import { useEffect, useRef } from 'preact/hooks';
 import { degPerRad, formatNumber, type ResolvedOrbit } from '../../../core/index';
 import { Choice } from '../../parts/choice';
 import { NumberField } from '../../parts/numberField';
@@ -71,8 +72,13 @@ function MoreFields({ model, unit }: PartProps & { readonly unit: string }) {
   const { errors, texts, wishes } = model;
   const inUse = rareFields.filter((field) => texts.value[field].trim() !== '').length;
   const isInError = rareFields.some((field) => errors.value[field]);
+  const fold = useRef<HTMLDetailsElement>(null);
+  useEffect(() => {
+    // Opened for a message, but never closed: the user may be typing in it.
+    if (isInError && fold.current) fold.current.open = true;
+  }, [isInError]);
   return (
-    <details class="tracks-more" open={isInError || undefined}>
+    <details class="tracks-more" ref={fold}>
       <summary>More filters{inUse > 0 ? ` (${inUse} in use)` : ''}</summary>
       <div class="tracks-grid">
         <Field model={model} field="shortest" label="Shortest cycle" unit="d" step={1} placeholder="any" />

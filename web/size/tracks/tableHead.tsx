@@ -36,12 +36,8 @@ export function TableHead({ model }: { readonly model: TracksModel }) {
                   model.sort.value = { column, falls: isSorted && !falls };
                 }}
               >
-                <span>
-                  {label} {unit && <span class="unit">{unit}</span>}
-                </span>
-                <span class="tracks-order" aria-hidden="true">
-                  {isSorted ? (falls ? '▾' : '▴') : ''}
-                </span>
+                {isSorted && <span aria-hidden="true">{falls ? '▾' : '▴'} </span>}
+                {label} {unit && <span class="unit">{unit}</span>}
               </button>
             </th>
           );

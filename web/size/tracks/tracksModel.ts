@@ -135,11 +135,15 @@ function staleness(search: TrackSearch, { request, filter }: TrackWishes): strin
   return `${stopped ? `${stopped.text} ` : ''}Listed for the search before.`;
 }
 
-/** The filter as last readable, so that a half-typed width does not empty the list. */
+/**
+ * The filter as last readable, so that a half-typed width does not empty the list; the same object as long as it says the
+ * same, so that a change elsewhere does not take the list back to its top.
+ */
 function lastReadable(wishes: ReadonlySignal<TrackWishes>): ReadonlySignal<TrackFilter | null> {
   let last: TrackFilter | null = null;
   return computed(() => {
-    last = wishes.value.filter ?? last;
+    const { filter } = wishes.value;
+    if (filter && JSON.stringify(filter) !== JSON.stringify(last)) last = filter;
     return last;
   });
 }

@@ -99,10 +99,14 @@ function rounded({ inclinationRad }: TrackQuestion): number {
 const filterFields = ['swath', 'shortest', 'narrowest', 'widest', 'cycle'] as const;
 
 function readFilter(reader: FieldReader<TrackField>, kmPerUnit: number, cycle: Cycle | null): TrackFilter | null {
-  const swath = positive(reader, { field: 'swath', label: 'Swath', expected: 'a width above 0, such as 290' });
+  const swath = positive(reader, { field: 'swath', label: 'Swath', expected: 'a width, such as 290' });
   const shortest = positive(reader, { field: 'shortest', label: 'Shortest cycle', expected: 'days, such as 3' });
-  const narrowest = positive(reader, { field: 'narrowest', label: 'Narrowest spacing', expected: 'a width above 0' });
-  const widest = positive(reader, { field: 'widest', label: 'Widest spacing', expected: 'a width above 0' });
+  const narrowest = positive(reader, {
+    field: 'narrowest',
+    label: 'Narrowest spacing',
+    expected: 'a width, such as 200',
+  });
+  const widest = positive(reader, { field: 'widest', label: 'Widest spacing', expected: 'a width, such as 200' });
   const latitude = readLatitude(reader);
   if (latitude === null || filterFields.some((field) => reader.errors[field])) return null;
   return {
