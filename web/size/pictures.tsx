@@ -8,10 +8,19 @@ import { type PictureId, pictureIds } from '../state/picture';
 import './pictures.css';
 
 const views: Readonly<Record<PictureId, FunctionComponent<{ readonly orbit: ResolvedOrbit }>>> = {
+  map: later(async () => (await import('./map/mapPicture')).MapPicture),
   chart: later(async () => (await import('./chart/chartView')).ChartView),
   orbit: later(async () => (await import('./orbit/orbitView')).OrbitView),
+  sweep: later(async () => (await import('./sweep/sweepView')).SweepView),
+  tracks: later(async () => (await import('./tracks/tracksPicture')).TracksPicture),
 };
-const names: Readonly<Record<PictureId, string>> = { chart: 'Rates', orbit: 'Orbit' };
+const names: Readonly<Record<PictureId, string>> = {
+  chart: 'Rates',
+  orbit: 'Orbit',
+  tracks: 'Tracks',
+  map: 'Map',
+  sweep: 'Sweep',
+};
 
 export function Pictures() {
   const { document, picture } = useApp();
