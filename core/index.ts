@@ -253,6 +253,16 @@ export { violatesAt } from './record/limitsAt';
 export { convertedText, limitInUnit } from './record/limitUnits';
 export { type LimitsJudged, limitsSentence, limitText, marginText } from './record/limitWords';
 export { type Migration, migrateCandidate } from './record/migrate';
+export { forcesText, localTimeClaim, type MissionOutcome, missionHeadline } from './record/missionHeadline';
+export {
+  changedPlans,
+  type DensityChoice,
+  type MissionChange,
+  type MissionEntry,
+  type MissionField,
+  type MissionSettings,
+  readMissionSettings,
+} from './record/missionSettings';
 export { type NumberReading, type NumberResult, readNumber } from './record/numberText';
 export { type FieldReader, fieldReader } from './record/readFields';
 export type { Doubt } from './record/readings/doubt';

@@ -5,6 +5,7 @@ import type { Force } from '../forces/force';
 import { moonForce, sunForce } from '../forces/thirdBody';
 import { zonalForce } from '../forces/zonal';
 import type { HistoryForces } from './historyRequest';
+import type { OblatenessOrder } from './oblateness';
 
 /** A force that was asked for and does not act. */
 export interface LeftOutForce {
@@ -13,8 +14,8 @@ export interface LeftOutForce {
 }
 
 export interface HistoryModel {
-  /** J2 and its square in closed form, or nothing. */
-  readonly oblateness: 'second' | 'none';
+  /** J2 in closed form, with its square in a history; alone only in the ledger. */
+  readonly oblateness: OblatenessOrder | 'none';
   /** Highest zonal whose product with J2 counts; 0 where there is none. */
   readonly coupledDegree: number;
   /** Averaged by quadrature. */

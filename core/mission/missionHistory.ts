@@ -43,7 +43,7 @@ export interface HistoryOptions {
 export const decayHeightKm = 120;
 
 /** The Moon comes back to where it was, for its strongest term, in 13.6 days: two days are 53° of it. */
-const usualLongestStepDays = 2;
+export const usualLongestStepDays = 2;
 
 /**
  * The history of mean elements (km, rad) over a span, in the frame of the epoch.
