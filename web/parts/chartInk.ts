@@ -9,6 +9,7 @@ export interface ChartInk {
   readonly faint: string;
   readonly node: string;
   readonly perigee: string;
+  readonly caution: string;
   readonly fontFamily: string;
   readonly fontPx: number;
   readonly thinPx: number;
@@ -31,6 +32,7 @@ export function chartInkOf(element: HTMLElement): ChartInk {
     faint: token('--faint'),
     node: token('--node'),
     perigee: token('--perigee'),
+    caution: token('--caution'),
     fontFamily: style.fontFamily,
     fontPx: Number.parseFloat(style.fontSize) || 14,
     thinPx: px('--line-thin'),

@@ -7,6 +7,7 @@ import type { Chart } from './chartState';
 import { curveName } from './curveNames';
 import { drawCurves } from './drawCurves';
 import { drawFrame, drawGround, labelRegions, nameAltitudes } from './drawGround';
+import { drawOutside, labelOutside, runsOutside } from './drawLimits';
 import { drawMarks } from './drawMarks';
 import { type LabelBox, labelPlaces } from './labels';
 import { nameAtTop } from './nameAtTop';
@@ -48,6 +49,7 @@ export function drawLayers({ chart, frame, curves, marks, others }: LayerInput):
         chart.body.value,
         chart.shape.value,
         chart.held.value,
+        chart.limits.value,
         chart.app.preferences.values.value,
       ];
       below.invalidate();
@@ -85,6 +87,9 @@ function drawBelow(chart: Chart, surface: ChartSurface): readonly LabelBox[] {
   };
   const places = labelPlaces();
   drawGround(surface, ground);
+  const limits = chart.limits.peek();
+  const runs = limits ? runsOutside({ mapping, body, shape, ground: limits }) : [];
+  drawOutside(surface, mapping, runs);
   nameAltitudes(surface, ground, places);
   const drawn = drawCurves(surface, mapping, shown);
   drawFrame(surface, mapping);
@@ -93,6 +98,7 @@ function drawBelow(chart: Chart, surface: ChartSurface): readonly LabelBox[] {
   nameRepeats(surface, names);
   nameRates(surface, names);
   labelRegions(surface, ground, places);
+  labelOutside(surface, mapping, { runs, places });
   return places.taken;
 }
 

@@ -12,6 +12,7 @@ import {
 import type { AppState } from '../../state/appState';
 import { type ShownCurve, shownCurves } from './chartCurvesShown';
 import { isWithin, wholeWindow } from './chartWindow';
+import type { LimitGround } from './drawLimits';
 import { type Held, heldBy } from './heldCurves';
 import { curvesUnder } from './nearText';
 import { type ChartSize, type Mapping, mappingOf, plotBoxOf } from './plotBox';
@@ -31,6 +32,8 @@ export interface Chart {
   readonly mapping: ReadonlySignal<Mapping | null>;
   readonly held: ReadonlySignal<Held>;
   readonly curves: ReadonlySignal<readonly ShownCurve[]>;
+  /** What the limits are judged with; null where there are none. */
+  readonly limits: ReadonlySignal<LimitGround | null>;
   /** Where the orbit stands. */
   readonly point: ReadonlySignal<ChartPoint | null>;
   /** The curves it lies on. */
@@ -63,7 +66,22 @@ export function createChart(app: AppState): Chart {
   const under = computed(() =>
     point.value && mapping.value ? curvesUnder(point.value, curves.value, mapping.value.scale) : [],
   );
-  return { app, holds, size, zoom, isDragging, body, shape, mapping, held, curves, point, under };
+  const limits = limitsIn(app);
+  return { app, holds, size, zoom, isDragging, body, shape, mapping, held, curves, limits, point, under };
+}
+
+/** The angles of the orbit count too, but a drag on the chart changes none of them. */
+function limitsIn({ document }: AppState): ReadonlySignal<LimitGround | null> {
+  return steady<LimitGround | null>(
+    () => {
+      const limits = document.limits.read.value.flatMap((each) => (each.ok ? [each.limit] : []));
+      const orbit = limits.length > 0 ? document.orbit.value : null;
+      if (!orbit) return null;
+      const { nodeRad, perigeeRad } = orbit.mean;
+      return { limits, angles: { nodeRad, perigeeRad, meanAnomalyRad: 0 }, epochJd: orbit.epochJd };
+    },
+    (before, now) => JSON.stringify(before) === JSON.stringify(now),
+  );
 }
 
 /** Read when the conditions change, or 90° is passed, rather than in every frame of a drag. */
