@@ -1,5 +1,7 @@
 /** Dates in a paste, and which of them is the epoch. A date that reads two ways is asked about, never guessed. */
 
+import { dateFromMidnight, julianDateOfMidnight } from '../../bodies/calendar';
+
 export type EpochFound =
   | {
       readonly ok: true;
@@ -15,9 +17,10 @@ const time = '\\d{1,2}:\\d{2}(?::\\d{2}(?:[.,]\\d+)?)?';
 const zone = `\\s?(Z(?![A-Za-z])|[+-]\\d{2}:?\\d{2}|\\(?(?:${zones})(?![A-Za-z])\\)?)`;
 const clock = `(?:(?:T|,?\\s+(?:at\\s+)?)(${time})(?:${zone})?)?`;
 const month = '(Jan|Feb|Mar|Apr|May|Jun|Jul|Aug|Sep|Oct|Nov|Dec)[a-z]*\\.?';
-/** Each with the order of its parts: year, month, day; `?` where day and month cannot be told apart. */
+/** Each with the order of its parts: year, month, day, number of the day in the year; `?` where day and month cannot be told apart. */
 const shapes: readonly (readonly [RegExp, string])[] = [
   [new RegExp(`\\b(\\d{4})[-/](\\d{2})[-/](\\d{2})${clock}`, 'gi'), 'ymd'],
+  [new RegExp(`\\b(\\d{4})-(\\d{3})(?=T\\d)()${clock}`, 'gi'), 'yn'],
   [new RegExp(`\\b(\\d{1,2})(?:st|nd|rd|th)?[ -]${month}[ ,-] ?(\\d{4})${clock}`, 'gi'), 'dmy'],
   [new RegExp(`\\b${month} (\\d{1,2})(?:st|nd|rd|th)?,? (\\d{4})${clock}`, 'gi'), 'mdy'],
   [new RegExp(`\\b(\\d{1,2})\\.(\\d{1,2})\\.(\\d{4})\\b${clock}`, 'gi'), 'dmy'],
@@ -77,13 +80,19 @@ function dateOf({ parts, order, time, zone }: DateParts): Pick<DateFound, 'iso' 
     const readings = `${written(first, second)} or ${written(second, first)}`;
     return { iso: parts.join('/'), problem: `The date ${parts.join('/')} can be read as ${readings}. Write it so.` };
   }
+  const date = known === 'yn' ? dateOfDay(Number(part('y')), Number(part('n'))) : written(part('d'), part('m'));
   const name = zone?.replace(/[()]/g, '') ?? '';
   const isUtc = /^(?:|Z|UTC?|UT1|GMT|[+-].*)$/i.test(name);
   const offset = /^[Z+-]/i.test(name) ? name.toUpperCase() : isUtc && name !== '' ? 'Z' : '';
   return {
-    iso: written(part('d'), part('m')) + (time === undefined ? '' : `T${time.replace(/^\d:/, '0$&')}${offset}`),
+    iso: date + (time === undefined ? '' : `T${time.replace(/^\d:/, '0$&')}${offset}`),
     problem: isUtc ? null : `The epoch is given in ${name}; it is read in UTC here. Turn it into UTC first.`,
   };
+}
+
+function dateOfDay(year: number, dayOfYear: number): string {
+  const date = dateFromMidnight(julianDateOfMidnight({ year, month: 1, day: 1 }) + dayOfYear - 1);
+  return `${date.year}-${two(String(date.month))}-${two(String(date.day))}`;
 }
 
 /** A part above 12 is a day. */
