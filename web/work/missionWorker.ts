@@ -1,0 +1,10 @@
+/** The worker of missions: histories and second looks, each kind in a worker of its own. */
+import { expose } from 'comlink';
+import { createMissionCalls } from './missionCalls';
+import { secondLook } from './secondLook';
+
+const calls = { ...createMissionCalls(), secondLook };
+
+export type MissionWorkerCalls = typeof calls;
+
+expose(calls);
