@@ -26,11 +26,19 @@ export function perigeeHeightKm(body: Body, values: Float64Array): number {
   return (values[0] as number) * (1 - eccentricity) - body.equatorialRadiusKm;
 }
 
+/** Apogee's distance (km) from the centre, of mean elements. */
+export function apogeeKm(values: Float64Array): number {
+  return (values[0] as number) * (1 + Math.hypot(values[1] as number, values[2] as number));
+}
+
 /** Turn (rad) of perigee or node within a step: forces that see it turn are then good to 1e-6 of themselves. */
 const mostTurnRad = 0.5;
 
 /** Share of the scale height that perigee, or the steepness of the fall from it, may move by within a step. */
 const mostFall = 0.2;
+
+/** Perigee height (km) above which drag is too weak to ask for short steps. */
+const airlessKm = 1500;
 
 export function stepLimit({ body, sense, values, rates, drags, longestS }: StepSetting): StepLimit {
   const mean = elementsFromEquinoctial(values, sense);
@@ -47,7 +55,9 @@ function fallLimitS(body: Body, values: Float64Array, rates: Float64Array): numb
   const e = Math.hypot(h, k);
   const [aRate, hRate, kRate] = [rates[0] as number, rates[1] as number, rates[2] as number];
   const eRate = e > 0 ? (h * hRate + k * kRate) / e : Math.hypot(hRate, kRate);
-  const scaleKm = scaleHeightKm(perigeeHeightKm(body, values));
+  const heightKm = perigeeHeightKm(body, values);
+  if (heightKm > airlessKm) return Infinity;
+  const scaleKm = scaleHeightKm(heightKm);
   const perigeeRate = Math.abs(aRate * (1 - e) - a * eRate);
   const steepness = Math.abs(e * aRate + a * eRate) / Math.max(a * e, scaleKm);
   return mostFall / Math.max(perigeeRate / scaleKm, steepness);

@@ -6,10 +6,10 @@ import { equinoctialFromElements, senseOf } from './equinoctial';
 import type { HistoryModel } from './historyForces';
 import type { HistoryRequest } from './historyRequest';
 import { type HistorySample, sampleTaker } from './historySamples';
-import { perigeeHeightKm, stepLimit } from './historyStepLimit';
+import { apogeeKm, perigeeHeightKm, stepLimit } from './historyStepLimit';
 import { zonalCoupling } from './zonalCoupling';
 
-/** `escape`: the orbit opened, or changed faster than any step; averaging has lost its meaning. */
+/** `escape`: the apogee came too near the Moon, or the orbit opened: averaging over a revolution has lost its meaning. */
 export type HistoryEnd = 'span' | 'decay' | 'escape';
 
 export interface HistoryTrack {
@@ -21,6 +21,8 @@ export interface HistoryTrack {
 export interface TrackSetting {
   /** Perigee height (km) at which the walk ends in decay. */
   readonly floorKm: number;
+  /** Distance of the apogee (km) at which it ends in escape. */
+  readonly ceilingKm: number;
   readonly longestStepDays: number;
   readonly onProgress: (share: number) => void;
 }
@@ -46,8 +48,10 @@ export function historyTrack(request: HistoryRequest, model: HistoryModel, setti
   const ended = (endedBy: HistoryEnd, endDays: number): HistoryTrack => ({ samples: taker.samples, endedBy, endDays });
   const drags = model.forces.some(({ id }) => id === 'drag');
   const height = (values: Float64Array) => perigeeHeightKm(body, values) - setting.floorKm;
+  const room = (values: Float64Array) => setting.ceilingKm - apogeeKm(values);
   let place: Place = { days: 0, values: equinoctialFromElements(mean, sense), rates: new Float64Array(6) };
   if (height(place.values) <= 0) return ended('decay', 0);
+  if (room(place.values) <= 0) return ended('escape', 0);
   rates(place.rates, place.values, epochJd);
   for (let count = 1; ; count += 1) {
     const longestS = setting.longestStepDays * secondsPerDay;
@@ -60,10 +64,11 @@ export function historyTrack(request: HistoryRequest, model: HistoryModel, setti
     if (!step) return ended('escape', place.days);
     const values = valuesWithin(step, step.lengthS);
     const last = step.lengthS === leftS;
-    if (height(values) <= 0) {
-      const reachedS = crossingS(step, height);
+    const exit = height(values) <= 0 ? height : room(values) <= 0 ? room : null;
+    if (exit) {
+      const reachedS = crossingS(step, exit);
       taker.take(step, reachedS, true);
-      return ended('decay', place.days + reachedS / secondsPerDay);
+      return ended(exit === height ? 'decay' : 'escape', place.days + reachedS / secondsPerDay);
     }
     taker.take(step, step.lengthS, last);
     if (last) return ended('span', spanDays);

@@ -97,6 +97,7 @@ function stageEnds(
     const track = historyTrack({ ...request, body, spanDays: endDays, sampleDays: endDays }, model, {
       // A stage that lacks what lifts the perigee goes on through the surface: only its end counts.
       floorKm: Number.NEGATIVE_INFINITY,
+      ceilingKm: Number.POSITIVE_INFINITY,
       longestStepDays: options.longestStepDays ?? usualLongestStepDays,
       onProgress: (share) => options.onProgress?.((index + share) / stages.length),
     });

@@ -42,6 +42,12 @@ export interface HistoryOptions {
  */
 export const decayHeightKm = 120;
 
+/**
+ * Distance (km) of an Earth orbit's apogee beyond which the Moon, 356 400 km away at its nearest, changes the orbit within a
+ * revolution. Our own bound: two thirds of that.
+ */
+const ceilingKm = 240_000;
+
 /** The Moon comes back to where it was, for its strongest term, in 13.6 days: two days are 53° of it. */
 export const usualLongestStepDays = 2;
 
@@ -58,6 +64,7 @@ export function missionHistory(request: HistoryRequest, options: HistoryOptions 
   const floorKm = model.forces.some(({ id }) => id === 'drag') ? decayHeightKm : 0;
   const track = historyTrack(request, model, {
     floorKm,
+    ceilingKm: model.forces.some(({ id }) => id === 'moon') ? ceilingKm : Number.POSITIVE_INFINITY,
     longestStepDays: options.longestStepDays ?? usualLongestStepDays,
     onProgress: options.onProgress ?? (() => undefined),
   });
@@ -69,7 +76,7 @@ export function missionHistory(request: HistoryRequest, options: HistoryOptions 
 function endWords(endedBy: HistoryEnd, jd: number, floorKm: number): string {
   if (endedBy === 'span') return '';
   const date = isoFromJulianDate(jd).slice(0, 10);
-  if (endedBy === 'escape') return `On ${date} the orbit changes too fast to be averaged over its revolutions.`;
+  if (endedBy === 'escape') return `On ${date} averages over a revolution end: the apogee comes too near the Moon.`;
   const floor = floorKm > 0 ? `sinks below ${floorKm} km` : 'meets the surface';
   return `On ${date} the perigee ${floor}.`;
 }

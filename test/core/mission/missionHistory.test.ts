@@ -103,11 +103,32 @@ describe('the end', () => {
   });
 
   it('is decay where the Moon pulls the perigee down', () => {
-    const steep = { semiMajorAxisKm: 60_000, eccentricity: 0.885, inclinationRad: 1.2, perigeeRad: 0.8 };
+    const steep = { semiMajorAxisKm: 60_000, eccentricity: 0.885, inclinationRad: 1.2, nodeRad: 1, perigeeRad: 0.8 };
     const history = missionHistory(request(steep, { spanDays: 5000 }));
-    expect(history.cautions.map(({ field }) => field)).toContain('mean');
-    expect(['decay', 'span']).toContain(history.endedBy);
+    expect(history.endedBy).toBe('decay');
+    expect(history.endDays).toBeGreaterThan(50);
+    expect(history.cautions.map(({ field }) => field)).toEqual(['mean']);
     for (const { mean } of history.samples) expect(mean.eccentricity).toBeLessThan(1);
+  });
+
+  it('is escape where the apogee comes near the Moon, at the start or later', () => {
+    const far = missionHistory(request({ semiMajorAxisKm: 300_000, eccentricity: 0.3 }));
+    expect([far.endedBy, far.endDays, far.samples.length]).toEqual(['escape', 0, 1]);
+    const rising = { semiMajorAxisKm: 190_000, eccentricity: 0.25, inclinationRad: 1.4, perigeeRad: 0.8 };
+    const later = missionHistory(request(rising, { spanDays: 5000 }));
+    expect(later.endedBy).toBe('escape');
+    expect(later.endDays).toBeGreaterThan(1);
+    expect(later.endMessage).toMatch(/too near the Moon/);
+    const last = later.samples.at(-1)?.mean;
+    expect((last?.semiMajorAxisKm ?? 0) * (1 + (last?.eccentricity ?? 0))).toBeCloseTo(240_000, 0);
+  });
+
+  it('comes in good time even where drag is on and the perigee far above the air', () => {
+    const drag2 = { ballisticKgPerM2: 100, density: 'mean' } as const;
+    const history = missionHistory(
+      request({ semiMajorAxisKm: 150_000, eccentricity: 0.5 }, { spanDays: 5479, forces: { ...all, drag: drag2 } }),
+    );
+    expect(['span', 'escape']).toContain(history.endedBy);
   });
 });
 
