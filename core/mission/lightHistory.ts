@@ -7,7 +7,6 @@
 import type { Body } from '../bodies/body';
 import { type SunAt, sunSeenFrom } from '../bodies/sunSeenFrom';
 import { turningPlace } from '../numerics/crossings';
-import { periods } from '../orbit/periods';
 import { type DatedMean, type HistoryCurve, historyCurve } from './historyCurve';
 import { betaUnder, type EclipseTimes, eclipseUnder } from './light';
 import { shadowArcs } from './shadowArcs';
@@ -82,13 +81,12 @@ interface Sky {
 function rowAt({ body, epochJd, curve, sunAt }: Sky, days: number): LightRow {
   const mean = curve(days);
   const sun = sunAt(epochJd + days);
-  const times = eclipseUnder(body, mean, sun);
-  const umbraShare = times.umbraS === 0 ? 0 : times.umbraS / periods(body, mean, 'second').nodalS;
-  return { days, betaRad: betaUnder(mean, sun), ...times, umbraShare };
+  const { umbraS, penumbraS, revolutionS } = eclipseUnder(body, mean, sun);
+  return { days, betaRad: betaUnder(mean, sun), umbraS, penumbraS, umbraShare: umbraS / revolutionS };
 }
 
 function isEclipsed({ body, epochJd, curve, sunAt }: Sky, days: number): boolean {
-  return shadowArcs(body, curve(days), sunAt(epochJd + days), 'penumbra').length > 0;
+  return shadowArcs(body, curve(days), sunAt(epochJd + days)).penumbra.length > 0;
 }
 
 function summaryOf(rows: readonly LightRow[], eclipsed: (days: number) => boolean): LightSummary {

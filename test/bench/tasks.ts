@@ -13,6 +13,7 @@ import {
 } from '../../core/index';
 import { averagedTasks } from './averagedTasks';
 import { type Columns, inlinedFirst, inlinedSecond } from './inlined';
+import { lightTasks } from './lightTasks';
 import type { Task } from './measure';
 import { repeatTasks } from './repeatTasks';
 import { columnsOf, fieldOf, randomOrbits } from './samples';
@@ -37,6 +38,7 @@ export function taskGroups(): readonly (readonly Task[])[] {
     averagedTasks(),
     solveTasks(),
     repeatTasks(),
+    lightTasks(),
   ];
 }
 

@@ -1,13 +1,16 @@
 /**
  * The integrated level: what a field of zonals must keep, and the orbit against odex with force code of the tests' own (zonals
- * as explicit powers, the Sun's pull as a plain difference; places of the Sun are those of core, as constants would be).
+ * as explicit powers, the pulls of Sun and Moon as plain differences; their places are those of core, as constants would be).
  */
 import { Outcome, Solver } from 'odex';
 import { describe, expect, it } from 'vitest';
 import {
+  bodies,
   gravitySets,
   integrateOrbit,
   type MeanElements,
+  type MoonPosition,
+  moonPosition,
   precessionMatrix,
   stateFromMean,
   sunPosition,
@@ -81,6 +84,17 @@ describe('integrateOrbit in a field of zonals', () => {
   });
 });
 
+/** Pull at a point for a unit of μ, less that at the Earth's centre. */
+function pullOf(seen: MoonPosition, jd: number, at: readonly number[]): readonly number[] {
+  const { directionMeanOfDate, distanceKm } = seen;
+  const place = transform(precessionMatrix(jd, epochJd), directionMeanOfDate).map((part) => part * distanceKm);
+  const away = Math.hypot(...at.map((part, index) => (place[index] ?? 0) - part));
+  return at.map((part, index) => {
+    const far = place[index] ?? 0;
+    return (far - part) / away ** 3 - far / distanceKm ** 3;
+  });
+}
+
 /** Position (km) after a time, by odex. */
 function truth(state: State, timeS: number): readonly number[] {
   const zonals = seriesAcceleration({ muKm3PerS2: mu, radiusKm: earth.radiusKm, zonals: earth.zonals });
@@ -93,19 +107,17 @@ function truth(state: State, timeS: number): readonly number[] {
   const derivative = (t: number, y: number[]) => {
     const [x = 0, py = 0, z = 0, vx = 0, vy = 0, vz = 0] = y;
     const jd = epochJd + t / 86_400;
-    const { directionMeanOfDate, distanceKm } = sunPosition(jd);
-    const sun = transform(precessionMatrix(jd, epochJd), directionMeanOfDate).map((part) => part * distanceKm);
     const at = [x, py, z];
     const extra = zonals(x, py, z);
-    const away = Math.hypot(...at.map((part, index) => (sun[index] ?? 0) - part));
-    const pulls = at.map((part, index) => {
-      const s = sun[index] ?? 0;
-      return (
+    const sun = pullOf(sunPosition(jd), jd, at);
+    const moon = pullOf(moonPosition(jd), jd, at);
+    const pulls = at.map(
+      (part, index) =>
         (-mu * part) / Math.hypot(...at) ** 3 +
         (extra[index] ?? 0) +
-        1.32712440018e11 * ((s - part) / away ** 3 - s / distanceKm ** 3)
-      );
-    });
+        1.32712440018e11 * (sun[index] ?? 0) +
+        bodies.moon.muKm3PerS2 * (moon[index] ?? 0),
+    );
     return [vx, vy, vz, ...pulls];
   };
   const { y, outcome } = solver.solve(derivative, 0, [...state.positionKm, ...state.velocityKmPerS], timeS);
@@ -113,10 +125,10 @@ function truth(state: State, timeS: number): readonly number[] {
   return y.slice(0, 3);
 }
 
-describe('integrateOrbit with zonals to 14 and the Sun, against odex', () => {
+describe('integrateOrbit with zonals to 14, Sun and Moon, against odex', () => {
   it.each(orbits)('stays within a metre over a day: $name', (orbit) => {
     const state = stateFromMean(earth, meanOf(orbit));
-    const forces = { zonalDegree: 14, sun: true, moon: false };
+    const forces = { zonalDegree: 14, sun: true, moon: true };
     const { samples } = integrateOrbit({ body: earth, state, epochJd, spanDays: 1, forces, sampleDays: 0.43 });
     const offs = samples.slice(1).map((sample) => {
       const exact = truth(state, sample.days * 86_400);

@@ -4,7 +4,15 @@
  */
 import { Body as Celestial, GeoVector } from 'astronomy-engine';
 import { describe, expect, it } from 'vitest';
-import { betaRad, eclipse, type MeanElements, periods, stateFromMean } from '../../core/index';
+import {
+  betaRad,
+  circularEclipseShare,
+  eclipse,
+  type MeanElements,
+  periods,
+  stateFromMean,
+  sunPosition,
+} from '../../core/index';
 import { meanOfDateFromJ2000, type Vec3 } from './skyOracle';
 import { cutField } from './truth/fields';
 import { integrateTo, noIntegrands, startOf } from './truth/integrate';
@@ -52,18 +60,24 @@ function timeBelow(values: readonly number[], spacingS: number): number {
   return below * spacingS;
 }
 
+/** Mean anomaly at which the Sun is hidden most. */
+function deepestRad(mean: MeanElements, sun: Vec3): number {
+  const depth = (meanAnomalyRad: number) =>
+    hidden(stateFromMean(body, { ...mean, meanAnomalyRad }).positionKm, sun).wholly;
+  const anomalies = Array.from({ length: 720 }, (_, index) => (index * Math.PI) / 360);
+  return anomalies.reduce((best, each) => (depth(each) < depth(best) ? each : best));
+}
+
 function counted(mean: MeanElements, date: Date): { umbraS: number; penumbraS: number } {
   const sun = sunKm(date);
   const period = periods(body, mean, 'second').nodalS;
   const count = Math.ceil(period / stepS);
   const wholly: number[] = [];
   const partly: number[] = [];
-  // Perigee moves within a revolution: a shadow must not lie across its seam.
-  const atPerigee = startOf(stateFromMean(body, mean));
-  const lit = hidden(atPerigee.positionKm, sun).partly > 0;
-  let motion = lit ? atPerigee : startOf(stateFromMean(body, { ...mean, meanAnomalyRad: Math.PI }));
+  // The elements are those of the deepest shadow, where node and perigee are asked for; they drift on within the revolution.
+  let motion = startOf(stateFromMean(body, { ...mean, meanAnomalyRad: deepestRad(mean, sun) }));
   for (let index = 0; index <= count; index += 1) {
-    motion = integrateTo(field, motion, (period * index) / count, noIntegrands);
+    motion = integrateTo(field, motion, period * (index / count - 0.5), noIntegrands);
     const seen = hidden(motion.positionKm, sun);
     wholly.push(seen.wholly);
     partly.push(seen.partly);
@@ -78,6 +92,9 @@ const cases = [
   { name: 'low, near the equator', a: 6878, e: 0.0005, i: 5, node: 200, perigee: 0, date: '2028-01-10' },
   { name: 'low, 51.6°', a: 6780, e: 0.001, i: 51.6, node: 120, perigee: 40, date: '2030-09-01' },
   { name: 'low, 51.6°, β near its limit', a: 6780, e: 0.001, i: 51.6, node: 172, perigee: 40, date: '2027-06-21' },
+  { name: 'low, 51.6°, short eclipse', a: 6780, e: 0.001, i: 51.6, node: 162, perigee: 40, date: '2027-06-21' },
+  { name: 'low, 51.6°, grazing', a: 6780, e: 0.001, i: 51.6, node: 163.3, perigee: 40, date: '2027-06-21' },
+  { name: 'low, 51.6°, penumbra alone', a: 6780, e: 0.001, i: 51.6, node: 164, perigee: 40, date: '2027-06-21' },
   { name: 'retrograde, 120°', a: 7400, e: 0.02, i: 120, node: 300, perigee: 200, date: '2031-11-11' },
   { name: 'transfer ellipse, apogee in shadow', a: 24_400, e: 0.72, i: 28, node: 10, perigee: 250, date: '2027-01-05' },
   { name: 'transfer ellipse, perigee in shadow', a: 24_400, e: 0.72, i: 28, node: 10, perigee: 90, date: '2027-01-05' },
@@ -124,5 +141,26 @@ describe('β and shadow against a count along the integrated orbit', () => {
     expect.soft(Math.abs(betaRad(body, mean, jd) / radPerDeg - trueBetaDeg)).toBeLessThan(betaDeg);
     expect.soft(Math.abs(off('umbraS'))).toBeLessThan(allowedS(truth.umbraS));
     expect.soft(Math.abs(off('penumbraS'))).toBeLessThan(allowedS(truth.penumbraS));
+  });
+});
+
+describe('published shadow of a low orbit', () => {
+  // A student project's document: 550 km above R 6371, β = 0: 35.7 min, 37.3 % of the revolution. 1 %, with their cylinder.
+  it('is 35.7 min and 37.3 % at 550 km and β 0', () => {
+    const small = { ...body, equatorialRadiusKm: 6371 };
+    const jd = 2_461_193;
+    const plane = { eccentricity: 0, inclinationRad: Math.PI / 2, perigeeRad: 0, meanAnomalyRad: 0 };
+    // A polar plane through the Sun.
+    const nodeRad = sunPosition(jd).rightAscensionRad;
+    const mean: MeanElements = { ...plane, semiMajorAxisKm: 6921, nodeRad };
+    expect(Math.abs(betaRad(small, mean, jd))).toBeLessThan(1e-12);
+    const { umbraS } = eclipse(small, mean, jd);
+    const share = umbraS / periods(small, mean, 'second').nodalS;
+    console.log(`550 km: umbra ${(umbraS / 60).toFixed(2)} min, ${(100 * share).toFixed(2)} %`);
+    expect(Math.abs(umbraS / 60 / 35.7 - 1)).toBeLessThan(0.01);
+    expect(Math.abs(share / 0.373 - 1)).toBeLessThan(0.01);
+    expect(Math.abs(circularEclipseShare({ radiusKm: 6371, heightKm: 550, betaRad: 0 }) / 0.373 - 1)).toBeLessThan(
+      0.01,
+    );
   });
 });
