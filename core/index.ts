@@ -301,7 +301,7 @@ export {
   signedQuantities,
   unitOf,
 } from './record/units';
-export { smallEccentricity, warningsOf } from './record/warnings';
+export { tinyEccentricity, warningsOf } from './record/warnings';
 export type { WorkingSymbol } from './record/workings/symbols';
 export type { Working, WorkingConstant, WorkingLine, WorkingValue } from './record/workings/working';
 export { workingDigits } from './record/workings/working';

@@ -1,6 +1,6 @@
 /** All that the place shows, computed once for an orbit and a span. */
 import { useMemo } from 'preact/hooks';
-import { apsisName, type ClosedFormDrift, type ResolvedOrbit, smallEccentricity } from '../../core/index';
+import { apsisName, type ClosedFormDrift, type ResolvedOrbit, tinyEccentricity } from '../../core/index';
 import { useApp } from '../state/appContext';
 import { type Change, changesOf } from './changes';
 import { type DriftPlot, driftPlots } from './plotModels';
@@ -29,7 +29,7 @@ function viewOf(orbit: ResolvedOrbit, drift: ClosedFormDrift): DriftView {
   const spanDays = drift.days.at(-1) ?? 0;
   const time = { epochJd: orbit.epochJd, spanDays };
   const apsis = apsisName(orbit.body);
-  const isRound = orbit.mean.eccentricity < smallEccentricity;
+  const isRound = orbit.mean.eccentricity < tinyEccentricity;
   return {
     orbit,
     drift,

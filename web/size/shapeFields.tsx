@@ -1,5 +1,5 @@
 /** The fields of the forms that type elements: shape, inclination, node. */
-import { readNumber } from '../../core/index';
+import { apsidesAt, readNumber } from '../../core/index';
 import { steppedClock } from '../parts/stepping';
 import { useApp } from '../state/appContext';
 import { switchNodeForm } from '../state/entryActions';
@@ -7,12 +7,13 @@ import { EntryField } from './entryField';
 
 export function ShapeFields() {
   const { document } = useApp();
-  const { form, lengthUnit, texts } = document.draft.value.entry;
+  const { entry, body } = document.draft.value;
+  const { form, lengthUnit, texts } = entry;
   return form === 'altitudes' ? (
     <>
       <EntryField
         field="perigeeAltitude"
-        label="Perigee altitude"
+        label={apsidesAt('Perigee altitude', { id: body })}
         unit={lengthUnit}
         stepSize={1}
         signed
@@ -20,7 +21,7 @@ export function ShapeFields() {
       />
       <EntryField
         field="apogeeAltitude"
-        label="Apogee altitude"
+        label={apsidesAt('Apogee altitude', { id: body })}
         unit={lengthUnit}
         stepSize={1}
         signed
@@ -94,9 +95,10 @@ function NodeFormChoice() {
 
 /** Perigee, anomaly: where in the plane. */
 export function PlaceFields() {
+  const { body } = useApp().document.draft.value;
   return (
     <>
-      <EntryField field="perigee" label="Argument of perigee" unit="°" stepSize={1} signed />
+      <EntryField field="perigee" label={apsidesAt('Argument of perigee', { id: body })} unit="°" stepSize={1} signed />
       <EntryField field="meanAnomaly" label="Mean anomaly" unit="°" stepSize={1} signed />
     </>
   );
