@@ -1,7 +1,7 @@
 /**
  * All state of the app, from one factory, so that each test starts fresh.
  *
- * Writable: the document, the route, the announcement, the working that is open. Everything else is computed.
+ * Writable: the document, the route, the announcement, the picture and its choices, the working that is open. Everything else is computed.
  */
 import { computed, effect, type ReadonlySignal, type Signal, signal } from '@preact/signals';
 import type { ClosedFormDrift, ReadingId } from '../../core/index';
@@ -10,10 +10,12 @@ import type { Store } from '../store/store';
 import { type Announcer, createAnnouncer } from './announce';
 import { createDocument, type OpenCandidate, type OrbitDocument } from './document';
 import { createDrift } from './drift';
+import { createMissionLink, type MissionLink } from './missionLink';
 import type { PictureId } from './picture';
 import { createPreferences, type Preferences } from './preferences';
 import { createRoute, type Route } from './route';
 import { createSaving, openedFrom, openedNew, type Saving } from './saving';
+import { firstSweep, type SweepChoice } from './sweepChoice';
 
 export interface AppState {
   readonly store: Store;
@@ -24,7 +26,9 @@ export interface AppState {
   readonly announcer: Announcer;
   readonly saving: Saving;
   readonly drift: ReadonlySignal<ClosedFormDrift | null>;
+  readonly mission: MissionLink;
   readonly picture: Signal<PictureId>;
+  readonly sweep: Signal<SweepChoice>;
   /** The reading whose working is open; null for none. */
   readonly openWorking: Signal<ReadingId | null>;
 }
@@ -42,6 +46,7 @@ export async function createAppState({ store, offline, page, newId }: AppStatePa
   const announcer = createAnnouncer();
   const preferences = createPreferences(store.settings);
   const saving = createSaving({ store, document, announcer, newId });
+  const spanDays = computed(() => preferences.values.value.spanDays);
   keepDraft(store, document);
   expireUndo(document, announcer);
   followHandOver(store, document);
@@ -53,11 +58,10 @@ export async function createAppState({ store, offline, page, newId }: AppStatePa
     route: createRoute(page),
     announcer,
     saving,
-    drift: createDrift(
-      document.orbit,
-      computed(() => preferences.values.value.spanDays),
-    ),
+    drift: createDrift(document.orbit, spanDays),
+    mission: createMissionLink({ document, spanDays }, async () => (await import('./missionStart')).startMission),
     picture: signal<PictureId>('chart'),
+    sweep: signal(firstSweep),
     openWorking: signal(null),
   };
 }
