@@ -5,6 +5,7 @@
 import { useRef } from 'preact/hooks';
 import { sampleAfterKey } from './plotCursor';
 import { spreadLabels } from './plotLabels';
+import { Band, Events, isDrawn, Points, percent } from './plotMarks';
 import type { PlotLine, PlotModel } from './plotModel';
 import { heightIn } from './plotScale';
 import { useCursorDrag } from './useCursorDrag';
@@ -51,9 +52,12 @@ export function Plot({ name, model, sample, momentText, valueText, onSample }: P
         onKeyDown={onKeyDown}
         {...drag}
       >
+        <Band model={model} />
         <Levels model={model} />
         <Zero model={model} />
         <OwnPoint model={model} />
+        <Points model={model} />
+        <Events model={model} />
         <Cursor model={model} sample={sample} momentText={momentText} />
         <LineEnds model={model} />
       </div>
@@ -61,7 +65,6 @@ export function Plot({ name, model, sample, momentText, valueText, onSample }: P
   );
 }
 
-const percent = (part: number): string => `${part * 100}%`;
 const valueAt = (line: PlotLine, sample: number): number => line.values[sample] ?? 0;
 
 function Cursor({ model, sample, momentText }: Pick<PlotProps, 'model' | 'sample' | 'momentText'>) {
@@ -81,8 +84,6 @@ function Cursor({ model, sample, momentText }: Pick<PlotProps, 'model' | 'sample
     </div>
   );
 }
-
-const isDrawn = ({ range }: PlotModel, value: number): boolean => value >= range.least && value <= range.greatest;
 
 function Zero({ model }: { readonly model: PlotModel }) {
   if (!isDrawn(model, 0)) return null;
@@ -111,7 +112,9 @@ function LineEnds({ model }: { readonly model: PlotModel }) {
   const ends = useRef<HTMLDivElement>(null);
   const { heightPx, linePx } = useHeights(ends);
   const levels = (model.levels ?? []).filter(({ at }) => isDrawn(model, at));
-  const parts = [...model.lines.map(lastValue), ...levels.map(({ at }) => at)].map((at) => heightIn(model.range, at));
+  const parts = [...model.lines.map(lastValue), ...levels.map(({ at }) => at)].map((at) =>
+    Math.max(0, Math.min(1, heightIn(model.range, at))),
+  );
   const wantedPx = parts.map((part) => (1 - part) * heightPx);
   const placedPx = spreadLabels(wantedPx, linePx, heightPx);
   return (

@@ -141,7 +141,7 @@ function axisInk(ink: PlotInk) {
 
 /** uPlot scales widths to the screen's pixels, but not dashes. */
 function seriesFor({ pattern, hue, weak }: PlotLine, ink: PlotInk): uPlot.Series {
-  const widthPx = pattern === 'first' ? ink.dotPx : ink.thinPx;
+  const widthPx = { averaged: ink.heavyPx, first: ink.dotPx, second: ink.thinPx, geometry: ink.thinPx }[pattern];
   const dashPx = pattern === 'first' ? [0, 2.6 * widthPx + 1] : pattern === 'second' ? [13, 5] : [];
   return {
     stroke: ink[hue],

@@ -9,6 +9,7 @@ export interface PlotInk {
   readonly fontPx: number;
   readonly thinPx: number;
   readonly dotPx: number;
+  readonly heavyPx: number;
   readonly rulePx: number;
 }
 
@@ -26,6 +27,7 @@ export function inkOf(element: HTMLElement): PlotInk {
     fontPx: Number.parseFloat(style.fontSize) || 14,
     thinPx: px('--line-thin'),
     dotPx: px('--line-mid'),
+    heavyPx: px('--line-heavy'),
     rulePx: px('--rule'),
   };
 }

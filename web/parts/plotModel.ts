@@ -5,8 +5,8 @@ export interface PlotLine {
   readonly id: string;
   /** NaN where there is nothing to draw. */
   readonly values: Float64Array;
-  /** By which method: first order is dotted, second order has long dashes, what needs no theory is solid. */
-  readonly pattern: 'first' | 'second' | 'geometry';
+  /** By which method: averaged is heavy and solid, first order dotted, second order dashed; what needs no theory is thin. */
+  readonly pattern: 'averaged' | 'first' | 'second' | 'geometry';
   /** What it is: hue and mark together, so that colour alone never says it. */
   readonly hue: 'node' | 'perigee' | 'ink';
   readonly mark: 'square' | 'diamond' | 'circle';
@@ -24,6 +24,27 @@ export interface PlotLevel {
   readonly label: string;
 }
 
+/** A stretch of values between two bounds, shaded. */
+export interface PlotBand {
+  readonly low: number;
+  readonly high: number;
+  readonly label: string;
+}
+
+/** Separate points: the orbit integrated. */
+export interface PlotPoints {
+  readonly id: string;
+  readonly x: Float64Array;
+  readonly values: Float64Array;
+  readonly hue: PlotLine['hue'];
+}
+
+/** A moment marked on the upper edge. */
+export interface PlotEvent {
+  readonly id: string;
+  readonly x: number;
+}
+
 /** A point of its own, such as the orbit at hand. */
 export interface PlotPoint {
   readonly x: number;
@@ -37,6 +58,9 @@ export interface PlotModel {
   readonly range: Range;
   readonly levels?: readonly PlotLevel[];
   readonly point?: PlotPoint | null;
+  readonly band?: PlotBand | null;
+  readonly points?: readonly PlotPoints[];
+  readonly events?: readonly PlotEvent[];
   /** Ticks of the axis along the foot, at most so many. */
   readonly xTicks: (most: number) => readonly Tick[];
   /** Written below the plot; the others of a stack only have the grid. */
