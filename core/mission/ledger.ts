@@ -98,7 +98,8 @@ function stageEnds(
       // A stage that lacks what lifts the perigee goes on through the surface: only its end counts.
       floorKm: Number.NEGATIVE_INFINITY,
       ceilingKm: Number.POSITIVE_INFINITY,
-      longestStepDays: options.longestStepDays ?? usualLongestStepDays,
+      // Without the Moon nothing turns faster than the year: twice the step loses nothing.
+      longestStepDays: (effect === 'moon' ? 1 : 2) * (options.longestStepDays ?? usualLongestStepDays),
       onProgress: (share) => options.onProgress?.((index + share) / stages.length),
     });
     return { effect, mean: track.samples.at(-1)?.mean ?? request.mean };

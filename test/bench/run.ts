@@ -1,4 +1,5 @@
 /** `npm run bench`: times as a table, and an exit code that says whether the bounds held. */
+import { historyBounds, historyLimits } from './historyTasks';
 import { lightLimits } from './lightTasks';
 import { measure, type Timing } from './measure';
 import { repeatLimits } from './repeatTasks';
@@ -39,13 +40,13 @@ function table(timings: readonly Timing[]): readonly string[] {
 const timings = taskGroups().flatMap((tasks) => measure(tasks, () => performance.now()));
 console.log(table(timings).join('\n'));
 console.log();
-for (const { name, yardstick, times } of bounds) {
+for (const { name, yardstick, times } of [...bounds, ...historyBounds]) {
   const ratio = nsOf(timings, name) / nsOf(timings, yardstick);
   const holds = ratio <= times;
   console.log(`${holds ? 'holds ' : 'BROKEN'}  ${name}: ${ratio.toFixed(2)} × ${yardstick}, at most ${times}`);
   if (!holds) process.exitCode = 1;
 }
-for (const { name, microseconds } of [...solveLimits, ...repeatLimits, ...lightLimits]) {
+for (const { name, microseconds } of [...solveLimits, ...repeatLimits, ...historyLimits, ...lightLimits]) {
   const taken = nsOf(timings, name) / 1000;
   const holds = taken <= microseconds;
   console.log(`${holds ? 'holds ' : 'BROKEN'}  ${name}: ${taken.toFixed(1)} µs, at most ${microseconds}`);

@@ -12,6 +12,7 @@ import {
   stateFromMean,
 } from '../../core/index';
 import { averagedTasks } from './averagedTasks';
+import { historyTasks } from './historyTasks';
 import { type Columns, inlinedFirst, inlinedSecond } from './inlined';
 import { lightTasks } from './lightTasks';
 import type { Task } from './measure';
@@ -38,6 +39,7 @@ export function taskGroups(): readonly (readonly Task[])[] {
     averagedTasks(),
     solveTasks(),
     repeatTasks(),
+    historyTasks(),
     lightTasks(),
   ];
 }
