@@ -46,6 +46,7 @@ function TrackPictures({ orbit, atHand }: PicturesProps) {
   const tracksStep = trackStepOf(orbit.body, orbit.mean, 'second') ?? 'west';
   const pattern = useMemo(() => trackPattern(cycle, tracksStep), [cycle.revolutions, cycle.days, tracksStep]);
   if (!track.ok) return <p class="map-none">{track.message}</p>;
+  const hasMap = orbit.body.id === 'earth';
   const swathKm = filter?.swathKm ?? null;
   const firstNodeRad = track.isPlaced ? track.firstNodeRad : null;
   return (
@@ -57,8 +58,8 @@ function TrackPictures({ orbit, atHand }: PicturesProps) {
         )}
       </p>
       <TakeNearest atHand={atHand} />
-      <MapControls {...{ span, legs, shading, model, cycle }} />
-      {orbit.body.id === 'earth' && (
+      <MapControls {...{ span, legs, shading, model, cycle, hasMap }} />
+      {hasMap && (
         <EarthFigure
           orbit={orbit}
           track={track}

@@ -33,7 +33,7 @@ export function mapAnswer({ atHand, track, props, unit }: AnswerParts): readonly
     });
     return [
       { text: 'The track does not close', strong: true },
-      { text: ` yet; after ${flown} it would with a ${change} ${unit}.${gapText(track, unit)}` },
+      { text: `: after ${flown} it ${gapText(track, unit)}. A change of a by ${change} ${unit} closes it.` },
     ];
   }
   return [
@@ -43,14 +43,14 @@ export function mapAnswer({ atHand, track, props, unit }: AnswerParts): readonly
 }
 
 function gapText(track: TrackDrawn, unit: Unit): string {
-  if (!track.isWhole) return '';
-  return ` As it is, the last one ends ${distance(Math.abs(track.gapKm), unit, 1)} ${side(track)} of the start.`;
+  if (!track.isWhole) return 'misses its start';
+  return `comes ${distance(Math.abs(track.gapKm), unit, 1)} ${side(track)} of where it began`;
 }
 
 /** Perigee goes round meanwhile, which shifts where an eccentric orbit crosses. */
 function endText(track: TrackDrawn, unit: Unit): string {
   if (!track.isWhole || Math.abs(track.gapKm) < closedKm) return '';
-  return ` Perigee has moved by then, so that it ends ${distance(Math.abs(track.gapKm), unit, 1)} ${side(track)} of its start.`;
+  return ` Perigee has moved by then, so that it comes ${distance(Math.abs(track.gapKm), unit, 1)} ${side(track)} of where it began.`;
 }
 
 const side = ({ gapKm }: TrackDrawn) => (gapKm < 0 ? 'west' : 'east');

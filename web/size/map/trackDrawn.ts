@@ -20,7 +20,7 @@ export interface TrackDrawn {
   readonly isWhole: boolean;
   readonly start: MapPoint;
   readonly end: MapPoint;
-  /** From start to end along the parallel, east positive. */
+  /** From start to end in longitude, as a length along the equator, east positive. */
   readonly gapKm: number;
   /** East longitude of the first ascending crossing. */
   readonly firstNodeRad: number;
@@ -67,7 +67,7 @@ export function trackDrawn({ orbit, cycle, span, revolutionsADay }: DrawnRequest
     isWhole: wholeCycle && revolutions === wanted,
     start,
     end,
-    gapKm: gapRad * body.equatorialRadiusKm * Math.cos(start.latitudeRad),
+    gapKm: gapRad * body.equatorialRadiusKm,
     firstNodeRad: firstNodeOf(track.lines),
     isPlaced,
   };

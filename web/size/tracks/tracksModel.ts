@@ -2,6 +2,7 @@
 import { computed, type ReadonlySignal, type Signal, signal } from '@preact/signals';
 import {
   kmPerLengthUnit,
+  type RepeatRequest,
   type ResolvedOrbit,
   readNumber,
   secondsPerDay,
@@ -112,6 +113,7 @@ function createListing({ search, wishes, show, sort, unit }: ListingParts): Read
   });
   return computed(() => {
     const request = search.found.value?.request;
+    if (isOfOtherBody(request, wishes.value)) return null;
     if (!request || !tracks.value || !listed.value || !filter.value || !order.value) return null;
     const answer = answerOf({
       tracks: tracks.value,
@@ -123,6 +125,12 @@ function createListing({ search, wishes, show, sort, unit }: ListingParts): Read
     const staleBecause = staleness(search, wishes.value);
     return { tracks: tracks.value, order: order.value, answer, swathKm: filter.value.swathKm, staleBecause };
   });
+}
+
+/** Tracks around another body are no older answer to this question: they are none. */
+function isOfOtherBody(found: RepeatRequest | undefined, { request }: TrackWishes): boolean {
+  if (!found || !request || found.body === request.body) return false;
+  return JSON.stringify(found.body) !== JSON.stringify(request.body);
 }
 
 function staleness(search: TrackSearch, { request, filter }: TrackWishes): string | null {

@@ -46,9 +46,9 @@ describe('the track that is drawn', () => {
   });
 
   it('of an orbit 1 km higher ends west, by what the longer period makes of it', () => {
-    const { gapKm, start } = drawn(orbitOf({ semiMajorAxisKm: track.semiMajorAxisKm + 1 }));
+    const { gapKm } = drawn(orbitOf({ semiMajorAxisKm: track.semiMajorAxisKm + 1 }));
     // The period grows by 3/2 Δa/a, and the ground goes on below for D days.
-    const expectedKm = -1.5 * (1 / track.semiMajorAxisKm) * 10 * 2 * Math.PI * 6378 * Math.cos(start.latitudeRad);
+    const expectedKm = -1.5 * (1 / track.semiMajorAxisKm) * 10 * 2 * Math.PI * 6378;
     expect(gapKm / expectedKm).toBeGreaterThan(0.9);
     expect(gapKm / expectedKm).toBeLessThan(1.2);
   });
