@@ -12,7 +12,7 @@ const conditions = /[\\/]core[\\/]record[\\/](conditions[\\/](kinds|readConditio
 
 /** Fetched when a condition, a chart or the book asks for it. */
 const onDemand =
-  /[\\/]core[\\/](design|forces|mission[\\/](averagedRates|equinoctial|gaussAverage|oblateness|orbitBasis)|numerics[\\/](bracket|linear|newton|roots)|record[\\/]conditions[\\/]settleOrbit)/;
+  /[\\/]core[\\/](design|forces|mission[\\/](averaged|circularEclipse|equinoctial|event|gaussAverage|history|integrate|leftOut|ledger|light|localTime|missionHistory|motion|oblateness|orbitBasis|orbitEvents|shadow|steadyMean|zonalCoupling)|numerics[\\/](bracket|crossings|dop853|linear|newton|ode|roots)|bodies[\\/](atmosphere|moonPosition|planetOrbits|poles|sunSeenFrom)|record[\\/]conditions[\\/]settleOrbit)/;
 
 // Core is pure: importing its table of contents needs none of the files that are not used from it.
 const pureCore = { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] };

@@ -1,7 +1,7 @@
 /** The integrator of `core` against odex (Hairer and Wanner's extrapolation method) on problems that are not orbits only. */
 import { Outcome, Solver } from 'odex';
 import { describe, expect, it } from 'vitest';
-import { componentScale, type OdeEnd, type OdeProblem, odeSteps } from '../../core/numerics/ode';
+import { componentScale, type OdeEnd, type OdeProblem, odeSteps } from '../../core/index';
 
 /** Runs to the end and returns the last values with how it ended. */
 function run(problem: OdeProblem): { values: Float64Array; end: OdeEnd } {
