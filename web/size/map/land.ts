@@ -1,10 +1,9 @@
 /** The land of the Earth, Natural Earth 1:110 m, from the app's own files; fetched once, when a map is first drawn. */
 import type { GeoPermissibleObjects } from 'd3-geo';
 import { feature } from 'topojson-client';
-import type { GeometryObject, Topology } from 'topojson-specification';
 import landUrl from 'world-atlas/land-110m.json?url';
 
-type LandTopology = Topology<{ readonly land: GeometryObject }>;
+type Topology = Parameters<typeof feature>[0];
 
 let known: Promise<GeoPermissibleObjects> | null = null;
 
@@ -20,6 +19,8 @@ export function loadLand(): Promise<GeoPermissibleObjects> {
 async function fetchLand(): Promise<GeoPermissibleObjects> {
   const response = await fetch(landUrl);
   if (!response.ok) throw new Error(`The map of the land was expected, got status ${response.status}`);
-  const topology = (await response.json()) as LandTopology;
-  return feature(topology, topology.objects.land);
+  const topology = (await response.json()) as Topology;
+  const { land } = topology.objects;
+  if (!land) throw new Error('The object “land” was expected in the map, got none');
+  return feature(topology, land);
 }
