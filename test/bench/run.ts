@@ -1,4 +1,5 @@
 /** `npm run bench`: times as a table, and an exit code that says whether the bounds held. */
+import { chartLimits } from './chartTasks';
 import { historyBounds, historyLimits } from './historyTasks';
 import { lightLimits } from './lightTasks';
 import { measure, type Timing } from './measure';
@@ -46,7 +47,13 @@ for (const { name, yardstick, times } of [...bounds, ...historyBounds]) {
   console.log(`${holds ? 'holds ' : 'BROKEN'}  ${name}: ${ratio.toFixed(2)} × ${yardstick}, at most ${times}`);
   if (!holds) process.exitCode = 1;
 }
-for (const { name, microseconds } of [...solveLimits, ...repeatLimits, ...historyLimits, ...lightLimits]) {
+for (const { name, microseconds } of [
+  ...solveLimits,
+  ...repeatLimits,
+  ...historyLimits,
+  ...lightLimits,
+  ...chartLimits,
+]) {
   const taken = nsOf(timings, name) / 1000;
   const holds = taken <= microseconds;
   console.log(`${holds ? 'holds ' : 'BROKEN'}  ${name}: ${taken.toFixed(1)} µs, at most ${microseconds}`);

@@ -12,6 +12,7 @@ import {
   stateFromMean,
 } from '../../core/index';
 import { averagedTasks } from './averagedTasks';
+import { chartTasks } from './chartTasks';
 import { historyTasks } from './historyTasks';
 import { type Columns, inlinedFirst, inlinedSecond } from './inlined';
 import { lightTasks } from './lightTasks';
@@ -37,6 +38,7 @@ export function taskGroups(): readonly (readonly Task[])[] {
     [...inlinedTasks(columns), ...ratesTasks(orbits, columns)],
     otherTasks(orbits),
     averagedTasks(),
+    chartTasks(),
     solveTasks(),
     repeatTasks(),
     historyTasks(),

@@ -93,11 +93,11 @@ function drawBelow(chart: Chart, surface: ChartSurface): readonly LabelBox[] {
   nameAltitudes(surface, ground, places);
   const drawn = drawCurves(surface, mapping, shown);
   drawFrame(surface, mapping);
+  labelRegions(surface, ground, places);
   const names = { mapping, drawn, places, rateUnit: units.rateUnit };
   nameAtTop(surface, names);
   nameRepeats(surface, names);
   nameRates(surface, names);
-  labelRegions(surface, ground, places);
   labelOutside(surface, mapping, { runs, places });
   return places.taken;
 }

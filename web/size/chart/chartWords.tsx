@@ -1,5 +1,5 @@
 /** Under the chart: what is near, in words, and the one tap that holds what the orbit snapped to. */
-import { type ReadonlySignal, useComputed } from '@preact/signals';
+import { effect, type ReadonlySignal, useComputed } from '@preact/signals';
 import { useEffect, useState } from 'preact/hooks';
 import type { Candidate } from '../../../core/index';
 import type { ShownCurve } from './chartCurvesShown';
@@ -21,7 +21,7 @@ export function ChartWords({ chart, before, onPutBack }: WordsProps) {
   return (
     <div class="rate-map-words">
       <p class="small">{words}</p>
-      <Spoken words={words} />
+      <Spoken chart={chart} words={words} />
       {!store.tabs.editorElsewhere.value && (
         <div class="rate-map-holds">
           <Hold chart={chart} />
@@ -44,19 +44,18 @@ function wordsOf(chart: Chart): string {
 const quietMs = 600;
 
 /** Said once the orbit has come to rest, not at every step of a drag. */
-function Spoken({ words }: { readonly words: ReadonlySignal<string> }) {
+function Spoken({ chart, words }: { readonly chart: Chart; readonly words: ReadonlySignal<string> }) {
   const [said, setSaid] = useState('');
-  useEffect(() => {
-    let timer = 0;
-    const stop = words.subscribe((text) => {
-      clearTimeout(timer);
-      timer = window.setTimeout(() => setSaid(text), quietMs);
-    });
-    return () => {
-      clearTimeout(timer);
-      stop();
-    };
-  }, [words]);
+  useEffect(
+    () =>
+      effect(() => {
+        if (chart.isDragging.value) return;
+        const text = words.value;
+        const timer = setTimeout(() => setSaid(text), quietMs);
+        return () => clearTimeout(timer);
+      }),
+    [chart, words],
+  );
   return (
     <p class="hidden-visually" role="status">
       {said}

@@ -53,6 +53,7 @@ interface Region {
   readonly fromKm: number;
   readonly toKm: number;
   readonly label: string;
+  readonly isFloor: boolean;
 }
 
 function regionsOf({ mapping, body, shape, ending, nameOf }: GroundParts): Region[] {
@@ -60,11 +61,11 @@ function regionsOf({ mapping, body, shape, ending, nameOf }: GroundParts): Regio
   const floor = chartFloor(body, shape);
   const apsis = body.id === 'earth' ? 'perigee' : 'periapsis';
   const floorLabel = floor.because === 'surface' ? `${apsis} below the surface` : `below its ${apsis}: no such orbit`;
-  const below = { fromKm, toKm: Math.min(floor.altitudeKm, toKm), label: floorLabel };
+  const below = { fromKm, toKm: Math.min(floor.altitudeKm, toKm), label: floorLabel, isFloor: true };
   const above = ending.flatMap((curve) =>
     curve.endAltitudeKm === null
       ? []
-      : [{ fromKm: Math.max(curve.endAltitudeKm, fromKm), toKm, label: `no ${nameOf(curve)} orbit` }],
+      : [{ fromKm: Math.max(curve.endAltitudeKm, fromKm), toKm, label: `no ${nameOf(curve)} orbit`, isFloor: false }],
   );
   return [below, ...above].filter((region) => region.toKm > region.fromKm);
 }
@@ -101,12 +102,15 @@ function edge({ context, ink }: Pick<ChartSurface, 'context' | 'ink'>, box: Mapp
   context.stroke();
 }
 
-/** After the lines, so that the text stands clear of them. */
+/** After the lines and before their names, which keep out of the region below. */
 export function labelRegions({ context, ink }: ChartSurface, parts: GroundParts, places: LabelPlaces): void {
   const { box, y } = parts.mapping;
   context.font = `${ink.fontPx * 0.93}px ${ink.fontFamily}`;
   for (const region of regionsOf(parts)) {
     const height = y(region.fromKm) - y(region.toKm);
+    if (region.isFloor) {
+      places.take({ left: box.left, right: box.right, top: y(region.toKm) - 3, bottom: box.bottom });
+    }
     if (height < ink.fontPx * 1.15) continue;
     const half = context.measureText(region.label).width / 2 + 7;
     const middle = { x: box.right - half - 10, y: y(region.fromKm) - Math.min(height / 2, ink.fontPx * 1.6) };

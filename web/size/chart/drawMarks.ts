@@ -86,9 +86,10 @@ function drawSnap({ context, ink }: ChartSurface, { mapping, on }: MarkParts, { 
 const longestName = 18;
 
 /** Small rings; a name is left out where it would meet another, and all are listed in the text beside the chart. */
-function drawOthers({ context, ink }: ChartSurface, { mapping, others }: MarkParts, mark: Spot): void {
+function drawOthers({ context, ink }: ChartSurface, { mapping, others, written }: MarkParts, mark: Spot): void {
   const { box } = mapping;
   const places = labelPlaces();
+  written.forEach(places.take);
   places.take(boxAround(mark.x, mark.y, { width: 2 * markRadius + 6, height: 2 * markRadius + 6 }));
   context.font = `${ink.fontPx * 0.93}px ${ink.fontFamily}`;
   context.textBaseline = 'middle';
