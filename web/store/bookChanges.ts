@@ -35,13 +35,13 @@ const idOf = (stored: unknown) =>
   typeof stored === 'object' && stored !== null && 'id' in stored ? stored.id : undefined;
 
 /**
- * Tells the kept draft that its content was saved as `row`. In the same transaction as the save: a crash right after
- * it would otherwise leave a draft that seems to conflict with the user's own save.
+ * Brings the kept draft up to what was saved as `row`. In the same transaction as the save: a draft is written a moment
+ * after it is typed, so a crash right after the save would otherwise open an older draft over it.
  */
 export async function rebaseDraft(rows: WritableRows, row: CandidateRow, basedOn: number | null): Promise<void> {
   const draft = await rows.draft('current');
   if (!draft || idOf(draft.candidate) !== row.id || draft.baseRevision !== basedOn) return;
-  await rows.putDraft('current', { ...draft, baseRevision: row.revision });
+  await rows.putDraft('current', { candidate: row.candidate, baseRevision: row.revision, typedAtIso: row.savedAtIso });
 }
 
 /** Whether the row holds something that an editor based on `basedOn` has not seen. */

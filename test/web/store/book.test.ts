@@ -13,6 +13,20 @@ describe.each(Object.entries(shelves))('the book %s', (_where, { open, reopen })
     expect(entry).toMatchObject({ kind: 'readable', id: 'one', revision: 1, candidate: candidateNamed('Coast') });
   });
 
+  it('brings the kept draft up to what was saved, which a killed process would else open an older one over', async () => {
+    const shelf = await open();
+    await shelf.change((rows) =>
+      rows.putDraft('current', {
+        candidate: candidateNamed('Coa'),
+        baseRevision: null,
+        typedAtIso: '2028-01-01T00:00:00Z',
+      }),
+    );
+    await bookOn(shelf).save(candidateNamed('Coast'), { note: '', basedOn: null });
+    const draft = valueIn(await (await reopen()).look((rows) => rows.draft('current')));
+    expect(draft).toMatchObject({ candidate: { name: 'Coast' }, baseRevision: 1 });
+  });
+
   it('keeps every revision with its note, latest first', async () => {
     const book = bookOn(await open());
     await book.save(candidateNamed('Coast'), { note: 'first', basedOn: null });
