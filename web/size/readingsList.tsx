@@ -44,7 +44,7 @@ interface RowsProps {
  */
 function Rows({ readings, isStale }: RowsProps) {
   const list = useRef<HTMLUListElement>(null);
-  const rested = useRested(readings);
+  const rested = useRested(useApp().document.readings);
   const isInView = useInView(list, readings.length);
   return (
     <ul ref={list} class={isStale ? 'is-stale' : ''}>
@@ -133,10 +133,13 @@ function Sensitivity({ reading }: { readonly reading: Reading }) {
     { value: perKm * kmPerUnit, per: `1 ${lengthUnit}` },
     { value: perHundredthDegree, per: '0.01°' },
     { value: perThousandth, per: '0.001 e' },
-  ].map(({ value, per }) => ({
-    per,
-    text: `+${per} ${roundedText(reading.quantity, value, { unitId, plus: true })}`,
-  }));
+  ]
+    // What changes nothing is not worth a figure.
+    .filter(({ value }) => value !== 0)
+    .map(({ value, per }) => ({
+      per,
+      text: `+${per} ${roundedText(reading.quantity, value, { unitId, plus: true })}`,
+    }));
   return (
     <span class="reading-sub">
       {parts.map(({ per, text }) => (

@@ -35,7 +35,8 @@ interface PicturesProps {
 }
 
 function TrackPictures({ orbit, atHand }: PicturesProps) {
-  const span = useSignal<DrawnSpan>('cycle');
+  // A cycle that nobody holds, and a long one, is only the nearest by arithmetic: its first day tells more.
+  const span = useSignal<DrawnSpan>(atHand.nearest && atHand.cycle.days > 5 ? 'day' : 'cycle');
   const legs = useSignal<Legs>('both');
   const shading = useSignal<'none' | 'swath'>('none');
   const model = tracksModelOf(useApp(), orbit);
