@@ -14,6 +14,10 @@ const conditions = /[\\/]core[\\/]record[\\/](conditions[\\/](kinds|readConditio
 const onDemand =
   /[\\/]core[\\/](design|forces|mission[\\/](averaged|circularEclipse|equinoctial|event|gaussAverage|history|integrate|leftOut|ledger|light|localTime|missionHistory|motion|oblateness|orbitBasis|orbitEvents|shadow|steadyMean|zonalCoupling)|numerics[\\/](bracket|crossings|dop853|linear|newton|ode|roots)|bodies[\\/](atmosphere|moonPosition|planetOrbits|poles|sunSeenFrom)|record[\\/]conditions[\\/]settleOrbit)/;
 
+/** What a mission is asked for and how it is put in words: fetched with the place that shows it. */
+const mission =
+  /[\\/]core[\\/](record[\\/]mission|mission[\\/]historyRequest|forces[\\/](drag|zonal)\.|bodies[\\/]atmosphere)|[\\/]web[\\/]state[\\/]mission(Outcome|Request)/;
+
 // Core is pure: importing its table of contents needs none of the files that are not used from it.
 const pureCore = { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] };
 
@@ -60,6 +64,7 @@ export default defineConfig({
           includeDependenciesRecursively: false,
           groups: [
             // Solving serves several places, none of them at the first page.
+            { name: 'mission', test: mission, priority: 3 },
             { name: 'design', test: onDemand, priority: 2 },
             { name: 'conditions', test: conditions, priority: 2 },
             {

@@ -1,22 +1,43 @@
-/** What does the orbit do over the mission? Rates now in a sentence, then drawn, then as tables. */
+/** What does the orbit do over the mission? The answer in a sentence, then drawn, then as tables. */
 import { useSignal } from '@preact/signals';
+import { useEffect } from 'preact/hooks';
 import { driftHeadline, firstOrderSentence } from '../../core/index';
 import { useApp } from '../state/appContext';
+import type { Mission } from '../state/mission';
 import { hashOf } from '../state/route';
 import { CursorTable } from './cursorTable';
 import './drift.css';
 import { DriftNotes } from './driftNotes';
 import { DriftPlots } from './driftPlots';
 import { type DriftView, useDriftView } from './driftView';
+import { ForcesPanel } from './mission/forcesPanel';
+import { MissionPlace } from './mission/missionPlace';
+import { MissionStatusLine } from './mission/missionStatusLine';
+import { useMissionView } from './mission/missionView';
 import { SpanChoice } from './spanChoice';
 import { SpanTable } from './spanTable';
 
 export function DriftPlace() {
+  const mission = useMission();
+  const missionView = useMissionView(mission);
   const view = useDriftView();
-  return view ? <Drawn view={view} /> : <Empty />;
+  if (mission && missionView) return <MissionPlace mission={mission} view={missionView} />;
+  return view ? <Drawn view={view} mission={mission} /> : <Empty />;
 }
 
-function Drawn({ view }: { readonly view: DriftView }) {
+/** Fetched with this place; null until it is there. */
+function useMission(): Mission | null {
+  const { mission: link } = useApp();
+  const mission = link.mission.value;
+  useEffect(() => {
+    void link.open();
+  }, [link]);
+  useEffect(() => mission?.watch(), [mission]);
+  return mission;
+}
+
+/** Rates of now held: for an orbit without an epoch, and until its history is there. */
+function Drawn({ view, mission }: { readonly view: DriftView; readonly mission: Mission | null }) {
   const { document } = useApp();
   const last = view.drift.days.length - 1;
   const sample = useSignal(last);
@@ -30,10 +51,12 @@ function Drawn({ view }: { readonly view: DriftView }) {
           </p>
         )}
         <Answer view={view} stale={stale} />
+        {mission && <MissionStatusLine mission={mission} />}
         <DriftPlots view={view} sample={sample} stale={stale} />
       </section>
       <aside class="numbers drift-numbers" aria-label="Span and values">
         <SpanChoice />
+        {mission && <ForcesPanel mission={mission} />}
         <CursorTable view={view} sample={sample} stale={stale} />
         <SpanTable view={view} stale={stale} />
         <DriftNotes view={view} />

@@ -23,11 +23,7 @@ export function Band({ model }: OfModel) {
   const place = (value: number) => Math.max(0, Math.min(1, heightIn(range, value)));
   const edges = `${isDrawn(model, band.low) ? ' has-low' : ''}${isDrawn(model, band.high) ? ' has-high' : ''}`;
   const box = { bottom: percent(place(band.low)), top: percent(1 - place(band.high)) };
-  return (
-    <div class={`plot-band${edges}`} style={box}>
-      <span class="plot-band-label">{band.label}</span>
-    </div>
-  );
+  return <div class={`plot-band${edges}`} style={box} />;
 }
 
 export function Points({ model }: OfModel) {

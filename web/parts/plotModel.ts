@@ -28,7 +28,6 @@ export interface PlotLevel {
 export interface PlotBand {
   readonly low: number;
   readonly high: number;
-  readonly label: string;
 }
 
 /** Separate points: the orbit integrated. */
