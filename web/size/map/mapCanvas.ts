@@ -2,9 +2,9 @@
  * Draws the map: land, grid, swath, track, crossings, start and end. Equirectangular, so that longitudes and latitudes
  * can be read off with a straight edge.
  */
-import { type GeoPermissibleObjects, geoEquirectangular, geoPath } from 'd3-geo';
 import type { GroundLine } from '../../../core/index';
 import type { ChartSurface } from '../../parts/chartCanvas';
+import type { Land, Shore } from './land';
 import { swathQuads } from './swath';
 import { crossingOf, type MapPoint, type TrackDrawn } from './trackDrawn';
 
@@ -15,10 +15,12 @@ export interface MapStyle {
 }
 
 export interface MapDrawing {
-  readonly land: GeoPermissibleObjects | null;
+  readonly land: Land | null;
   readonly track: TrackDrawn;
   readonly style: MapStyle;
 }
+
+const degree = Math.PI / 180;
 
 type Sheet = ChartSurface;
 type MapSize = Pick<ChartSurface, 'widthPx' | 'heightPx'>;
@@ -41,23 +43,33 @@ const isDrawn = (ascending: boolean, { legs }: MapStyle) => legs === 'both' || a
 const xOf = ({ widthPx }: MapSize, longitudeRad: number) => (longitudeRad / (2 * Math.PI) + 0.5) * widthPx;
 const yOf = ({ heightPx }: MapSize, latitudeRad: number) => (0.5 - latitudeRad / Math.PI) * heightPx;
 
-function drawLand({ context: pen, ink, widthPx, heightPx }: Sheet, land: GeoPermissibleObjects | null): void {
+function drawLand(sheet: Sheet, land: Land | null): void {
   if (!land) return;
-  const projection = geoEquirectangular()
-    .scale(widthPx / (2 * Math.PI))
-    .translate([widthPx / 2, heightPx / 2]);
+  const { context: pen, ink } = sheet;
   pen.beginPath();
-  geoPath(projection, pen)(land);
+  for (const { area } of land) addShore(sheet, area);
   pen.globalAlpha = 0.3;
   pen.fillStyle = ink.hair;
-  pen.fill();
+  // Inner shores are holes.
+  pen.fill('evenodd');
   pen.globalAlpha = 1;
+  pen.beginPath();
+  for (const { line } of land) addShore(sheet, line);
   pen.strokeStyle = ink.control;
   pen.lineWidth = ink.rulePx * 0.6;
   pen.stroke();
 }
 
-const degree = Math.PI / 180;
+function addShore(sheet: Sheet, shore: Shore['line']): void {
+  const { context: pen, widthPx } = sheet;
+  for (const shiftPx of [-widthPx, 0, widthPx]) {
+    for (const [index, [longitude, latitude]] of shore.entries()) {
+      const [x, y] = [xOf(sheet, longitude * degree) + shiftPx, yOf(sheet, latitude * degree)];
+      if (index === 0) pen.moveTo(x, y);
+      else pen.lineTo(x, y);
+    }
+  }
+}
 
 function drawGrid(sheet: Sheet): void {
   const { context: pen, ink, widthPx, heightPx } = sheet;

@@ -1,9 +1,8 @@
 /** The canvas with the map, drawn anew when the track, its size or the lighting changes. */
-import type { GeoPermissibleObjects } from 'd3-geo';
 import { useEffect, useRef, useState } from 'preact/hooks';
 import { type ChartLayer, chartLayer } from '../../parts/chartCanvas';
 import { createFrame } from '../../parts/frame';
-import { loadLand } from './land';
+import { type Land, loadLand } from './land';
 import { drawMap, type MapDrawing } from './mapCanvas';
 
 interface MapProps extends Omit<MapDrawing, 'land'> {
@@ -39,7 +38,7 @@ export function WorldMap({ says, hasLand, track, style }: MapProps) {
 }
 
 function useLand(isWanted: boolean) {
-  const [land, setLand] = useState<GeoPermissibleObjects | null>(null);
+  const [land, setLand] = useState<Land | null>(null);
   const [failed, setFailed] = useState(false);
   useEffect(() => {
     let isShown = isWanted;
