@@ -41,8 +41,9 @@ const parallaxTerms: readonly Term[] = [
 
 /**
  * The Moon by the low-precision series of the Astronomical Almanac, section D ("Low-precision formulae for geocentric
- * coordinates of the Moon"; coefficients from memory, compared with a full theory in the tests): 0.3° in direction, 0.2 % in
- * distance at most is what the Almanac claims.
+ * coordinates of the Moon"; coefficients from memory). The Almanac claims 0.3° in longitude and 0.2° in latitude; against a
+ * full theory, 20 000 dates of 1950 to 2100, the direction is off by 0.11° (root mean square) and 0.38° at worst, the
+ * distance by 0.33 %.
  */
 export function moonPosition(jdUtc: number): MoonPosition {
   const centuries = terrestrialCenturies(jdUtc);

@@ -20,7 +20,7 @@ const radPerDeg = Math.PI / 180;
 const earth = gravitySets.EGM2008;
 
 /**
- * After 366 days, degrees but for e. Measured in brackets, worst of the kind; started from mean elements that meet the
+ * At every station of 366 days, degrees but for e. Measured in brackets, worst of the kind; started from mean elements that meet the
  * truth's first twelve revolutions.
  */
 const tolerances: Record<
@@ -29,13 +29,13 @@ const tolerances: Record<
 > = {
   // [0.0031, 0.00007, 1.3e-6]
   sunSynchronous: { nodeDeg: 0.006, inclinationDeg: 0.0002, vector: 4e-6 },
-  // [0.017, 0.00001, 6.2e-6]: third order in J2.
+  // [0.017, 0.00002, 8.3e-6]: third order in J2.
   low: { nodeDeg: 0.05, inclinationDeg: 0.0002, vector: 2e-5 },
   // [0.053, 0.00002, 7.6e-6]: likewise; the node goes round eight times.
   lowNearEquator: { nodeDeg: 0.2, inclinationDeg: 0.0002, vector: 2e-5 },
-  // [0.0026, 0.00006, 1.8e-5]: what is small elsewhere adds up where the perigee hardly moves.
+  // [0.0026, 0.00013, 1.8e-5]: what is small elsewhere adds up where the perigee hardly moves.
   nearCritical: { nodeDeg: 0.05, inclinationDeg: 0.0002, vector: 5e-5 },
-  // [0.0090, 0.00037, 2.1e-4 of e 0.7, 0.02° of perigee]: the Moon moves on while the satellite goes round.
+  // [0.0090, 0.00045, 2.1e-4 of e 0.7, 0.02° of perigee]: the Moon moves on while the satellite goes round.
   ellipse: { nodeDeg: 0.05, inclinationDeg: 0.001, vector: 5e-4 },
 };
 
