@@ -1,23 +1,29 @@
-import { useEffect, useRef, useState } from 'preact/hooks';
+import { effect, type ReadonlySignal, useSignal } from '@preact/signals';
+import { useEffect } from 'preact/hooks';
 
 const restMs = 120;
 
-/** The value as it last stood still for a moment; the newest where it has not changed since. */
-export function useRested<Value>(value: Value): Value {
-  const [rested, setRested] = useState(value);
-  const latest = useRef({ value, sinceMs: 0 });
-  const timer = useRef(0);
-  if (latest.current.value !== value) latest.current = { value, sinceMs: performance.now() };
+/** What the signal held when it last stood still for a moment. */
+export function useRested<Value>(source: ReadonlySignal<Value>): Value {
+  const rested = useSignal(source.peek());
   useEffect(() => {
-    if (rested === value || timer.current !== 0) return;
+    let timer = 0;
+    let changedMs = 0;
     // One timer for a whole drag, not one for each of its steps.
     const look = () => {
-      const leftMs = latest.current.sinceMs + restMs - performance.now();
-      timer.current = leftMs > 0 ? window.setTimeout(look, leftMs) : 0;
-      if (leftMs <= 0) setRested(latest.current.value);
+      const leftMs = changedMs + restMs - performance.now();
+      timer = leftMs > 0 ? window.setTimeout(look, leftMs) : 0;
+      if (leftMs <= 0) rested.value = source.peek();
     };
-    timer.current = window.setTimeout(look, restMs);
-  }, [value, rested]);
-  useEffect(() => () => clearTimeout(timer.current), []);
-  return rested;
+    const stop = effect(() => {
+      if (source.value === rested.peek()) return;
+      changedMs = performance.now();
+      if (timer === 0) timer = window.setTimeout(look, restMs);
+    });
+    return () => {
+      clearTimeout(timer);
+      stop();
+    };
+  }, [source, rested]);
+  return rested.value;
 }
