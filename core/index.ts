@@ -159,7 +159,7 @@ export {
   localTimeModel,
 } from './mission/localTimeHistory';
 export { decayHeightKm, type HistoryOptions, type MissionHistory, missionHistory } from './mission/missionHistory';
-export { steadyMean } from './mission/steadyMean';
+export { meanOfSteady, steadyMean } from './mission/steadyMean';
 export { degPerRad, radPerDeg, secondsPerDay, twoPi, wrapPi, wrapTwoPi } from './numerics/angles';
 export { componentScale, type ErrorScale, type OdeEnd, type OdeProblem, type OdeStep, odeSteps } from './numerics/ode';
 export type { KeplerianElements, MeanElements, OsculatingElements, StateVector, Theory } from './orbit/elements';

@@ -2,10 +2,10 @@
  * Mean elements over a mission: the averaged level.
  *
  * Rates: J2 and J2² in closed form with their long-period part, averaged zonals from J3 and their secular products with J2,
- * averaged Sun, Moon and drag, whichever are on. Sun and Moon are averaged over the orbit, not over their own motion: they stand where they are at that moment, so
- * fortnightly and yearly terms come out. Steps of two days at most, shorter where J2 turns the orbit fast or drag bites.
- * Left out: tesserals, tides, radiation pressure, products of J2 with Sun, Moon and drag. Errors against integrated orbits
- * are held in test/external/missionHistory.test.ts and stated in the README.
+ * averaged Sun, Moon and drag, whichever are on. Sun and Moon are averaged over the orbit, not over their own motion: they
+ * stand where they are at that moment, so fortnightly and yearly terms come out. Steps of two days at most, shorter where
+ * J2 turns the orbit fast or drag bites. Left out: tesserals, tides, radiation pressure, products of J2 with Sun, Moon and
+ * drag. Errors against integrated orbits are held in test/external/missionHistory.test.ts and stated in the README.
  */
 import { isoFromJulianDate } from '../bodies/julianDate';
 import { historyModel, type LeftOutForce } from './historyForces';

@@ -33,3 +33,13 @@ export function steadyMean(body: Body, mean: MeanElements, zonalDegree: number):
   const excess = energy(stateFromMean(body, mean)) - average;
   return { ...mean, semiMajorAxisKm: a + (2 * a * a * excess) / body.muKm3PerS2 };
 }
+
+/**
+ * The other way: Brouwer mean elements whose state keeps the a given. An integration that is to follow a design's mean
+ * elements, which are averages, starts from the state of these.
+ */
+export function meanOfSteady(body: Body, steady: MeanElements, zonalDegree: number): MeanElements {
+  // The shift follows a by less than 1e-4 of itself: one step is enough.
+  const shifted = steadyMean(body, steady, zonalDegree).semiMajorAxisKm;
+  return { ...steady, semiMajorAxisKm: 2 * steady.semiMajorAxisKm - shifted };
+}

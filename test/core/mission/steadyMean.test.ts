@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { zonalForce } from '../../../core/forces/zonal';
 import { zonalPotential } from '../../../core/forces/zonalPotential';
 import { bodies, stateFromMean } from '../../../core/index';
-import { steadyMean } from '../../../core/mission/steadyMean';
+import { meanOfSteady, steadyMean } from '../../../core/mission/steadyMean';
 import { at, orbits } from './orbits';
 
 const { earth } = bodies;
@@ -26,6 +26,12 @@ describe('steady mean elements', () => {
       sum += (steadyMean(earth, mean, 14).semiMajorAxisKm - mean.semiMajorAxisKm) / count;
     }
     expect(Math.abs(sum)).toBeLessThan(1e-6);
+  });
+
+  it('lead back to the mean elements that they came from', () => {
+    const mean = at({ eccentricity: 0.02, inclinationRad: 1.2, meanAnomalyRad: 2 });
+    const back = meanOfSteady(earth, steadyMean(earth, mean, 14), 14);
+    expect(Math.abs(back.semiMajorAxisKm - mean.semiMajorAxisKm)).toBeLessThan(1e-5);
   });
 
   it('do nothing where there is only the central attraction', () => {
