@@ -4,6 +4,7 @@ import { defineConfig } from 'vite';
 import { buildVersion } from './web/build/buildVersion.ts';
 import { contentSecurityPolicy, contentSecurityPolicyTag } from './web/build/contentSecurityPolicy.ts';
 import { offlineWorker } from './web/build/offlineWorker.ts';
+import { workerEntries } from './web/build/workerEntries.ts';
 
 const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
 
@@ -21,17 +22,21 @@ const mission =
 // Core is pure: importing its table of contents needs none of the files that are not used from it.
 const pureCore = { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] };
 
+/** Core and the one package that it needs. */
+const core = /[\\/](core|node_modules[\\/]valibot)[\\/]/;
+
+const page = /[\\/]web[\\/]index\.html$/;
+
 interface ModuleGraph {
-  getModuleInfo(id: string): { readonly isEntry: boolean; readonly importers: readonly string[] } | null;
+  getModuleInfo(id: string): { readonly importers: readonly string[] } | null;
 }
 
-/** Whether a chain of imports that run at once leads to the module from the page's entry. */
+/** Whether a chain of imports that run at once leads to the module from the page; workers are entries of their own. */
 function isOfFirstPage(id: string, graph: ModuleGraph): boolean {
   const seen = new Set([id]);
   for (const each of seen) {
-    const info = graph.getModuleInfo(each);
-    if (info?.isEntry) return true;
-    for (const importer of info?.importers ?? []) seen.add(importer);
+    if (page.test(each)) return true;
+    for (const importer of graph.getModuleInfo(each)?.importers ?? []) seen.add(importer);
   }
   return false;
 }
@@ -45,10 +50,10 @@ export default defineConfig({
   define: { __DRIFTBOOK_VERSION__: JSON.stringify(buildVersion(root)) },
   plugins: [
     preact(),
+    workerEntries(),
     contentSecurityPolicyTag(),
     offlineWorker({ entry: `${root}/web/offline/serviceWorker.ts`, fileName: 'serviceWorker.js' }),
   ],
-  worker: { format: 'es', rolldownOptions: { treeshake: pureCore } },
   build: {
     outDir: `${root}/dist`,
     emptyOutDir: true,
@@ -65,13 +70,20 @@ export default defineConfig({
           groups: [
             // Solving serves several places, none of them at the first page.
             { name: 'mission', test: mission, priority: 3 },
-            { name: 'design', test: onDemand, priority: 2 },
+            { name: 'design', test: onDemand, minShareCount: 2, priority: 2 },
             { name: 'conditions', test: conditions, priority: 2 },
+            // Apart from what needs a page, since workers load it too.
+            {
+              name: (id, graph) => (isOfFirstPage(id, graph) ? 'core' : null),
+              debugName: 'core',
+              test: core,
+              minShareCount: 2,
+              priority: 1,
+            },
             {
               name: (id, graph) => (isOfFirstPage(id, graph) ? 'shared' : null),
               debugName: 'shared',
               minShareCount: 2,
-              priority: 1,
             },
           ],
         },
