@@ -22,10 +22,6 @@ export function add(a: Vec3, b: Vec3): Vec3 {
   return [a[0] + b[0], a[1] + b[1], a[2] + b[2]];
 }
 
-export function subtract(a: Vec3, b: Vec3): Vec3 {
-  return [a[0] - b[0], a[1] - b[1], a[2] - b[2]];
-}
-
 /** `a·x + b·y`, the combination that places a point in a plane. */
 export function combine(a: number, x: Vec3, b: number, y: Vec3): Vec3 {
   return [a * x[0] + b * y[0], a * x[1] + b * y[1], a * x[2] + b * y[2]];
