@@ -10,6 +10,7 @@ import './style/base.css';
 import './style/shell.css';
 import './style/narrow.css';
 import './parts/fields.css';
+import './parts/fold.css';
 
 const host = document.getElementById('app');
 if (!host) throw new Error('The page has no element with the id "app"');

@@ -25,11 +25,17 @@ const nearlySynchronousMinPerYear = 15;
 /** A node slower than this takes 1000 years to go round. */
 const stillDegPerDay = 360 / (stationaryYears * 365.25);
 
+export interface HeadlineOptions {
+  readonly rateUnit?: string;
+  /** What the averaged method says of local time over the mission, in place of the closed form's rate of now. */
+  readonly localTime?: readonly HeadlineSpan[] | null;
+}
+
 /** Two sentences, node then perigee, in spans; joined they read as plain text. */
 export function headlineOf(
   orbit: Pick<ResolvedOrbit, 'body' | 'mean'>,
   readings: readonly Reading[],
-  options: { readonly rateUnit?: string } = {},
+  options: HeadlineOptions = {},
 ): HeadlineSpan[] {
   const value = (wanted: ReadingId) => readings.find(({ id }) => id === wanted)?.value;
   const rates: Rates = { node: needed(value('nodeRate')), perigee: needed(value('perigeeRate')), ...options };
@@ -62,10 +68,9 @@ function farOutSpans(rates: Rates): HeadlineSpan[] {
   ];
 }
 
-interface Rates {
+interface Rates extends HeadlineOptions {
   readonly node: number;
   readonly perigee: number;
-  readonly rateUnit?: string;
 }
 
 function needed(value: number | undefined): number {
@@ -78,7 +83,8 @@ function nodeSpans(rates: Rates, drift: Reading | undefined): HeadlineSpan[] {
   const minutes = drift === undefined ? Number.NaN : drift.value * perCore;
   const rate: HeadlineSpan = { text: rateText(rates.node, rates), mark: 'node', strong: true };
   if (Math.abs(minutes) < nearlySynchronousMinPerYear) {
-    return synchronousSpans(rate, minutes, (drift?.doubt?.size ?? 0) * perCore);
+    const spans = synchronousSpans(rate, minutes, (drift?.doubt?.size ?? 0) * perCore);
+    return rates.localTime ? [...spans.slice(0, 3), { text: '. ' }, ...rates.localTime] : spans;
   }
   if (isStill(rates.node)) return [{ text: 'The node stands still now', mark: 'node', strong: true }, { text: '.' }];
   const sense = rates.node < 0 ? 'regresses' : 'advances';

@@ -40,7 +40,7 @@ export function SizePlace() {
 }
 
 function Headline() {
-  const { document, preferences } = useApp();
+  const { document, preferences, mission } = useApp();
   const orbit = document.orbit.value;
   if (!orbit) {
     return <h1 class="headline">Type or paste an orbit to read how its node and perigee drift.</h1>;
@@ -48,6 +48,7 @@ function Headline() {
   const { rateUnit } = preferences.values.value;
   const spans = headlineOf(orbit, document.readings.value, {
     rateUnit: rateUnit === 'degPerYear' ? 'deg/yr' : 'deg/day',
+    localTime: mission.mission.value?.claim.value ?? null,
   });
   return (
     <h1 class={`headline${document.stale.value ? ' is-stale' : ''}`}>

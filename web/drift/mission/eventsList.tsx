@@ -62,7 +62,10 @@ function EventGroup({ title, events, view, sample }: EventGroupProps) {
   return (
     <details class="fold">
       <summary>
-        {title}: {events.length}, first {dateText(events[0])}
+        <span class="fold-title">{title}</span>{' '}
+        <span class="fold-says">
+          {events.length}, first {dateText(events[0])}
+        </span>
       </summary>
       {list}
     </details>

@@ -21,7 +21,7 @@ export function ForcesPanel({ mission }: PanelProps) {
   return (
     <details class="fold forces" open={hasErrors || undefined}>
       <summary>
-        <strong>Forces and box</strong> <span class="soft">{says}</span>
+        <span class="fold-title">Forces and box</span> <span class="fold-says">{says}</span>
       </summary>
       <div class="forces-fields">
         <Switches mission={mission} />

@@ -131,7 +131,9 @@ function Sources({ ledger }: { readonly ledger: LedgerPart }) {
   }
   return (
     <details class="fold">
-      <summary>What is left out, and how its bound is known</summary>
+      <summary>
+        <span class="fold-title">What is left out</span> <span class="fold-says">how its bound is known</span>
+      </summary>
       <dl>
         {ledger.bounds.map((bound) => (
           <div key={bound.effect}>

@@ -40,7 +40,7 @@ function eclipsePlot(umbra: Float64Array, either: Float64Array, caption: string)
     pattern,
     ...ink,
     weak: false,
-    label: [id === 'umbra' ? 'umbra' : '+ pen', id === 'umbra' ? '' : 'umbra'],
+    label: [id === 'umbra' ? 'umbra' : '+ pen.', ''],
   });
   return {
     id: 'eclipse',

@@ -48,10 +48,14 @@ export function judgedOf({ request, look }: TakenLook, apsis: string): LookJudge
   const node = turned('nodeRad');
   const rows = [
     rowOf({ id: 'node', title: 'Node', unit: '°', hue: 'node' }, node, 4),
-    rowOf({ id: 'perigee', title: `ω of ${apsis}`, unit: '°', hue: 'perigee' }, turned('perigeeRad'), 2),
-    rowOf({ id: 'inclination', title: 'Inclination', unit: '°', hue: 'ink' }, held('inclinationRad', degPerRad), 5),
-    rowOf({ id: 'a', title: 'Semi-major axis', unit: 'm', hue: 'ink' }, held('semiMajorAxisKm', 1000), 0),
-    rowOf({ id: 'e', title: 'Eccentricity', unit: '', hue: 'ink' }, held('eccentricity', 1), 6),
+    rowOf(
+      { id: 'perigee', title: apsis.charAt(0).toUpperCase() + apsis.slice(1), unit: '°', hue: 'perigee' },
+      turned('perigeeRad'),
+      2,
+    ),
+    rowOf({ id: 'inclination', title: 'Inclination', unit: '°', hue: 'ink' }, held('inclinationRad', degPerRad), 4),
+    rowOf({ id: 'a', title: 'a', unit: 'm', hue: 'ink' }, held('semiMajorAxisKm', 1000), 0),
+    rowOf({ id: 'e', title: 'e', unit: '10⁻⁶', hue: 'ink' }, held('eccentricity', 1e6), 0),
   ];
   return { days, sentence: sentenceOf(days, node), rows };
 }
@@ -71,7 +75,7 @@ function rowOf(
   };
 }
 
-/** “After 30 days the closed form’s node is 0.04° ahead of the integrated one, …”. */
+/** “After 30 days the closed form’s node is 0.04° ahead (second order; …”. */
 function sentenceOf(days: number, { integrated, averaged, second, first }: Change): string {
   const count = formatNumber(days, { digits: Number.isInteger(days) ? 0 : 1 });
   const sense = integrated < 0 ? -1 : 1;
@@ -83,7 +87,7 @@ function sentenceOf(days: number, { integrated, averaged, second, first }: Chang
     return `${formatNumber(size, { digits })}° ${ahead > 0 ? 'ahead' : 'behind'}`;
   };
   return (
-    `After ${count} days the closed form’s node is ${apart(second)} of the integrated one ` +
-    `(second order; first order ${apart(first)}). The averaged node is ${apart(averaged)}.`
-  ).replaceAll('within 0.0001° of', 'within 0.0001° of');
+    `After ${count} days the closed form’s node is ${apart(second)} (second order; first order ${apart(first)}), ` +
+    `the averaged one ${apart(averaged)}, against the orbit integrated.`
+  );
 }

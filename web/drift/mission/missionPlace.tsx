@@ -1,7 +1,7 @@
 /** The place where a history is there: the averaged method's answer, plots, dial, events, ledger and second look. */
 import { type Signal, useSignal } from '@preact/signals';
 import { useEffect } from 'preact/hooks';
-import { forcesText, type HeadlineSpan } from '../../../core/index';
+import { apsisName, forcesText, type HeadlineSpan } from '../../../core/index';
 import { Plot } from '../../parts/plot';
 import '../../parts/plot.css';
 import { useApp } from '../../state/appContext';
@@ -13,6 +13,7 @@ import { EventsList } from './eventsList';
 import { ForcesPanel } from './forcesPanel';
 import { Ledger } from './ledger';
 import { LocalTimeDial } from './localTimeDial';
+import { judgedOf } from './lookWords';
 import './mission.css';
 import type { MissionPlot } from './missionPlots';
 import { MissionStatusLine } from './missionStatusLine';
@@ -40,7 +41,7 @@ export function MissionPlace({ mission, view }: PlaceProps) {
             Drawn for the last good entry: something in <a href={hashOf('size')}>Size</a> cannot be read yet.
           </p>
         )}
-        <MissionAnswer view={view} stale={stale} />
+        <MissionAnswer mission={mission} view={view} stale={stale} />
         <MissionStatusLine mission={mission} />
         <div class={`plots${stale}`}>
           {view.plots.map((plot) => (
@@ -68,10 +69,13 @@ export function MissionPlace({ mission, view }: PlaceProps) {
   );
 }
 
-function MissionAnswer({ view, stale }: { readonly view: MissionView; readonly stale: string }) {
+function MissionAnswer({ mission, view, stale }: PlaceProps & { readonly stale: string }) {
   const { history, ledger, request } = view.result;
   const left = ledger && leftOutSum(ledger.bounds);
-  const spread = left ? ` What is left out moves the node by ${sizeText(left.nodeDeg)}° at most.` : '';
+  const clock = left && history.localTimeH ? `, local time by ${sizeText(left.localTimeMin)} min` : '';
+  const spread = left ? ` What is left out moves the node by ${sizeText(left.nodeDeg)}°${clock} at most.` : '';
+  const { taken, stale: lookIsStale } = mission.secondLook;
+  const judged = taken.value && !lookIsStale.value ? judgedOf(taken.value, apsisName(request.body)) : null;
   return (
     <div class={`drift-answer${stale}`}>
       <h1 class="headline">
@@ -85,6 +89,7 @@ function MissionAnswer({ view, stale }: { readonly view: MissionView; readonly s
       <p class="small soft">
         By the averaged method: {forcesText(request.forces, history.leftOut)}.{spread}
       </p>
+      <div role="status">{judged && <p class="small">Second look: {judged.sentence}</p>}</div>
     </div>
   );
 }

@@ -43,7 +43,7 @@ export function methodLines({ averaged, second, first }: MethodLines, look: Look
   return [
     ...(first ? [line('first', first, ['1st', ' order'])] : []),
     ...(second ? [line('second', second, ['2nd', ' order'])] : []),
-    line('averaged', averaged, ['aver', 'aged']),
+    line('averaged', averaged, ['averaged', '']),
   ];
 }
 

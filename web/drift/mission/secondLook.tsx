@@ -39,7 +39,7 @@ function Judged({ taken, isStale }: { readonly taken: TakenLook; readonly isStal
   return (
     <div class={isStale ? 'is-stale' : ''}>
       {isStale && <p class="stale-says">Of an earlier orbit or other forces: take it again.</p>}
-      <p class="look-says" role="status">
+      <p class="look-says">
         {judged.sentence}
         {endedBy === 'decay' && ' There the orbit decays.'}
         {endedBy === 'escape' && ' There the ellipse opens.'}
@@ -56,14 +56,14 @@ function Judged({ taken, isStale }: { readonly taken: TakenLook; readonly isStal
 
 function LookTable({ rows, days }: { readonly rows: readonly LookRow[]; readonly days: number }) {
   return (
-    <div class="drift-table">
+    <div class="drift-table look-table">
       <table>
         <caption>
-          <span>Change in {Math.round(days)} days</span> <span class="soft small">the others less the integrated</span>
+          <span>Change in {Math.round(days)} days</span> <span class="soft small">others less integrated</span>
         </caption>
         <thead>
           <tr>
-            <th scope="col">mean element</th>
+            <th scope="col">mean</th>
             <th scope="col">integrated</th>
             <th scope="col">averaged</th>
             <th scope="col">2nd order</th>
