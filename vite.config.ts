@@ -3,6 +3,7 @@ import { preact } from '@preact/preset-vite';
 import { defineConfig } from 'vite';
 import { buildVersion } from './web/build/buildVersion.ts';
 import { contentSecurityPolicy, contentSecurityPolicyTag } from './web/build/contentSecurityPolicy.ts';
+import { landOutline } from './web/build/landOutline.ts';
 import { offlineWorker } from './web/build/offlineWorker.ts';
 import { workerEntries } from './web/build/workerEntries.ts';
 
@@ -51,6 +52,7 @@ export default defineConfig({
   plugins: [
     preact(),
     workerEntries(),
+    landOutline(),
     contentSecurityPolicyTag(),
     offlineWorker({ entry: `${root}/web/offline/serviceWorker.ts`, fileName: 'serviceWorker.js' }),
   ],

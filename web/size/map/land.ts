@@ -1,6 +1,5 @@
+/// <reference path="./outline.d.ts" />
 /** The land of the Earth, Natural Earth 1:110 m, from the app's own files; fetched once, when a map is first drawn. */
-import { feature } from 'topojson-client';
-import landUrl from 'world-atlas/land-110m.json?url';
 
 type Degrees = readonly [eastLongitude: number, latitude: number];
 
@@ -15,7 +14,10 @@ export interface Shore {
 }
 export type Land = readonly Shore[];
 
-type Topology = Parameters<typeof feature>[0];
+/** Of each shore the first point and the steps to the next ones, longitude and latitude in tenths of a degree. */
+export type Outline = readonly (readonly number[])[];
+
+const degreesPerStep = 0.1;
 
 let known: Promise<Land> | null = null;
 
@@ -29,28 +31,21 @@ export function loadLand(): Promise<Land> {
 }
 
 async function fetchLand(): Promise<Land> {
-  const response = await fetch(landUrl);
-  if (!response.ok) throw new Error(`The map of the land was expected, got status ${response.status}`);
-  return landOf((await response.json()) as Topology);
+  const { shores } = await import('world-atlas/land-110m.json?outline');
+  return landOf(shores);
 }
 
-export function landOf(topology: Topology): Land {
-  const { land } = topology.objects;
-  if (!land) throw new Error('The object “land” was expected in the map, got none');
-  const shape = feature(topology, land);
-  const shapes = shape.type === 'FeatureCollection' ? shape.features : [shape];
-  const rings = shapes.flatMap(({ geometry }) => {
-    if (geometry.type === 'MultiPolygon') return geometry.coordinates.flat();
-    return geometry.type === 'Polygon' ? geometry.coordinates : [];
-  });
-  return rings.map(shoreOf);
+export function landOf(outline: Outline): Land {
+  return outline.map(shoreOf);
 }
 
-function shoreOf(ring: readonly (readonly number[])[]): Shore {
+function shoreOf(steps: Outline[number]): Shore {
   const line: Degrees[] = [];
-  for (const [longitude = 0, latitude = 0] of ring) {
-    const before = line.at(-1)?.[0] ?? longitude;
-    line.push([longitude + 360 * Math.round((before - longitude) / 360), latitude]);
+  let [x, y] = [0, 0];
+  for (let index = 0; index < steps.length; index += 2) {
+    x += steps[index] ?? 0;
+    y += steps[index + 1] ?? 0;
+    line.push([x * degreesPerStep, y * degreesPerStep]);
   }
   const [first = 0, latitude = 0] = line[0] ?? [];
   const last = line.at(-1)?.[0] ?? first;

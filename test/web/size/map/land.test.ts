@@ -1,10 +1,11 @@
 import { readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { describe, expect, it } from 'vitest';
+import { outlineOf } from '../../../../web/build/landOutline';
 import { type Land, landOf } from '../../../../web/size/map/land';
 
 const file = createRequire(import.meta.url).resolve('world-atlas/land-110m.json');
-const land = landOf(JSON.parse(readFileSync(file, 'utf8')));
+const land = landOf(outlineOf(JSON.parse(readFileSync(file, 'utf8'))));
 
 /** Even-odd rule on the plane of longitudes and latitudes, as the map fills it, with what reaches over its edges. */
 function isLand(shores: Land, longitude: number, latitude: number): boolean {
