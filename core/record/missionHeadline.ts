@@ -31,7 +31,7 @@ export interface MissionOutcome {
 }
 
 /** Slower than this over the span, local time is told from start to end; faster, by its turns. */
-const slowHours = 12;
+const slowHours = 24;
 
 export function missionHeadline(outcome: MissionOutcome): HeadlineSpan[] {
   const end: HeadlineSpan[] = outcome.endMessage === '' ? [] : [{ text: ` ${outcome.endMessage}`, strong: true }];
@@ -58,7 +58,7 @@ export function localTimeClaim(outcome: MissionOutcome): HeadlineSpan[] | null {
   const clocks = clockTexts(startH, endH);
   return [
     ...name,
-    { text: `runs from ${clocks.start} to ` },
+    { text: `runs ${moved < -12 ? 'back ' : ''}from ${clocks.start} to ` },
     { text: clocks.end, mark: 'node', strong: true },
     { text: ` in ${spanWords(spanDays)}; ` },
     ...boxSpans(outcome),

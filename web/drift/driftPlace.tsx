@@ -1,6 +1,6 @@
 /** What does the orbit do over the mission? The answer in a sentence, then drawn, then as tables. */
-import { useSignal } from '@preact/signals';
-import { useEffect } from 'preact/hooks';
+import { type Signal, signal } from '@preact/signals';
+import { useEffect, useMemo } from 'preact/hooks';
 import { driftHeadline, firstOrderSentence } from '../../core/index';
 import { useApp } from '../state/appContext';
 import type { Mission } from '../state/mission';
@@ -11,18 +11,49 @@ import { DriftNotes } from './driftNotes';
 import { DriftPlots } from './driftPlots';
 import { type DriftView, useDriftView } from './driftView';
 import { ForcesPanel } from './mission/forcesPanel';
-import { MissionPlace } from './mission/missionPlace';
+import { MissionNumbers } from './mission/missionNumbers';
+import { MissionPicture } from './mission/missionPicture';
 import { MissionStatusLine } from './mission/missionStatusLine';
 import { useMissionView } from './mission/missionView';
+import { SecondLookAction } from './mission/secondLookAction';
 import { SpanChoice } from './spanChoice';
 import { SpanTable } from './spanTable';
 
 export function DriftPlace() {
+  const { document } = useApp();
   const mission = useMission();
   const missionView = useMissionView(mission);
   const view = useDriftView();
-  if (mission && missionView) return <MissionPlace mission={mission} view={missionView} />;
-  return view ? <Drawn view={view} mission={mission} /> : <Empty />;
+  const sample = useCursor((missionView ? missionView.last : view && view.drift.days.length - 1) ?? 0);
+  const isStale = document.stale.value;
+  const parts = { mission, view, sample, stale: isStale ? ' is-stale' : '' };
+  // What is typed in stays the same element whichever method answers.
+  return (
+    <>
+      <section class="picture drift-picture" aria-label="The orbit over the mission">
+        {isStale && view && (
+          <p class="stale-says">
+            Drawn for the last good entry: something in <a href={hashOf('size')}>Size</a> cannot be read yet.
+          </p>
+        )}
+        {mission && missionView ? (
+          <MissionPicture mission={mission} view={missionView} sample={sample} />
+        ) : (
+          <ClosedFormPicture {...parts} />
+        )}
+      </section>
+      <aside class="numbers drift-numbers" aria-label="Span and values">
+        <SpanChoice />
+        {mission && view && <ForcesPanel mission={mission} />}
+        {mission && missionView ? (
+          <MissionNumbers mission={mission} view={missionView} sample={sample} />
+        ) : (
+          <ClosedFormNumbers {...parts} />
+        )}
+        {mission && view && <SecondLookAction mission={mission} />}
+      </aside>
+    </>
+  );
 }
 
 /** Fetched with this place; null until it is there. */
@@ -36,31 +67,37 @@ function useMission(): Mission | null {
   return mission;
 }
 
+/** The sample that all plots and tables speak of; at the end wherever samples are counted anew. */
+function useCursor(last: number): Signal<number> {
+  return useMemo(() => signal(last), [last]);
+}
+
+interface ClosedFormProps {
+  readonly mission: Mission | null;
+  readonly view: DriftView | null;
+  readonly sample: Signal<number>;
+  readonly stale: string;
+}
+
 /** Rates of now held: for an orbit without an epoch, and until its history is there. */
-function Drawn({ view, mission }: { readonly view: DriftView; readonly mission: Mission | null }) {
-  const { document } = useApp();
-  const last = view.drift.days.length - 1;
-  const sample = useSignal(last);
-  const stale = document.stale.value ? ' is-stale' : '';
+function ClosedFormPicture({ mission, view, sample, stale }: ClosedFormProps) {
+  if (!view) return <Empty />;
   return (
     <>
-      <section class="picture drift-picture" aria-label="Drift of node, perigee and local time">
-        {document.stale.value && (
-          <p class="stale-says">
-            Drawn for the last good entry: something in <a href={hashOf('size')}>Size</a> cannot be read yet.
-          </p>
-        )}
-        <Answer view={view} stale={stale} />
-        {mission && <MissionStatusLine mission={mission} />}
-        <DriftPlots view={view} sample={sample} stale={stale} />
-      </section>
-      <aside class="numbers drift-numbers" aria-label="Span and values">
-        <SpanChoice />
-        {mission && <ForcesPanel mission={mission} />}
-        <CursorTable view={view} sample={sample} stale={stale} />
-        <SpanTable view={view} stale={stale} />
-        <DriftNotes view={view} />
-      </aside>
+      <Answer view={view} stale={stale} />
+      {mission && <MissionStatusLine mission={mission} />}
+      <DriftPlots view={view} sample={sample} stale={stale} />
+    </>
+  );
+}
+
+function ClosedFormNumbers({ view, sample, stale }: ClosedFormProps) {
+  if (!view) return null;
+  return (
+    <>
+      <CursorTable view={view} sample={sample} stale={stale} />
+      <SpanTable view={view} stale={stale} />
+      <DriftNotes view={view} />
     </>
   );
 }
@@ -89,16 +126,11 @@ function Answer({ view, stale }: { readonly view: DriftView; readonly stale: str
 function Empty() {
   return (
     <>
-      <section class="picture drift-picture" aria-label="Drift of node, perigee and local time">
-        <h1 class="headline">No orbit yet, so nothing drifts.</h1>
-        <p class="drift-empty">
-          Enter one in <a href={hashOf('size')}>Size</a>: perigee and apogee altitude and an inclination are enough, or
-          paste a state vector or two-line elements. With an epoch, the drift is drawn over dates.
-        </p>
-      </section>
-      <aside class="numbers drift-numbers" aria-label="Span and values">
-        <SpanChoice />
-      </aside>
+      <h1 class="headline">No orbit yet, so nothing drifts.</h1>
+      <p class="drift-empty">
+        Enter one in <a href={hashOf('size')}>Size</a>: perigee and apogee altitude and an inclination are enough, or
+        paste a state vector or two-line elements. With an epoch, the drift is drawn over dates.
+      </p>
     </>
   );
 }

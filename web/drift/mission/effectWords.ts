@@ -129,8 +129,9 @@ export function dragText({ dragSpread }: LedgerPart, { spanDays }: MissionReques
   const { low, high } = dragSpread;
   const lead = 'Air density is uncertain by a factor of two or more. From half to twice what is assumed here';
   if (low.endedBy !== 'span' || high.endedBy !== 'span') {
-    const end = (of: DragEnd) => (of.endedBy === 'span' ? 'lasts the span' : `is over on ${dateOf(of.endJd)}`);
-    return `${lead}, the orbit ${end(low)} in the thinner air and ${end(high)} in the denser.`;
+    const latest = low.endedBy === 'span' ? 'beyond this span' : dateOf(low.endJd);
+    const earliest = high.endedBy === 'span' ? 'beyond this span' : dateOf(high.endJd);
+    return `${lead}, the orbit’s end moves from ${latest} to ${earliest}.`;
   }
   const both = (value: (end: DragEnd) => number, digits: number) =>
     `${number(value(low), digits)} to ${number(value(high), digits)}`;

@@ -1,4 +1,5 @@
 /** What the mission is computed with: forces, the air, the box of local time. Saved with the candidate. */
+import { useEffect, useRef } from 'preact/hooks';
 import {
   type DensityChoice,
   forcesText,
@@ -17,9 +18,13 @@ interface PanelProps {
 export function ForcesPanel({ mission }: PanelProps) {
   const settings = mission.settings.value;
   const hasErrors = Object.keys(settings.errors).length > 0;
+  const fold = useRef<HTMLDetailsElement>(null);
+  useEffect(() => {
+    if (hasErrors && fold.current) fold.current.open = true;
+  }, [hasErrors]);
   const says = settings.forces ? forcesText(settings.forces, []) : 'something cannot be read';
   return (
-    <details class="fold forces" open={hasErrors || undefined}>
+    <details class="fold forces" ref={fold}>
       <summary>
         <span class="fold-title">Forces and box</span> <span class="fold-says">{says}</span>
       </summary>
