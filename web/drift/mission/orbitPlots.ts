@@ -100,41 +100,47 @@ export function inclinationPlot(all: MissionLines): PlotPart {
   };
 }
 
+/** From this e on the two lie so far apart that only their changes can be drawn on one scale. */
+const farApart = 0.02;
+
 export function heightPlot(all: MissionLines): PlotPart {
   const { perigee: low, apogee: high } = heights(all, all.result.history.columns);
   const apoapsis = all.apsis === 'perigee' ? 'apogee' : 'apoapsis';
   const unit = all.lengthUnit;
-  const digits = unit === 'NM' ? 2 : 1;
-  const number = (value: number) => formatNumber(value, { digits });
+  const isChange = all.result.request.mean.eccentricity >= farApart;
+  const drawn = (values: Float64Array) => (isChange ? values.map((value) => value - (values[0] ?? 0)) : values);
+  const [lowDrawn, highDrawn] = [drawn(low), drawn(high)];
+  const number = (value: number) => formatNumber(value, { digits: unit === 'NM' ? 2 : 1 });
   const text = (k: number) => `${all.apsis} ${number(low[k] ?? 0)}, ${apoapsis} ${number(high[k] ?? 0)} ${unit}`;
-  const line = (id: string, values: Float64Array, look: Pick<PlotLine, 'hue' | 'mark'>): PlotLine => ({
-    id,
-    values,
-    pattern: 'averaged',
-    ...look,
-    weak: false,
-    label: [id, ''],
-  });
   const columns = all.look?.look.integrated;
   const seen = columns && heights(all, columns);
   return {
     id: 'altitude',
-    title: `Altitude of ${all.apsis} and ${apoapsis}, ${unit}`,
+    title: `Altitude of ${all.apsis} and ${apoapsis}, ${unit}${isChange ? ' from the start' : ''}`,
     hue: ink.hue,
     caption: `Mean, above the equator’s radius. Start: ${text(0)}; end: ${text(low.length - 1)}.`,
-    lines: [line(apoapsis, high, ink), line(all.apsis, low, perigee)],
-    range: closeRange([low, high], [], 0.5),
-    isSigned: false,
+    lines: [averagedLine(apoapsis, highDrawn, ink), averagedLine(all.apsis, lowDrawn, perigee)],
+    range: closeRange([lowDrawn, highDrawn], [], 0.5),
+    isSigned: isChange,
     points:
       columns && seen
         ? [
-            { id: 'low', x: columns.days, values: seen.perigee, hue: perigee.hue },
-            { id: 'high', x: columns.days, values: seen.apogee, hue: ink.hue },
+            { id: 'low', x: columns.days, values: drawn(seen.perigee), hue: perigee.hue },
+            { id: 'high', x: columns.days, values: drawn(seen.apogee), hue: ink.hue },
           ]
         : [],
     valueText: text,
   };
 }
+
+const averagedLine = (id: string, values: Float64Array, look: Pick<PlotLine, 'hue' | 'mark'>): PlotLine => ({
+  id,
+  values,
+  pattern: 'averaged',
+  ...look,
+  weak: false,
+  label: [id, ''],
+});
 
 export function eccentricityPlot(all: MissionLines): PlotPart {
   const { along, across } = eccentricityVector(all.result.history.columns);
@@ -145,20 +151,12 @@ export function eccentricityPlot(all: MissionLines): PlotPart {
   );
   const columns = all.look?.look.integrated;
   const seen = columns && eccentricityVector(columns);
-  const line = (id: string, values: Float64Array, look: Pick<PlotLine, 'hue' | 'mark'>): PlotLine => ({
-    id,
-    values,
-    pattern: 'averaged',
-    ...look,
-    weak: false,
-    label: [id, ''],
-  });
   return {
     id: 'eccentricity',
     title: 'Eccentricity vector, thousandths',
     hue: perigee.hue,
     caption: `e stays between ${least} and ${greatest}; at the end ${text(lastIndex(along))}.`,
-    lines: [line('e cos ω', along, ink), line('e sin ω', across, perigee)],
+    lines: [averagedLine('e cos ω', along, ink), averagedLine('e sin ω', across, perigee)],
     range: valueRange([along, across], 0.02),
     isSigned: true,
     points:
