@@ -5,9 +5,7 @@
  * away from the button under the finger.
  */
 import { useEffect, useRef, useState } from 'preact/hooks';
-
-const isText = (target: EventTarget | null): boolean =>
-  target instanceof HTMLTextAreaElement || (target instanceof HTMLInputElement && target.type !== 'radio');
+import { isTextField } from './textField';
 
 export function useTyping<Box extends HTMLElement>() {
   const box = useRef<Box>(null);
@@ -16,7 +14,7 @@ export function useTyping<Box extends HTMLElement>() {
     const element = box.current;
     if (!element) return;
     let fingerIsDown = false;
-    const look = () => setTyping(isText(document.activeElement) && element.contains(document.activeElement));
+    const look = () => setTyping(isTextField(document.activeElement) && element.contains(document.activeElement));
     // After the click that ends the touch.
     const later = () => setTimeout(() => !fingerIsDown && look());
     const down = () => {

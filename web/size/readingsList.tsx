@@ -83,7 +83,7 @@ function ReadingRow({ reading, calm }: RowProps) {
           {text.value} <span class="unit">{text.unit}</span>
         </span>
         <Sensitivity reading={calm} />
-        <Order reading={reading} />
+        <Order reading={calm} />
         <Margins reading={reading} />
         {reading.remark && <span class="reading-remark">{reading.remark}</span>}
       </button>
