@@ -185,7 +185,6 @@ export {
   tryMeanFromState,
 } from './orbit/meanState';
 export { type Periods, periods } from './orbit/periods';
-export { type RateCurves, ratesOverInclination } from './orbit/rateCurves';
 export { type SecularRates, secularRates } from './orbit/secularRates';
 export { elementsFromState, stateFromElements } from './orbit/state';
 export { blankCandidate, fieldTexts } from './record/blankCandidate';

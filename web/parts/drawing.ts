@@ -4,10 +4,6 @@ export type Point = readonly [number, number];
 
 const round = (value: number): string => (Math.round(value * 10) / 10).toString();
 
-export function linePath(points: readonly Point[]): string {
-  return points.map(([x, y], index) => `${index === 0 ? 'M' : 'L'}${round(x)} ${round(y)}`).join('');
-}
-
 export function squarePath(x: number, y: number, half: number): string {
   return `M${round(x - half)} ${round(y - half)}h${2 * half}v${2 * half}h${-2 * half}z`;
 }

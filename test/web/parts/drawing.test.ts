@@ -1,14 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import {
-  arcPath,
-  arcSpanDays,
-  arrowHead,
-  diamondPath,
-  linePath,
-  niceTicks,
-  squarePath,
-} from '../../../web/parts/drawing';
+import { arcPath, arcSpanDays, arrowHead, diamondPath, niceTicks, squarePath } from '../../../web/parts/drawing';
 
 const ranges = fc
   .tuple(fc.double({ min: -1e6, max: 1e6, noNaN: true }), fc.double({ min: 1e-6, max: 1e6, noNaN: true }))
@@ -85,17 +77,6 @@ describe('the span of the arcs', () => {
 });
 
 describe('paths', () => {
-  it('join points by lines, to a tenth of a pixel', () => {
-    expect(
-      linePath([
-        [0, 0],
-        [10.04, 5.06],
-        [-1, 2],
-      ]),
-    ).toBe('M0 0L10 5.1L-1 2');
-    expect(linePath([])).toBe('');
-  });
-
   it('close squares and diamonds around their centre', () => {
     expect(squarePath(10, 20, 3)).toBe('M7 17h6v6h-6z');
     expect(diamondPath(10, 20, 3)).toBe('M10 17l3 3l-3 3l-3 -3z');
