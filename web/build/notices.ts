@@ -8,11 +8,18 @@ interface PackageJson {
   readonly license?: string;
 }
 
-/** Throws if a bundled package has no licence file, so that none is shipped without its notice. */
+const rule = `\n\n${'-'.repeat(78)}\n\n`;
+
+/** Each licence once, under all that it covers. Throws if a bundled package has none, so that none is shipped without. */
 export function noticesOf(moduleIds: readonly string[]): string {
   const folders = new Set(moduleIds.filter((id) => id.includes('node_modules')).map(packageFolder));
-  const notices = [...folders].map(noticeOf).sort();
-  return ['Driftbook contains the following software of others.', ...notices].join(`\n\n${'-'.repeat(78)}\n\n`);
+  const covered = new Map<string, string[]>();
+  const byTitle = (one: PackageNotice, other: PackageNotice) => (one.title < other.title ? -1 : 1);
+  for (const { title, licence } of [...folders].map(noticeOf).sort(byTitle)) {
+    covered.set(licence, [...(covered.get(licence) ?? []), title]);
+  }
+  const notices = [...covered].map(([licence, titles]) => `${titles.join('\n')}\n\n${licence}`);
+  return ['Driftbook contains the following software of others.', ...notices].join(rule);
 }
 
 function packageFolder(moduleId: string): string {
@@ -23,10 +30,15 @@ function packageFolder(moduleId: string): string {
   return folder;
 }
 
-function noticeOf(folder: string): string {
+interface PackageNotice {
+  readonly title: string;
+  readonly licence: string;
+}
+
+function noticeOf(folder: string): PackageNotice {
   const about = JSON.parse(readFileSync(join(folder, 'package.json'), 'utf8')) as PackageJson;
   const file = readdirSync(folder).find((name) => /^licen[cs]e(\.\w+)?$/i.test(name));
   if (!file) throw new Error(`Expected a licence file in ${about.name}, found none`);
-  const text = readFileSync(join(folder, file), 'utf8').replaceAll('\r\n', '\n').trim();
-  return `${about.name} ${about.version} (${about.license ?? 'see below'})\n\n${text}`;
+  const licence = readFileSync(join(folder, file), 'utf8').replaceAll('\r\n', '\n').trim();
+  return { title: `${about.name} ${about.version} (${about.license ?? 'see below'})`, licence };
 }
