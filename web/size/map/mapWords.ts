@@ -1,5 +1,5 @@
 /** The pictures of the track in words: the answer above them, and what a listener hears in their place. */
-import { formatNumber, kmPerLengthUnit, twoPi } from '../../../core/index';
+import { apsidesAt, formatNumber, kmPerLengthUnit, twoPi } from '../../../core/index';
 import type { AnswerSpan } from '../tracks/answer';
 import type { StripProps } from './crossingStrip';
 import type { CycleAtHand } from './cycleAtHand';
@@ -38,7 +38,7 @@ export function mapAnswer({ atHand, track, props, unit }: AnswerParts): readonly
   }
   return [
     { text: 'The track closes', strong: true },
-    { text: ` after ${flown}.${endText(track, unit)} ${neighbourText(props, unit)}` },
+    { text: ` after ${flown}.${apsidesAt(endText(track, unit), props.orbit.body)} ${neighbourText(props, unit)}` },
   ];
 }
 
