@@ -1,6 +1,7 @@
 import { defineConfig } from '@playwright/test';
 import { chromiumFlags, chromiumPath } from './chromium';
 
+// uPlot reads the browser's language when it is loaded.
 process.env['LANG'] = 'en_US.UTF-8';
 const cache = '../../.cache';
 

@@ -24,9 +24,9 @@ export interface PlotProps {
 }
 
 export function Plot({ name, model, sample, momentText, valueText, onSample }: PlotProps) {
-  const canvas = useRef<HTMLCanvasElement>(null);
+  const host = useRef<HTMLDivElement>(null);
   const area = useRef<HTMLDivElement>(null);
-  const failed = usePlotCanvas({ canvas, area }, model);
+  const failed = usePlotCanvas({ host, area }, model);
   const last = model.x.length - 1;
   const drag = useCursorDrag(last, onSample);
   const onKeyDown = (event: KeyboardEvent) => {
@@ -38,9 +38,7 @@ export function Plot({ name, model, sample, momentText, valueText, onSample }: P
   if (failed) return <p class="plot-failed">Not drawn, since this browser cannot: the tables hold the same values.</p>;
   return (
     <div class={`plot${model.hasXLabels ? ' has-x' : ''}`}>
-      <div class="plot-canvas" aria-hidden="true">
-        <canvas ref={canvas} />
-      </div>
+      <div class="plot-canvas" ref={host} aria-hidden="true" />
       <div
         class="plot-area"
         ref={area}

@@ -1,145 +1,154 @@
 /**
- * Lines, grid and axis labels of a plot. Cursor, marks and labels at line ends are elements above the canvas, so that
- * moving the cursor redraws nothing.
+ * The only module that knows uPlot: it draws lines, grid and axis labels. Cursor, marks and labels
+ * at line ends are elements above the canvas, so that moving the cursor redraws nothing.
+ *
+ * Loaded when a plot is first shown. Its import throws in a browser whose language is not a
+ * language tag, since uPlot formats numbers with it at once: whoever loads it must expect that.
  */
-import { type ChartSurface, chartLayer } from './chartCanvas';
-import type { ChartInk } from './chartInk';
-import { createFrame } from './frame';
+import uPlot from 'uplot';
+import { inkOf, type PlotInk } from './plotInk';
 import type { PlotLine, PlotModel } from './plotModel';
-import { heightIn, valueTicks } from './plotScale';
+import { valueTicks } from './plotScale';
 
 export interface PlotHandle {
   show(model: PlotModel): void;
   end(): void;
 }
 
-/** The canvas, and the element whose box is the plotting area: the style sheet decides its size. */
+/** Where the canvas goes, and the element whose box is the plotting area: the style sheet decides its size. */
 export interface PlotPlace {
-  readonly canvas: HTMLCanvasElement;
+  readonly host: HTMLElement;
   readonly area: HTMLElement;
 }
 
 /** Draws the model into its place and again whenever its size or the lighting changes. */
-export function drawPlot({ canvas, area }: PlotPlace, first: PlotModel): PlotHandle {
+export function drawPlot(place: PlotPlace, first: PlotModel): PlotHandle {
   let model = first;
-  const frame = createFrame();
-  const draw = (surface: ChartSurface) => drawModel(surface, boxOf(canvas, area), model);
-  const layer = chartLayer({ canvas, frame, draw });
-  const sizes = new ResizeObserver(layer.invalidate);
-  sizes.observe(area);
+  let plot: uPlot | null = null;
+  const rebuild = () => {
+    plot?.destroy();
+    const options = place.host.clientWidth > 0 ? optionsFor(place, () => model) : null;
+    plot = options && new uPlot(options, dataOf(model), place.host);
+  };
+  const sizes = new ResizeObserver(rebuild);
+  sizes.observe(place.host);
+  sizes.observe(place.area);
+  const lighting = new MutationObserver(rebuild);
+  lighting.observe(document.documentElement, { attributes: true, attributeFilter: ['data-lighting'] });
   return {
     show: (next) => {
+      const isSameShape = shapeOf(next) === shapeOf(model);
       model = next;
-      layer.invalidate();
+      if (isSameShape && plot) plot.setData(dataOf(model));
+      else rebuild();
     },
     end: () => {
       sizes.disconnect();
-      layer.end();
-      frame.end();
+      lighting.disconnect();
+      plot?.destroy();
+      plot = null;
     },
   };
 }
 
-interface PlotBox {
-  readonly left: number;
-  readonly top: number;
-  readonly right: number;
-  readonly bottom: number;
+const dataOf = (model: PlotModel): uPlot.AlignedData => [model.x, ...model.lines.map(({ values }) => withGaps(values))];
+
+/** A gap is null to uPlot; it would draw a line across what is not a number. */
+const withGaps = (values: Float64Array): Float64Array | (number | null)[] =>
+  values.some(Number.isNaN) ? Array.from(values, (value) => (Number.isNaN(value) ? null : value)) : values;
+
+const shapeOf = (model: PlotModel): string =>
+  JSON.stringify([model.hasXLabels, model.lines.map(({ id, pattern, hue, weak }) => [id, pattern, hue, weak])]);
+
+function optionsFor({ host, area }: PlotPlace, modelNow: () => PlotModel): uPlot.Options {
+  const ink = inkOf(host);
+  const inset = insets(host, area);
+  const model = modelNow();
+  return {
+    width: host.clientWidth,
+    height: host.clientHeight,
+    padding: [inset.top, inset.right, model.hasXLabels ? 0 : inset.bottom, 0],
+    legend: { show: false },
+    cursor: { show: false },
+    scales: {
+      x: { time: false, range: () => endsOf(modelNow().x) },
+      y: { range: () => [modelNow().range.least, modelNow().range.greatest] },
+    },
+    axes: [xAxis(modelNow, ink, model.hasXLabels ? inset.bottom : 0), valueAxis(modelNow, ink, inset.left)],
+    series: [{}, ...model.lines.map((line) => seriesFor(line, ink))],
+  };
 }
 
-/** The plotting area in px of the canvas. */
-function boxOf(canvas: HTMLElement, area: HTMLElement): PlotBox {
-  const [outer, inner] = [canvas.getBoundingClientRect(), area.getBoundingClientRect()];
-  const [left, top] = [inner.left - outer.left, inner.top - outer.top];
-  return { left, top, right: left + inner.width, bottom: top + inner.height };
+/** Distances in px from the host's edges to the plotting area. */
+function insets(host: HTMLElement, area: HTMLElement) {
+  return {
+    left: area.offsetLeft - host.offsetLeft,
+    top: area.offsetTop - host.offsetTop,
+    right: host.offsetLeft + host.clientWidth - area.offsetLeft - area.offsetWidth,
+    bottom: host.offsetTop + host.clientHeight - area.offsetTop - area.offsetHeight,
+  };
 }
 
-function drawModel(surface: ChartSurface, box: PlotBox, model: PlotModel): void {
-  if (box.right <= box.left || box.bottom <= box.top) return;
-  const { context, ink } = surface;
-  context.font = `${ink.fontPx}px ${ink.fontFamily}`;
-  context.fillStyle = ink.soft;
-  context.strokeStyle = ink.faint;
-  context.lineWidth = ink.rulePx;
-  drawXAxis(surface, box, model);
-  drawValueAxis(surface, box, model);
-  for (const line of model.lines) drawLine(surface, box, model, line);
+function endsOf(x: Float64Array): uPlot.Range.MinMax {
+  return [x[0] ?? 0, x[x.length - 1] ?? 1];
 }
 
-/** Room between a label and the plotting area. */
-const gapPx = 8;
-
-function drawXAxis({ context, ink, widthPx }: ChartSurface, box: PlotBox, model: PlotModel): void {
+function xAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlot.Axis {
   // A label of ten figures and its space.
-  const ticks = model.xTicks(Math.max(2, Math.floor(widthPx / (ink.fontPx * 7))));
-  context.textAlign = 'center';
-  context.textBaseline = 'top';
-  context.beginPath();
-  for (const { at, text } of ticks) {
-    const x = xOf(box, model, at);
-    context.moveTo(crisp(x), box.top);
-    context.lineTo(crisp(x), box.bottom);
-    if (model.hasXLabels) context.fillText(text, x, box.bottom + gapPx);
-  }
-  context.stroke();
+  const ticks = (plot: uPlot) => modelNow().xTicks(Math.max(2, Math.floor(plot.width / (ink.fontPx * 7))));
+  return {
+    ...axisInk(ink),
+    size: sizePx,
+    gap: 8,
+    splits: (plot) => ticks(plot).map(({ at }) => at),
+    values: (plot) => ticks(plot).map(({ text }) => (sizePx > 0 ? text : '')),
+  };
 }
 
-function drawValueAxis({ context, ink }: ChartSurface, box: PlotBox, model: PlotModel): void {
-  const most = Math.max(2, Math.floor((box.bottom - box.top) / (ink.fontPx * 1.6)));
-  context.textAlign = 'right';
-  context.textBaseline = 'middle';
-  context.beginPath();
-  for (const { at, text } of valueTicks(model.range, most, { plus: model.isSigned })) {
-    const y = yOf(box, model, at);
-    context.fillText(text, box.left - gapPx, y);
+function valueAxis(modelNow: () => PlotModel, ink: PlotInk, sizePx: number): uPlot.Axis {
+  const ticks = (plot: uPlot) => {
+    const heightPx = plot.height - sizeOfXAxis(plot);
+    return valueTicks(modelNow().range, Math.max(2, Math.floor(heightPx / (ink.fontPx * 1.6))), {
+      plus: modelNow().isSigned,
+    });
+  };
+  const look = axisInk(ink);
+  return {
+    ...look,
     // The zero line is an element above the canvas, stronger than the grid.
-    if (at === 0) continue;
-    context.moveTo(box.left, crisp(y));
-    context.lineTo(box.right, crisp(y));
-  }
-  context.stroke();
+    grid: { ...look.grid, filter: (_, splits) => splits.map((at) => (at === 0 ? null : at)) },
+    size: sizePx,
+    gap: 8,
+    splits: (plot) => ticks(plot).map(({ at }) => at),
+    values: (plot) => ticks(plot).map(({ text }) => text),
+  };
 }
 
-/** A thin line between two rows of pixels would be drawn pale across both. */
-const crisp = (px: number): number => Math.round(px) + 0.5;
+const sizeOfXAxis = (plot: uPlot): number => {
+  const size = plot.axes[0]?.size;
+  return typeof size === 'function' ? size(plot, [], 0, 0) : (size ?? 0);
+};
 
-function xOf({ left, right }: PlotBox, { x }: PlotModel, at: number): number {
-  const [first, last] = [x[0] ?? 0, x[x.length - 1] ?? 1];
-  return left + ((at - first) / (last - first)) * (right - left);
+function axisInk(ink: PlotInk) {
+  return {
+    stroke: ink.label,
+    font: ink.font,
+    grid: { stroke: ink.grid, width: ink.rulePx },
+    ticks: { show: false },
+    border: { show: false },
+  };
 }
 
-const yOf = ({ top, bottom }: PlotBox, { range }: PlotModel, value: number): number =>
-  bottom - heightIn(range, value) * (bottom - top);
-
-/** A value that is not a number leaves a gap. */
-function drawLine({ context, ink }: ChartSurface, box: PlotBox, model: PlotModel, line: PlotLine): void {
-  context.save();
-  const half = style(context, line, ink) / 2;
-  context.beginPath();
-  context.rect(box.left - half, box.top - half, box.right - box.left + 2 * half, box.bottom - box.top + 2 * half);
-  context.clip();
-  context.beginPath();
-  let isDown = false;
-  line.values.forEach((value, index) => {
-    if (Number.isFinite(value)) {
-      const [x, y] = [xOf(box, model, model.x[index] ?? 0), yOf(box, model, value)];
-      if (isDown) context.lineTo(x, y);
-      else context.moveTo(x, y);
-    }
-    isDown = Number.isFinite(value);
-  });
-  context.stroke();
-  context.restore();
-}
-
-/** Answers the width in px. */
-function style(context: CanvasRenderingContext2D, { pattern, hue, weak }: PlotLine, ink: ChartInk): number {
-  const widthPx = { averaged: ink.heavyPx, first: ink.midPx, second: ink.thinPx, geometry: ink.thinPx }[pattern];
-  context.strokeStyle = ink[hue];
-  context.lineWidth = widthPx;
-  context.lineJoin = 'round';
-  context.lineCap = pattern === 'first' ? 'round' : 'butt';
-  context.globalAlpha = weak ? 0.6 : 1;
-  context.setLineDash(pattern === 'first' ? [0, 2.6 * widthPx + 1] : pattern === 'second' ? [13, 5] : []);
-  return widthPx;
+/** uPlot scales widths to the screen's pixels, but not dashes. */
+function seriesFor({ pattern, hue, weak }: PlotLine, ink: PlotInk): uPlot.Series {
+  const widthPx = { averaged: ink.heavyPx, first: ink.dotPx, second: ink.thinPx, geometry: ink.thinPx }[pattern];
+  const dashPx = pattern === 'first' ? [0, 2.6 * widthPx + 1] : pattern === 'second' ? [13, 5] : [];
+  return {
+    stroke: ink[hue],
+    width: widthPx,
+    dash: dashPx.map((length) => length * window.devicePixelRatio),
+    cap: pattern === 'first' ? 'round' : 'butt',
+    alpha: weak ? 0.6 : 1,
+    points: { show: false },
+  };
 }

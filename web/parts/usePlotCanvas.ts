@@ -1,33 +1,41 @@
-/** Keeps the drawing of a plot as its model is, and says so where the browser cannot draw. */
+/** Loads the drawing code when a plot is first shown, and says so where the browser cannot run it. */
 import type { RefObject } from 'preact';
 import { useEffect, useRef, useState } from 'preact/hooks';
-import { drawPlot, type PlotHandle } from './plotCanvas';
+import type { PlotHandle } from './plotCanvas';
 import type { PlotModel } from './plotModel';
 
 export interface PlotRefs {
-  readonly canvas: RefObject<HTMLCanvasElement | null>;
+  readonly host: RefObject<HTMLDivElement | null>;
   readonly area: RefObject<HTMLDivElement | null>;
 }
 
 /** Draws the model into the elements; answers true once drawing turned out to be impossible. */
-export function usePlotCanvas({ canvas, area }: PlotRefs, model: PlotModel): boolean {
+export function usePlotCanvas({ host, area }: PlotRefs, model: PlotModel): boolean {
   const [failed, setFailed] = useState(false);
   const handle = useRef<PlotHandle | null>(null);
   const latest = useRef(model);
   latest.current = model;
 
   useEffect(() => {
-    if (!canvas.current || !area.current) return;
-    try {
-      handle.current = drawPlot({ canvas: canvas.current, area: area.current }, latest.current);
-    } catch {
-      setFailed(true);
-    }
+    let isShown = true;
+    const start = async () => {
+      try {
+        const { drawPlot } = await import('./plotCanvas');
+        if (isShown && host.current && area.current) {
+          handle.current = drawPlot({ host: host.current, area: area.current }, latest.current);
+        }
+      } catch {
+        // uPlot formats numbers as it is loaded, and throws where the browser's language is no language tag.
+        if (isShown) setFailed(true);
+      }
+    };
+    void start();
     return () => {
+      isShown = false;
       handle.current?.end();
       handle.current = null;
     };
-  }, [canvas, area]);
+  }, [host, area]);
 
   useEffect(() => handle.current?.show(model), [model]);
   return failed;
