@@ -103,8 +103,6 @@ export function createMissionCalls() {
   };
 }
 
-export type MissionCalls = ReturnType<typeof createMissionCalls>;
-
 function coreRequest(request: MissionRequest, sampleDays: number): HistoryRequest {
   const { stretches: _stretches, node: _node, boxMinutes: _box, ...rest } = request;
   return { ...rest, sampleDays };
