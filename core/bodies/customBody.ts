@@ -5,7 +5,7 @@ export interface CustomBodyInput {
   readonly muKm3PerS2: number;
   /** Reference radius of the zonals, km. */
   readonly radiusKm: number;
-  /** `zonals[n]` is the unnormalised J_n; entries 0 and 1 are ignored. */
+  /** `zonals[n]` is the unnormalised J_n; entries 0 and 1 are ignored; a degree that is not known is absent. */
   readonly zonals: readonly number[];
   /** Datum of altitudes, km; the reference radius if left out. */
   readonly equatorialRadiusKm?: number | undefined;
@@ -31,7 +31,7 @@ export function customBody(input: CustomBodyInput): Body {
     gravitySet: 'user',
     muKm3PerS2: input.muKm3PerS2,
     radiusKm: input.radiusKm,
-    zonals: [0, 0, ...input.zonals.slice(2)],
+    zonals: input.zonals.map((zonal, n) => (n < 2 ? 0 : zonal)),
     equatorialRadiusKm: input.equatorialRadiusKm ?? input.radiusKm,
     flattening: input.flattening ?? 0,
     rotationRadPerS: input.rotationRadPerS ?? null,

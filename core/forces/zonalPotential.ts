@@ -22,7 +22,7 @@ export function zonalPotential(body: Body, { from, to }: ZonalDegrees): (positio
     for (let n = 2; n <= last; n += 1) {
       const next = ((2 * n - 1) * s * here - (n - 1) * before) / n;
       power *= radiusKm / r;
-      if (n >= from) sum += (zonals[n] as number) * power * next;
+      if (n >= from) sum += (zonals[n] ?? 0) * power * next;
       before = here;
       here = next;
     }

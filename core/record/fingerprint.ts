@@ -42,7 +42,7 @@ export function fingerprintLine({ body, mean, epochJd }: Pick<ResolvedOrbit, 'bo
 }
 
 function bodyParts(body: Body): string[] {
-  const zonals = body.zonals.slice(2).map(twelveDigits);
+  const zonals = Array.from(body.zonals.slice(2), (zonal: number | undefined) => twelveDigits(zonal ?? 0));
   while (zonals.at(-1) === twelveDigits(0)) zonals.pop();
   return [
     twelveDigits(body.muKm3PerS2),

@@ -27,11 +27,19 @@ export function readBody(candidate: Candidate, reader: FieldReader): Body | null
     name: reader.text('bodyName') || 'Own body',
     muKm3PerS2,
     radiusKm,
-    zonals: [0, 0, j2, j3 ?? 0, j4 ?? 0],
+    zonals: zonalsTyped(j2, j3, j4),
     flattening,
     rotationRadPerS,
     yearDays,
   });
+}
+
+/** What is left blank is absent, not zero: nothing that turns on it may be answered from a guess. */
+function zonalsTyped(j2: number, j3: number | undefined, j4: number | undefined): readonly number[] {
+  const zonals = [0, 0, j2];
+  if (j3 !== undefined) zonals[3] = j3;
+  if (j4 !== undefined) zonals[4] = j4;
+  return zonals;
 }
 
 function positive(reader: FieldReader, field: FieldId, label: string, unitAndExample: string): number | null {
