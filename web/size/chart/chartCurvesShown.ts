@@ -47,11 +47,22 @@ export function shownCurves(request: CurveRequest): ShownCurve[] {
   const wanted = [...held, ...fixed, ...roundRates(request), ...repeats.map(({ condition }) => condition)];
   const unique = wanted.filter((each, index) => wanted.findIndex((other) => sameCondition(each, other)) === index);
   return unique.flatMap((condition) => {
-    const curve = chartCurve(body, shape, condition);
-    if (!curve) return [];
+    const drawn = drawnCurve(request, condition);
     const isHeld = held.some((each) => sameCondition(each, condition));
-    return [{ curve, line: chartLine(body, shape, curve, window), isHeld }];
+    return drawn ? [{ ...drawn, isHeld }] : [];
   });
+}
+
+type DrawnCurve = Pick<ShownCurve, 'curve' | 'line'>;
+
+/** What somebody typed may ask for an orbit beyond what the rates are defined for: the rest of the chart stands. */
+function drawnCurve({ body, shape, mapping }: CurveRequest, condition: ChartCondition): DrawnCurve | null {
+  try {
+    const curve = chartCurve(body, shape, condition);
+    return curve && { curve, line: chartLine(body, shape, curve, mapping.window) };
+  } catch {
+    return null;
+  }
 }
 
 /** A handful on each side of polar over the inclinations shown; polar itself is drawn apart. */

@@ -21,13 +21,18 @@ export function heldBy(candidate: Candidate, isForward: boolean): Held {
         case 'sameNodeRate':
           return [condition.radPerS === 0 ? { kind: 'polar' } : { kind: 'nodeRate', radPerS: condition.radPerS }];
         case 'repeat':
-          return [{ kind: 'repeat', revolutions: condition.revolutions, days: condition.days }];
+          return isCount(condition.revolutions) && isCount(condition.days)
+            ? [{ kind: 'repeat', revolutions: condition.revolutions, days: condition.days }]
+            : [];
         default:
           return [];
       }
     }),
   };
 }
+
+/** A half-typed number, 0 or 14.3, is no track to draw. */
+const isCount = (value: number): boolean => Number.isSafeInteger(value) && value >= 1;
 
 export function sameCondition(one: ChartCondition, other: ChartCondition): boolean {
   if (one.kind === 'nodeRate' && other.kind === 'nodeRate') {
