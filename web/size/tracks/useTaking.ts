@@ -22,6 +22,7 @@ export function useTakeTrack() {
       announcer.say({
         tone: 'note',
         text: `Held on ${track.revolutions} revolutions in ${track.days} days${isSunSynchronous ? ', Sun-synchronous' : ''}${instead}.`,
+        untilEdited: true,
         action: { label: 'Undo', run: () => document.restoreDraft(before) },
       });
     },
