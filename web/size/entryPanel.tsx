@@ -2,7 +2,7 @@
 import { useComputed } from '@preact/signals';
 import type { ComponentChildren } from 'preact';
 import { useEffect, useRef } from 'preact/hooks';
-import type { EntryForm, FieldId, InputFrame } from '../../core/index';
+import { apsidesAt, type EntryForm, type FieldId, type InputFrame } from '../../core/index';
 import { Choice } from '../parts/choice';
 import { later } from '../parts/later';
 import { useTyping } from '../parts/useTyping';
@@ -97,6 +97,7 @@ function usePaste() {
 function ElementEntry() {
   const { draft } = useApp().document;
   const nodeForm = useComputed(() => draft.value.entry.nodeForm).value;
+  const title = useComputed(() => apsidesAt('Perigee, anomaly, epoch', { id: draft.value.body })).value;
   const says = useComputed(() => {
     const { texts, elementsAre } = draft.value.entry;
     return `${texts.epoch.trim().slice(0, 10) || 'no epoch yet'}, ${elementsAre}`;
@@ -108,7 +109,7 @@ function ElementEntry() {
         <InclinationField />
         <NodeField />
       </div>
-      <Fold title="Perigee, anomaly, epoch" says={says} holds={['perigee', 'meanAnomaly', 'epoch']}>
+      <Fold title={title} says={says} holds={['perigee', 'meanAnomaly', 'epoch']}>
         <div class="field-group">
           <PlaceFields />
           <EpochField />
