@@ -4,6 +4,7 @@ import { later } from '../parts/later';
 import { useReadingText } from '../parts/readingText';
 import { useScrollFocus } from '../parts/useScrollFocus';
 import { useApp } from '../state/appContext';
+import type { AppState } from '../state/appState';
 import { EntryPanel } from './entryPanel';
 import { Pictures } from './pictures';
 import { ReadingsList } from './readingsList';
@@ -42,9 +43,7 @@ export function SizePlace() {
 function Headline() {
   const { document, preferences, mission } = useApp();
   const orbit = document.orbit.value;
-  if (!orbit) {
-    return <h1 class="headline">Type or paste an orbit to read how its node and perigee drift.</h1>;
-  }
+  if (!orbit) return <h1 class="headline">{noOrbitText(document)}</h1>;
   const { rateUnit } = preferences.values.value;
   const spans = headlineOf(orbit, document.readings.value, {
     rateUnit: rateUnit === 'degPerYear' ? 'deg/yr' : 'deg/day',
@@ -59,6 +58,16 @@ function Headline() {
       ))}
     </h1>
   );
+}
+
+/** Opened without a last good orbit: what keeps there from being one. */
+function noOrbitText({ entered, draft, conditions }: AppState['document']): string {
+  const settlement = conditions.settlement.value;
+  if (!entered.value.ok || draft.value.conditions.length === 0) {
+    return 'Type or paste an orbit to read how its node and perigee drift.';
+  }
+  if (!settlement) return 'The conditions are being settled.';
+  return (!settlement.ok && settlement.message) || 'One of the conditions cannot be read yet.';
 }
 
 /** Only what is wrong: limits that are kept stand at their readings. */
