@@ -8,11 +8,12 @@ import {
   type ReadCondition,
   readConditions,
   type Settlement,
+  settledElements,
 } from '../../core/index';
 import { later } from '../parts/later';
 import { useApp } from '../state/appContext';
-import { ConditionRow } from './conditionRow';
-import { Solutions } from './solutions';
+import { ConditionRow, elementSymbols } from './conditionRow';
+import { Solutions, useMeanText } from './solutions';
 import './conditions.css';
 
 export function ConditionPanel() {
@@ -26,9 +27,9 @@ export function ConditionPanel() {
   return (
     <section class="conditions" aria-label="Conditions">
       {conditions.map((condition, place) => (
-        // A condition has no name of its own; its place is what it is known by.
-        <ConditionRow key={`${place}${condition.entry?.kind}`} condition={condition} place={place} />
+        <ConditionRow key={rowKey(condition, place)} condition={condition} place={place} />
       ))}
+      <StartSays settlement={settlement} />
       <AddCondition conditions={conditions} />
       <Outcome settlement={settlement} />
     </section>
@@ -36,6 +37,11 @@ export function ConditionPanel() {
 }
 
 type Kind = ConditionEntry['kind'];
+
+/** A condition has no name of its own: its place is what it is known by. A rate that is typed anew keeps the focus. */
+function rowKey({ entry }: ReadCondition, place: number): string {
+  return `${place}${entry?.kind === 'sameNodeRate' ? 'nodeRate' : entry?.kind}`;
+}
 
 const OtherOrbitPicker = later(async () => (await import('./otherOrbit')).OtherOrbitPicker);
 
@@ -81,6 +87,27 @@ function AddCondition({ conditions }: { readonly conditions: readonly ReadCondit
       {isPicking && <OtherOrbitPicker present={present} onClose={stopPicking} />}
     </>
   );
+}
+
+/** Where the form has no fields of elements to show them in. */
+function StartSays({ settlement }: { readonly settlement: Settlement | null }) {
+  const { document } = useApp();
+  const form = useComputed(() => document.draft.value.entry.form).value;
+  const meanText = useMeanText();
+  if (!settlement?.ok || (form !== 'state' && form !== 'twoLine')) return null;
+  const symbols = settledElements
+    .filter((each) => settlement.settled.includes(each))
+    .map((each) => elementSymbols[each]);
+  return (
+    <p class="soft small">
+      Conditions settle {listed(symbols)}; what is typed is the start. Settled: {meanText(settlement.orbit.mean)}
+    </p>
+  );
+}
+
+function listed(words: readonly string[]): string {
+  const last = words.at(-1) ?? '';
+  return words.length > 1 ? `${words.slice(0, -1).join(', ')} and ${last}` : last;
 }
 
 function Outcome({ settlement }: { readonly settlement: Settlement | null }) {

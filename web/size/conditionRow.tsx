@@ -1,6 +1,7 @@
 /** One condition: its numbers, the element it settles, and its message. */
 import {
   type ConditionEntry,
+  type ConditionField,
   type ConditionFieldWords,
   conditionWords,
   type ReadCondition,
@@ -52,7 +53,7 @@ interface EntryProps {
 }
 
 /** The trade's symbols: short enough to stand beside the condition's name. */
-const elementSymbols: Readonly<Record<SettledElement, string>> = {
+export const elementSymbols: Readonly<Record<SettledElement, string>> = {
   semiMajorAxisKm: 'a',
   eccentricity: 'e',
   inclinationRad: 'i',
@@ -94,13 +95,17 @@ function ConditionFields({ entry, place, condition }: EntryProps & { readonly co
           error={condition.ok ? undefined : condition.errors[words.field]}
           step={stepOf(words)}
           signed={words.signed ?? false}
-          onText={(text) =>
-            document.conditions.change(place, { ...entry, texts: { ...entry.texts, [words.field]: text } })
-          }
+          onText={(text) => document.conditions.change(place, retyped(entry, words.field, text))}
         />
       ))}
     </div>
   );
+}
+
+/** A rate that is typed anew is no longer that of the other orbit. */
+function retyped(entry: ConditionEntry, field: ConditionField, text: string): ConditionEntry {
+  if (entry.kind === 'sameNodeRate' && field === 'rate') return { ...entry, kind: 'nodeRate', texts: { rate: text } };
+  return { ...entry, texts: { ...entry.texts, [field]: text } };
 }
 
 function stepOf({ stepSize }: ConditionFieldWords) {

@@ -5,15 +5,22 @@ import { takeElements } from '../state/entryActions';
 
 export function Solutions({ settlement }: { readonly settlement: Settlement }) {
   const { document } = useApp();
+  const meanText = useMeanText();
   if (!settlement.ok) {
     const { nearest } = settlement;
     if (!nearest) return null;
+    const entered = document.entered.value;
+    const isTaken = entered.ok && isSameOrbit(entered.orbit.mean, nearest);
     return (
       <>
-        <p class="soft small">Nearest that exists: {useMeanText()(nearest)}</p>
-        <button type="button" onClick={() => takeElements(document, nearest)}>
-          Take the nearest
-        </button>
+        <p class="soft small">
+          {isTaken ? 'The entry is the nearest that exists' : 'Nearest that exists'}: {meanText(nearest)}
+        </p>
+        {!isTaken && (
+          <button type="button" onClick={() => takeElements(document, nearest)}>
+            Take the nearest
+          </button>
+        )}
       </>
     );
   }
@@ -22,11 +29,25 @@ export function Solutions({ settlement }: { readonly settlement: Settlement }) {
     <>
       <p class="soft small">{settlement.all.length} orbits meet this; the nearest to what was typed is taken.</p>
       <ul class="solutions">
-        {settlement.all.map((mean) => (
+        {[...settlement.all].sort(byPlace).map((mean) => (
           <Solution key={`${mean.semiMajorAxisKm} ${mean.eccentricity} ${mean.inclinationRad}`} mean={mean} />
         ))}
       </ul>
     </>
+  );
+}
+
+/** However the solver came to them, each keeps its place when another is taken. */
+function byPlace(one: MeanElements, other: MeanElements): number {
+  return one.inclinationRad - other.inclinationRad || one.semiMajorAxisKm - other.semiMajorAxisKm;
+}
+
+/** As far as the fields of an entry write an orbit. */
+function isSameOrbit(one: MeanElements, other: MeanElements): boolean {
+  return (
+    Math.abs(one.semiMajorAxisKm - other.semiMajorAxisKm) < 0.01 &&
+    Math.abs(one.eccentricity - other.eccentricity) < 1e-6 &&
+    Math.abs(one.inclinationRad - other.inclinationRad) < 1e-6
   );
 }
 
@@ -44,7 +65,7 @@ function Solution({ mean }: { readonly mean: MeanElements }) {
 }
 
 /** Altitudes and inclination in one line. */
-function useMeanText(): (mean: MeanElements) => string {
+export function useMeanText(): (mean: MeanElements) => string {
   const { document, preferences } = useApp();
   const { symbol, perCore } = unitOf('length', preferences.values.value.lengthUnit);
   const entered = document.entered.value;
