@@ -47,7 +47,9 @@ export function solveOrbit(input: SolveInput): SolveResult {
   const all = [...found.means].sort((one, other) => distance(input, one) - distance(input, other));
   const [mean] = all;
   if (!mean) throw new Error('expected a solution or a reason, got neither');
-  return { ok: true, mean, all, notes: [...prepared.flatMap(({ notes }) => notes), ...surfaceNotes(input.body, mean)] };
+  const held = frozen?.settle?.(mean.semiMajorAxisKm, mean.inclinationRad);
+  const notes = [...prepared.flatMap((each) => each.notes), ...(held?.ok ? held.notes : [])];
+  return { ok: true, mean, all, notes: [...notes, ...surfaceNotes(body, mean)] };
 }
 
 function preparedAll({ body, theory, conditions }: SolveInput): readonly Condition[] | NoOrbit {

@@ -31,9 +31,11 @@ export interface HeadlineOptions {
   readonly localTime?: readonly HeadlineSpan[] | null;
 }
 
+type HeadlineOrbit = Pick<ResolvedOrbit, 'body' | 'mean' | 'frozen'>;
+
 /** Two sentences, node then perigee, in spans; joined they read as plain text. */
 export function headlineOf(
-  orbit: Pick<ResolvedOrbit, 'body' | 'mean'>,
+  orbit: HeadlineOrbit,
   readings: readonly Reading[],
   options: HeadlineOptions = {},
 ): HeadlineSpan[] {
@@ -107,10 +109,19 @@ function synchronousSpans(rate: HeadlineSpan, minutes: number, doubt: number): H
   ];
 }
 
-function perigeeSpans(rates: Rates, orbit: Pick<ResolvedOrbit, 'body' | 'mean'>): HeadlineSpan[] {
+function perigeeSpans(rates: Rates, orbit: HeadlineOrbit): HeadlineSpan[] {
   const apsis = apsisName(orbit.body);
   const name = apsis.charAt(0).toUpperCase() + apsis.slice(1);
-  const { eccentricity } = orbit.mean;
+  const { eccentricity, perigeeRad } = orbit.mean;
+  if (orbit.frozen) {
+    const place = `${formatNumber(perigeeRad * degPerRad, { digits: 0 })}°`;
+    return [
+      { text: 'Frozen', strong: true },
+      { text: `: ${apsis} rests at ` },
+      { text: place, mark: 'perigee', strong: true },
+      { text: '.' },
+    ];
+  }
   if (eccentricity < tinyEccentricity) {
     const size = formatNumber(eccentricity, { digits: eccentricity < 0.001 ? 6 : 4 });
     return [

@@ -12,6 +12,8 @@ export interface ResolvedOrbit {
   readonly theory: 'Brouwer' | 'SGP4';
   readonly origin: EntryForm;
   readonly typedAs: 'mean' | 'osculating';
+  /** Where eccentricity and perigee are those that the odd zonals hold still. */
+  readonly frozen?: true;
 }
 
 export interface FieldError {

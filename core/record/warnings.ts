@@ -65,7 +65,7 @@ const warnings: readonly Warning[] = [
   {
     id: 'smallEccentricity',
     severity: 'note',
-    applies: ({ mean }) => mean.eccentricity < smallEccentricity,
+    applies: ({ mean, frozen }) => !frozen && mean.eccentricity < smallEccentricity,
     text: ({ body, mean }) =>
       mean.eccentricity < tinyEccentricity
         ? `At e ${mean.eccentricity.toFixed(6)} the closed-form perigee drift means nothing: odd zonals move the eccentricity vector as much. Read the eccentricity vector instead.`

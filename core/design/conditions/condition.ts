@@ -42,7 +42,13 @@ export interface Condition {
 }
 
 export type Settled =
-  | { readonly ok: true; readonly eccentricity: number; readonly perigeeRad: number }
+  | {
+      readonly ok: true;
+      readonly eccentricity: number;
+      readonly perigeeRad: number;
+      /** How it came about, and what makes it less sure, as sentences. */
+      readonly notes: readonly string[];
+    }
   /** `converged`: it is known that there is none. */
   | { readonly ok: false; readonly converged: boolean; readonly text: string };
 

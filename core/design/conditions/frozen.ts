@@ -1,5 +1,7 @@
+import { degPerRad } from '../../numerics/angles';
 import { formatNumber } from '../../numerics/numberWords';
 import { frozenOrbit } from '../frozen';
+import type { FrozenOrbit, FrozenShape } from '../frozenResult';
 import type { Condition, ConditionContext, Prepared, Settled } from './condition';
 
 /** Eccentricity and perigee stand still under the odd zonals; settles both. */
@@ -10,7 +12,8 @@ export interface FrozenInput {
 export function frozen(_input: FrozenInput, { body }: ConditionContext): Prepared {
   const settle = (semiMajorAxisKm: number, inclinationRad: number): Settled => {
     const result = frozenOrbit(body, { semiMajorAxisKm, inclinationRad });
-    return result.ok ? result : { ok: false, converged: result.reason !== 'notConverged', text: result.message };
+    if (result.ok) return { ...result, notes: [foundText(result), ...result.cautions] };
+    return { ok: false, converged: result.reason !== 'notConverged', text: result.message };
   };
   const condition: Condition = {
     kind: 'frozen',
@@ -23,10 +26,26 @@ export function frozen(_input: FrozenInput, { body }: ConditionContext): Prepare
       return held.ok ? eccentricity - held.eccentricity : Number.NaN;
     },
     scale: () => 1,
-    write: (value) => formatNumber(value, { digits: 6 }),
+    write,
     quantity: 'eccentricity beyond the frozen one',
     notes: [],
     settle,
   };
   return { ok: true, condition };
+}
+
+function foundText({ eccentricity, perigeeRad, degree, hand }: FrozenOrbit): string {
+  const handPerigee = hand.perigeeRad === perigeeRad ? '' : ` at ${degreesText(hand)}`;
+  return (
+    `Frozen: e ${write(eccentricity)}, perigee rests at ${degreesText({ eccentricity, perigeeRad })} ` +
+    `(zonals to degree ${degree}); J3 alone gives e ${write(hand.eccentricity)}${handPerigee}.`
+  );
+}
+
+function degreesText({ perigeeRad }: FrozenShape): string {
+  return `${formatNumber(perigeeRad * degPerRad, { digits: 0 })}°`;
+}
+
+function write(eccentricity: number): string {
+  return formatNumber(eccentricity, { digits: 6 });
 }

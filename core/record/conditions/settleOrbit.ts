@@ -50,6 +50,7 @@ export function settleOrbit(candidate: Candidate, start: ResolvedOrbit): Settlem
     conditions: readable.map(({ condition }) => condition),
   });
   if (!result.ok) return { ok: false, conditions, message: result.reason.text, nearest: result.nearest ?? null };
-  const orbit = { ...start, mean: result.mean };
+  const isFrozen = readable.some(({ condition }) => condition.kind === 'frozen');
+  const orbit: ResolvedOrbit = { ...start, mean: result.mean, ...(isFrozen ? { frozen: true } : {}) };
   return { ok: true, conditions, orbit, settled, all: result.all, notes: result.notes };
 }

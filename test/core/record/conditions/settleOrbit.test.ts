@@ -3,6 +3,8 @@ import type { Candidate, FieldId } from '../../../../core/record/candidate';
 import { type ConditionEntry, conditionWords } from '../../../../core/record/conditions/kinds';
 import { settleOrbit } from '../../../../core/record/conditions/settleOrbit';
 import { fingerprint } from '../../../../core/record/fingerprint';
+import { headlineOf } from '../../../../core/record/headline';
+import { readingsOf } from '../../../../core/record/readings/readings';
 import { resolveOrbit } from '../../../../core/record/resolveOrbit';
 import { candidateWith } from '../candidates';
 
@@ -30,6 +32,34 @@ function refusal(...input: Parameters<typeof settlement>): string {
   if (answer.ok) throw new Error(`expected a reason, got ${JSON.stringify(answer.orbit.mean)}`);
   return answer.message;
 }
+
+describe('a frozen orbit', () => {
+  const held = () => {
+    const answer = settlement([wish('frozen')]);
+    if (!answer.ok) throw new Error(`expected an orbit, got ${answer.message}`);
+    return answer;
+  };
+
+  it('says its e, where perigee rests, and what J3 alone would give', () => {
+    expect(held().notes[0]).toMatch(
+      /^Frozen: e 0\.001\d{3}, perigee rests at 90° \(zonals to degree 14\); J3 alone gives e 0\.00\d{4}\.$/,
+    );
+  });
+
+  it('hands on what makes it less sure', () => {
+    const answer = settlement([wish('frozen')], circle, { body: 'mars' });
+    expect(answer.ok && answer.notes.join(' ')).toMatch(/has zonals to degree 4 only\./);
+  });
+
+  it('is called frozen above everything, in place of a drift that means little', () => {
+    const { orbit } = held();
+    const sentence = headlineOf(orbit, readingsOf(orbit))
+      .map(({ text }) => text)
+      .join('');
+    expect(sentence).toMatch(/Frozen: perigee rests at 90°\.$/);
+    expect(sentence).not.toContain('means little');
+  });
+});
 
 describe('frozen at an own body', () => {
   const own = { ...circle, bodyMu: '42828.4', bodyRadius: '3396', bodyJ2: '0.00196' };
