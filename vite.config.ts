@@ -4,6 +4,7 @@ import { defineConfig } from 'vite';
 import { buildVersion } from './web/build/buildVersion.ts';
 import { contentSecurityPolicy, contentSecurityPolicyTag } from './web/build/contentSecurityPolicy.ts';
 import { landOutline } from './web/build/landOutline.ts';
+import { leanPlot } from './web/build/leanPlot.ts';
 import { offlineWorker } from './web/build/offlineWorker.ts';
 import { workerEntries } from './web/build/workerEntries.ts';
 
@@ -19,6 +20,13 @@ const onDemand =
 /** What a mission is asked for and how it is put in words: fetched with the place that shows it. */
 const mission =
   /[\\/]core[\\/](record[\\/]mission|mission[\\/]historyRequest|forces[\\/](drag|zonal)\.|bodies[\\/]atmosphere)|[\\/]web[\\/]state[\\/]mission(Outcome|Request)/;
+
+/** The drawings of Size but the one it opens with. */
+const pictures = /[\\/]web[\\/]size[\\/](map|orbit|sweep|tracks|otherOrbit)/;
+
+/** What Size fetches as soon as its first readings stand. */
+const chart =
+  /[\\/]web[\\/]size[\\/](chart|condition|solutions)|[\\/]web[\\/]parts[\\/](chart|drawing)|[\\/]core[\\/]design[\\/]chart/;
 
 // Core is pure: importing its table of contents needs none of the files that are not used from it.
 const pureCore = { moduleSideEffects: [{ test: /[\\/]core[\\/]/, sideEffects: false }] };
@@ -53,6 +61,7 @@ export default defineConfig({
     preact(),
     workerEntries(),
     landOutline(),
+    leanPlot(),
     contentSecurityPolicyTag(),
     offlineWorker({ entry: `${root}/web/offline/serviceWorker.ts`, fileName: 'serviceWorker.js' }),
   ],
@@ -61,6 +70,9 @@ export default defineConfig({
     emptyOutDir: true,
     target: 'es2022',
     assetsInlineLimit: 0,
+    // Slower, and smaller by 3 kB of all that a tablet keeps.
+    minify: 'terser',
+    terserOptions: { module: true, compress: { passes: 3 }, format: { comments: false } },
     // One sheet packs to two thirds of a dozen, and no place waits for its own.
     cssCodeSplit: false,
     modulePreload: { polyfill: false },
@@ -72,6 +84,9 @@ export default defineConfig({
           // Else what solving needs of the rest would come with it, and the first page would load solving.
           includeDependenciesRecursively: false,
           groups: [
+            // Packed together, since all of it is cached anyway: small files pack badly.
+            { name: 'pictures', test: pictures, priority: 4 },
+            { name: 'chart', test: chart, priority: 4 },
             // Solving serves several places, none of them at the first page.
             { name: 'mission', test: mission, priority: 3 },
             { name: 'design', test: onDemand, minShareCount: 2, priority: 2 },

@@ -74,7 +74,6 @@ const forbidden = [
   ['web/state/a.ts', 'node:fs'],
   ['web/work/a.ts', '../state/document'],
   ['web/work/a.ts', 'preact'],
-  ['web/size/a.tsx', 'comlink'],
   ['test/web/a.test.ts', '../../core/orbit/kepler'],
 ] as const;
 
@@ -91,7 +90,6 @@ const allowed = [
   ['web/store/a.ts', 'idb'],
   ['web/parts/plot.ts', 'uplot'],
   ['web/offline/a.ts', 'workbox-window'],
-  ['web/work/a.ts', 'comlink'],
   ['web/work/a.ts', './searchTracks'],
   ['web/work/a.ts', '../../core/index'],
   ['web/size/a.tsx', '../work/work'],

@@ -2,7 +2,7 @@
  * A worker of one kind of work and the page's side of it. It is started with the first call and kept; cancelling ends
  * it, so that it takes effect at once whatever is being computed, and the next call starts another.
  */
-import { type Remote, wrap } from 'comlink';
+import { type Remote, remoteCalls } from './calls';
 
 export interface Job<Answer> {
   /** Null where the job was cancelled; rejected where the worker could not be loaded or failed. */
@@ -53,5 +53,5 @@ function start<Calls>(worker: Worker): Started<Calls> {
   });
   // Heard by the call that waits, if one does.
   failure.catch(() => undefined);
-  return { worker, calls: wrap<Calls>(worker), failure };
+  return { worker, calls: remoteCalls<Calls>(worker), failure };
 }

@@ -1,5 +1,4 @@
 /** The page's side of missions: one job of each kind at a time, each ended by ending its worker. */
-import { proxy } from 'comlink';
 import { createLane, type Job } from './lane';
 import type { HistoryPart, LedgerPart, MissionRequest, SkyPart } from './missionCalls';
 import type { MissionWorkerCalls } from './missionWorker';
@@ -31,19 +30,14 @@ export function createMissionWork(): MissionWork {
     mission: (request, listener) =>
       missions.run(async (calls) => {
         const { onShare } = listener;
-        listener.onHistory(
-          await calls.history(
-            request,
-            proxy((share: number) => onShare(share * shares.sky)),
-          ),
-        );
+        listener.onHistory(await calls.history(request, (share) => onShare(share * shares.sky)));
         onShare(shares.sky);
         listener.onSky(await calls.sky());
         onShare(shares.ledger);
         const left = 1 - shares.ledger;
-        listener.onLedger(await calls.ledger(proxy((share: number) => onShare(shares.ledger + share * left))));
+        listener.onLedger(await calls.ledger((share) => onShare(shares.ledger + share * left)));
         return true as const;
       }),
-    secondLook: (request, onShare) => looks.run(async (calls) => calls.secondLook(request, proxy(onShare))),
+    secondLook: (request, onShare) => looks.run(async (calls) => calls.secondLook(request, onShare)),
   };
 }

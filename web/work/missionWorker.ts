@@ -1,5 +1,5 @@
 /** The worker of missions: histories and second looks, each kind in a worker of its own. */
-import { expose } from 'comlink';
+import { answerCalls } from './calls';
 import { createMissionCalls } from './missionCalls';
 import { secondLook } from './secondLook';
 
@@ -7,4 +7,4 @@ const calls = { ...createMissionCalls(), secondLook };
 
 export type MissionWorkerCalls = typeof calls;
 
-expose(calls);
+answerCalls(calls);

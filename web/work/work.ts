@@ -1,5 +1,4 @@
 /** The page's side of the worker that searches repeat tracks. */
-import { proxy } from 'comlink';
 import type { RepeatRequest } from '../../core/index';
 import { createLane, type Job } from './lane';
 import type { TracksAnswer } from './searchTracks';
@@ -16,7 +15,6 @@ export function createWork(): Work {
     () => new Worker(new URL('./worker.ts', import.meta.url), { type: 'module', name: 'driftbook-work' }),
   );
   return {
-    searchTracks: (request, onShare) =>
-      lane.run<TracksAnswer>(async (calls) => calls.searchTracks(request, proxy(onShare))),
+    searchTracks: (request, onShare) => lane.run<TracksAnswer>(async (calls) => calls.searchTracks(request, onShare)),
   };
 }

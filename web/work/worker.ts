@@ -1,15 +1,12 @@
 /** The worker: what takes longer than a frame runs here, one call at a time. */
-import { expose, transfer } from 'comlink';
-import type { RepeatRequest } from '../../core/index';
+import { answerCalls } from './calls';
 import { buffersOf, searchTracks, type TracksAnswer } from './searchTracks';
 
-const calls = {
-  searchTracks(request: RepeatRequest, onShare: (share: number) => void): TracksAnswer {
-    const answer = searchTracks(request, onShare);
-    return answer.ok ? transfer(answer, buffersOf(answer.columns)) : answer;
-  },
-};
+const calls = { searchTracks };
 
 export type WorkerCalls = typeof calls;
 
-expose(calls);
+answerCalls(calls, (answer) => {
+  const tracks = answer as TracksAnswer;
+  return tracks.ok ? buffersOf(tracks.columns) : [];
+});
