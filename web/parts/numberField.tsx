@@ -65,6 +65,13 @@ function FieldLabel({ id, label, labelControl, text, step, onText, onStep, readO
   );
 }
 
+/** A longer number is written smaller: none of its digits may be out of sight. */
+function sizeClass({ length }: string): string {
+  if (length > 17) return ' is-longest';
+  if (length > 13) return ' is-longer';
+  return length > 9 ? ' is-long' : '';
+}
+
 function FieldInput({
   id,
   label,
@@ -90,7 +97,7 @@ function FieldInput({
     <span class="field-value">
       <input
         id={id}
-        class="field-input"
+        class={`field-input${keyboard === 'text' ? '' : sizeClass(text)}`}
         inputMode={keyboard ?? 'decimal'}
         autocomplete="off"
         autocapitalize="off"

@@ -1,7 +1,7 @@
 /** A field of the open entry, bound to its text and its messages. */
 import { useComputed } from '@preact/signals';
 import type { ComponentChildren } from 'preact';
-import type { FieldErrors, FieldId, Resolution } from '../../core/index';
+import { type FieldErrors, type FieldId, type Resolution, readNumber } from '../../core/index';
 import { NumberField } from '../parts/numberField';
 import { stepped } from '../parts/stepping';
 import { useApp } from '../state/appContext';
@@ -38,7 +38,7 @@ export function EntryField({ field, stepSize, within, step, alongside, ...rest }
   return (
     <NumberField
       {...rest}
-      text={settled ?? text.value}
+      text={settled === undefined ? text.value : shortened(field, settled)}
       isSettled={settled !== undefined}
       error={error.value}
       note={note.value}
@@ -53,4 +53,12 @@ export function EntryField({ field, stepSize, within, step, alongside, ...rest }
 
 function errorsIn(resolution: Resolution): FieldErrors {
   return resolution.ok ? {} : resolution.errors;
+}
+
+/** Decimals that tell orbits apart; the solution itself keeps all of its digits. */
+const settledDecimals: Partial<Record<FieldId, number>> = { inclination: 5, perigee: 5, eccentricity: 7 };
+
+function shortened(field: FieldId, text: string): string {
+  const number = readNumber(text);
+  return number.ok ? String(Number(number.value.toFixed(settledDecimals[field] ?? 4))) : text;
 }
