@@ -1,5 +1,5 @@
 /** State of the list of repeat tracks, kept while the app is open, and what is computed from it. */
-import { computed, type ReadonlySignal, type Signal, signal } from '@preact/signals';
+import { computed, effect, type ReadonlySignal, type Signal, signal } from '@preact/signals';
 import {
   kmPerLengthUnit,
   type RepeatRequest,
@@ -67,6 +67,7 @@ function createTracksModel(app: AppState, orbit: ResolvedOrbit): TracksModel {
   const sort = signal<SortOrder>({ column: 'cycle', falls: false });
   const search = createTrackSearch(createWork());
   followUnit(unit, texts);
+  followOrbit({ texts, unit, orbit: app.document.orbit, first: orbit });
   const wishes = computed(() => {
     const { body, mean } = app.document.orbit.value ?? orbit;
     const { eccentricity, inclinationRad } = mean;
@@ -156,15 +157,51 @@ function lastReadable(wishes: ReadonlySignal<TrackWishes>): ReadonlySignal<Track
   });
 }
 
-function startingTexts({ body, mean }: ResolvedOrbit, lengthUnit: 'km' | 'NM'): TrackTexts {
-  const altitudeKm = mean.semiMajorAxisKm - body.equatorialRadiusKm;
+type Band = Pick<TrackTexts, 'lowest' | 'highest'>;
+
+function bandAround(orbit: ResolvedOrbit, lengthUnit: 'km' | 'NM'): Band {
   const around = (offsetKm: number) => {
-    const km = Math.max(0, Math.round((altitudeKm + offsetKm) / 50) * 50);
+    const km = Math.max(0, Math.round((altitudeKmOf(orbit) + offsetKm) / 50) * 50);
     return convertedText(String(km), 1 / kmPerLengthUnit({ lengthUnit }));
   };
+  return { lowest: around(-100), highest: around(100) };
+}
+
+/** 100 km to either side, rounded to 50. */
+const bandReachKm = 125;
+
+const altitudeKmOf = ({ body, mean }: ResolvedOrbit): number => mean.semiMajorAxisKm - body.equatorialRadiusKm;
+
+interface FollowParts {
+  readonly texts: Signal<TrackTexts>;
+  readonly unit: ReadonlySignal<'km' | 'NM'>;
+  readonly orbit: ReadonlySignal<ResolvedOrbit | null>;
+  readonly first: ResolvedOrbit;
+}
+
+/**
+ * Around another body the band starts anew. Around the same one it moves once the orbit has left it, unless the band was
+ * typed: a track taken from the list lies in the band and leaves the list in place.
+ */
+function followOrbit({ texts, unit, orbit, first }: FollowParts): void {
+  let bandOf = first;
+  effect(() => {
+    const now = orbit.value;
+    if (!now) return;
+    const { lowest, highest } = texts.peek();
+    const given = bandAround(bandOf, unit.peek());
+    const isTyped = lowest !== given.lowest || highest !== given.highest;
+    const isOtherBody = now.body !== bandOf.body && JSON.stringify(now.body) !== JSON.stringify(bandOf.body);
+    const isWithin = Math.abs(altitudeKmOf(now) - altitudeKmOf(bandOf)) <= bandReachKm;
+    if (!isOtherBody && (isTyped || isWithin)) return;
+    bandOf = now;
+    texts.value = { ...texts.peek(), ...bandAround(now, unit.peek()) };
+  });
+}
+
+function startingTexts(orbit: ResolvedOrbit, lengthUnit: 'km' | 'NM'): TrackTexts {
   return {
-    lowest: around(-100),
-    highest: around(100),
+    ...bandAround(orbit, lengthUnit),
     longest: '12',
     swath: '',
     latitude: '0',
