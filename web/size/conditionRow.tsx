@@ -1,4 +1,5 @@
 /** One condition: its numbers, the element it settles, and its message. */
+import { useState } from 'preact/hooks';
 import {
   type ConditionEntry,
   type ConditionField,
@@ -8,9 +9,12 @@ import {
   type SettledElement,
   settledElements,
 } from '../../core/index';
+import { later } from '../parts/later';
 import { NumberField } from '../parts/numberField';
 import { stepped } from '../parts/stepping';
 import { useApp } from '../state/appContext';
+
+const ConditionWorkingView = later(async () => (await import('./conditionWorking')).ConditionWorkingView);
 
 interface RowProps {
   readonly condition: ReadCondition;
@@ -20,11 +24,18 @@ interface RowProps {
 export function ConditionRow({ condition, place }: RowProps) {
   const { document, store } = useApp();
   const { entry } = condition;
+  const [isOpen, setOpen] = useState(false);
   const blocked = store.tabs.editorElsewhere.value;
   return (
     <div class="condition">
       <div class="condition-head">
-        <span class="condition-name">{entry ? conditionName(entry) : 'Unknown condition'}</span>
+        {condition.ok ? (
+          <button type="button" class="plain condition-name" aria-expanded={isOpen} onClick={() => setOpen(!isOpen)}>
+            {conditionName(condition.entry)}
+          </button>
+        ) : (
+          <span class="condition-name">{entry ? conditionName(entry) : 'Unknown condition'}</span>
+        )}
         {entry && <Settles entry={entry} place={place} />}
         <button
           type="button"
@@ -36,6 +47,7 @@ export function ConditionRow({ condition, place }: RowProps) {
           ×
         </button>
       </div>
+      {condition.ok && isOpen && <ConditionWorkingView condition={condition.condition} />}
       {entry && <ConditionFields entry={entry} place={place} condition={condition} />}
       {!condition.ok && condition.message && <p class="condition-message">{condition.message}</p>}
     </div>
