@@ -29,7 +29,7 @@ export interface ChartCurve {
   readonly endAltitudeKm: number | null;
 }
 
-/** Null where the body lacks what the condition needs: a year, a rotation, a J2. */
+/** Null where the body lacks what the condition needs (a year, a rotation, a J2), or N or D is no whole number from 1. */
 export function chartCurve(body: Body, shape: ChartShape, condition: ChartCondition): ChartCurve | null {
   if ((body.zonals[2] ?? 0) === 0 && condition.kind !== 'polar') return null;
   switch (condition.kind) {
@@ -147,11 +147,14 @@ function repeatCurve(
   body: Body,
   shape: ChartShape,
   condition: ChartCondition & { readonly kind: 'repeat' },
-): ChartCurve {
+): ChartCurve | null {
   const spin = body.rotationRadPerS ?? Number.NaN;
-  const pace = condition.revolutions / condition.days;
+  const { revolutions, days } = condition;
+  if (![revolutions, days].every((count) => Number.isInteger(count) && count >= 1)) return null;
+  const pace = revolutions / days;
   const radiusKm = body.equatorialRadiusKm;
   const guessKm = Math.cbrt(body.muKm3PerS2 / (pace * spin) ** 2);
+  if (!(guessKm > 0 && Number.isFinite(guessKm))) return null;
   const altitudeAt = (inclinationRad: number) => {
     const theta = Math.cos(inclinationRad);
     let axisKm = guessKm;

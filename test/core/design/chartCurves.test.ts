@@ -99,6 +99,17 @@ describe('curves of the rate chart', () => {
     const round: Body = { ...earth, zonals: [0, 0] };
     expect(chartCurve(round, circle, { kind: 'critical', side: 1 })).toBeNull();
   });
+
+  it.each([
+    [0, 1],
+    [14, 0],
+    [14.5, 1],
+    [-14, 1],
+    [14, Number.NaN],
+    [Number.POSITIVE_INFINITY, 1],
+  ])('has no repeat track of %d revolutions in %d days', (revolutions, days) => {
+    expect(chartCurve(earth, circle, { kind: 'repeat', revolutions, days })).toBeNull();
+  });
 });
 
 describe('what a chart holds', () => {
