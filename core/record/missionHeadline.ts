@@ -25,7 +25,8 @@ export interface MissionOutcome {
   /** To the end of the span or of the orbit. */
   readonly spanDays: number;
   readonly boxMinutes: number;
-  readonly events: readonly MissionEvent[];
+  /** Null until they are computed: nothing is said of the box before. */
+  readonly events: readonly MissionEvent[] | null;
   /** Empty where the orbit lasts the span. */
   readonly endMessage: string;
 }
@@ -60,7 +61,7 @@ export function localTimeClaim(outcome: MissionOutcome): HeadlineSpan[] | null {
     ...name,
     { text: `runs ${moved < -12 ? 'back ' : ''}from ${clocks.start} to ` },
     { text: clocks.end, mark: 'node', strong: true },
-    { text: ` in ${spanWords(spanDays)}; ` },
+    { text: ` in ${spanWords(spanDays)}` },
     ...boxSpans(outcome),
   ];
 }
@@ -81,12 +82,13 @@ function clockTexts(startH: number, endH: number) {
 }
 
 function boxSpans({ boxMinutes, events }: MissionOutcome): HeadlineSpan[] {
+  if (events === null) return [{ text: '.' }];
   const box = `±${formatNumber(boxMinutes, { digits: Number.isInteger(boxMinutes) ? 0 : 1 })} min box`;
   const left = events.find(({ kind }) => kind === 'boxLeft');
-  if (!left) return [{ text: `it stays in the ${box}.` }];
+  if (!left) return [{ text: `; it stays in the ${box}.` }];
   const back = events.find(({ kind, days }) => kind === 'boxEntered' && days > left.days);
   return [
-    { text: `it leaves the ${box} on ` },
+    { text: `; it leaves the ${box} on ` },
     { text: dateText(left.jd), strong: true },
     { text: back ? ` and is back in it on ${dateText(back.jd)}.` : '.' },
   ];

@@ -13,7 +13,7 @@ export function outcomeOf(request: MissionRequest, history: HistoryPart, sky: Sk
     endInclinationRad: last(columns.inclinationRad),
     spanDays: history.endDays,
     boxMinutes: request.boxMinutes,
-    events: sky?.events.events ?? [],
+    events: sky?.events.events ?? null,
     endMessage: history.endMessage,
   };
 }

@@ -41,6 +41,10 @@ describe('the sentence about a mission', () => {
     expect(said({ spanDays: 365.25 })).toMatch(/in 1 year; it stays in the ±15 min box\.$/);
   });
 
+  it('says nothing of the box before the events are computed', () => {
+    expect(said({ events: null })).toBe('Local time of the descending node runs from 10:30 to 10:09 in 5 years.');
+  });
+
   it('writes seconds where minutes would show no change', () => {
     expect(said({ localTime: { startH: 10.5, endH: 10.51, node: 'ascending' } })).toMatch(/from 10:30:00 to 10:30:36/);
   });
