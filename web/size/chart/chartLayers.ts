@@ -50,6 +50,7 @@ export function drawLayers({ chart, frame, curves, marks, others }: LayerInput):
         chart.shape.value,
         chart.held.value,
         chart.limits.value,
+        chart.mark.value,
         chart.app.preferences.values.value,
       ];
       below.invalidate();
@@ -88,7 +89,7 @@ function drawBelow(chart: Chart, surface: ChartSurface): readonly LabelBox[] {
   const places = labelPlaces();
   drawGround(surface, ground);
   const limits = chart.limits.peek();
-  const runs = limits ? runsOutside({ mapping, body, shape, ground: limits }) : [];
+  const runs = limits ? runsOutside({ mapping, body, shape, ground: limits, mark: chart.mark.peek() }) : [];
   drawOutside(surface, mapping, runs);
   nameAltitudes(surface, ground, places);
   const drawn = drawCurves(surface, mapping, shown);

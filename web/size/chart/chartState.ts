@@ -8,11 +8,12 @@ import {
   chartFloor,
   chartShapeOf,
   type ResolvedOrbit,
+  violatesAt,
 } from '../../../core/index';
 import type { AppState } from '../../state/appState';
 import { type ShownCurve, shownCurves } from './chartCurvesShown';
 import { isWithin, wholeWindow } from './chartWindow';
-import type { LimitGround } from './drawLimits';
+import type { LimitGround, LimitMark } from './drawLimits';
 import { type Held, heldBy } from './heldCurves';
 import { curvesUnder } from './nearText';
 import { type ChartSize, type Mapping, mappingOf, plotBoxOf } from './plotBox';
@@ -34,6 +35,8 @@ export interface Chart {
   readonly curves: ReadonlySignal<readonly ShownCurve[]>;
   /** What the limits are judged with; null where there are none. */
   readonly limits: ReadonlySignal<LimitGround | null>;
+  /** The orbit as the limits judge it, once it has come to rest; null where there are none. */
+  readonly mark: ReadonlySignal<LimitMark | null>;
   /** Where the orbit stands. */
   readonly point: ReadonlySignal<ChartPoint | null>;
   /** The curves it lies on. */
@@ -67,7 +70,8 @@ export function createChart(app: AppState): Chart {
     point.value && mapping.value ? curvesUnder(point.value, curves.value, mapping.value.scale) : [],
   );
   const limits = limitsIn(app);
-  return { app, holds, size, zoom, isDragging, body, shape, mapping, held, curves, limits, point, under };
+  const mark = markIn({ app, limits, point, isDragging });
+  return { app, holds, size, zoom, isDragging, body, shape, mapping, held, curves, limits, mark, point, under };
 }
 
 /** The angles of the orbit count too, but a drag on the chart changes none of them. */
@@ -82,6 +86,19 @@ function limitsIn({ document }: AppState): ReadonlySignal<LimitGround | null> {
     },
     (before, now) => JSON.stringify(before) === JSON.stringify(now),
   );
+}
+
+/** While it is dragged, it stays the mark of before: the layer below is not drawn anew in every frame. */
+function markIn({ app, limits, point, isDragging }: Pick<Chart, 'app' | 'limits' | 'point' | 'isDragging'>) {
+  let last: LimitMark | null = null;
+  return computed((): LimitMark | null => {
+    if (isDragging.value) return last;
+    const orbit = app.document.orbit.value;
+    const ground = limits.value;
+    const keeps = orbit && ground && !violatesAt(orbit.body, orbit.mean, ground.epochJd, ground.limits);
+    last = keeps && point.value ? { point: point.value } : null;
+    return last;
+  });
 }
 
 /** Read when the conditions change, or 90° is passed, rather than in every frame of a drag. */

@@ -1,6 +1,7 @@
 /** The part of the chart whose orbits break a limit: hatched against the grain of what does not exist, and named. */
 import {
   type Body,
+  type ChartPoint,
   type ChartShape,
   eccentricityAt,
   type Limit,
@@ -23,6 +24,13 @@ export interface LimitParts {
   readonly body: Body;
   readonly shape: ChartShape;
   readonly ground: LimitGround;
+  /** Null where the orbit breaks a limit. */
+  readonly mark?: LimitMark | null;
+}
+
+/** An orbit that keeps its limits. */
+export interface LimitMark {
+  readonly point: ChartPoint;
 }
 
 /** A stretch of one row that is outside the limits, in pixels. */
@@ -33,43 +41,92 @@ interface Run {
 }
 
 const rowPx = 3;
-const columns = 32;
-const halvings = 6;
+const columnPx = 12;
+const halvings = 5;
 
-/** Row by row: a coarse walk across, and where the answer changes the place of the change. */
-export function runsOutside({ mapping, body, shape, ground }: LimitParts): Run[] {
-  const { box } = mapping;
-  const runs: Run[] = [];
-  for (let y = box.top + rowPx / 2; y < box.bottom; y += rowPx) {
-    const { altitudeKm } = mapping.pointAt(box.left, y);
-    const eccentricity = eccentricityAt(body, shape, altitudeKm);
-    if (eccentricity === null) continue;
-    const semiMajorAxisKm = body.equatorialRadiusKm + altitudeKm;
-    const isOutside = (x: number) => {
-      const { inclinationRad } = mapping.pointAt(x, y);
-      const mean = { ...ground.angles, semiMajorAxisKm, eccentricity, inclinationRad };
-      return violatesAt(body, mean, ground.epochJd, ground.limits);
-    };
-    runs.push(...rowRuns(box, isOutside).map(([left, right]) => ({ left, right, y })));
+/**
+ * Row by row, from the mark up and down: a walk across, and where the answer changes the place of the change. A strip
+ * that is kept and narrower than a column, as along a curve of one node rate, is followed from each row to the next.
+ */
+export function runsOutside(parts: LimitParts): Run[] {
+  const { box } = parts.mapping;
+  const at = markOn(parts);
+  const first = at?.y ?? box.top + rowPx / 2;
+  const start = at ? rowAt(parts, first, [at.x]) : rowAt(parts, first, []);
+  const rows = [start];
+  for (const step of [-rowPx, rowPx]) {
+    let before = start;
+    for (let y = first + step; y > box.top && y < box.bottom; y += step) {
+      before = rowAt(parts, y, strips(before, box));
+      rows.push(before);
+    }
   }
-  return runs;
+  return rows.flat().flatMap((run) => (at ? besideMark(run, at) : [run]));
 }
 
-function rowRuns({ left, right }: Mapping['box'], isOutside: (x: number) => boolean): [number, number][] {
+/** Where on the canvas a mark that keeps the limits stands. */
+function markOn({ mapping, mark }: LimitParts): { readonly x: number; readonly y: number } | null {
+  if (!mark) return null;
+  const { box } = mapping;
+  const [x, y] = [mapping.x(mark.point.inclinationRad), mapping.y(mark.point.altitudeKm)];
+  return x >= box.left && x <= box.right && y > box.top && y < box.bottom ? { x, y } : null;
+}
+
+/** The mark is known to keep its limits: what a row of a few pixels makes of its surroundings does not cover it. */
+function besideMark(run: Run, { x, y }: { readonly x: number; readonly y: number }): Run[] {
+  if (Math.abs(run.y - y) > 2 * rowPx) return [run];
+  return [
+    { ...run, right: Math.min(run.right, x - columnPx / 2) },
+    { ...run, left: Math.max(run.left, x + columnPx / 2) },
+  ].filter(({ left, right }) => right > left);
+}
+
+/** The middles of what is kept in a row, where it is too narrow to be sure of meeting it again. */
+function strips(runs: readonly Run[], { left, right }: Mapping['box']): number[] {
+  const ends = [left, ...runs.flatMap((run) => [run.left, run.right]), right];
+  return ends.flatMap((end, index) => {
+    const next = ends[index + 1];
+    const isKept = index % 2 === 0 && next !== undefined && next > end;
+    return isKept && next - end < 2 * columnPx ? [end, (end + next) / 2, next] : [];
+  });
+}
+
+function rowAt({ mapping, body, shape, ground }: LimitParts, y: number, also: readonly number[]): Run[] {
+  const { box } = mapping;
+  const { altitudeKm } = mapping.pointAt(box.left, y);
+  const eccentricity = eccentricityAt(body, shape, altitudeKm);
+  if (eccentricity === null) return [];
+  const semiMajorAxisKm = body.equatorialRadiusKm + altitudeKm;
+  const isOutside = (x: number) => {
+    const { inclinationRad } = mapping.pointAt(x, y);
+    const mean = { ...ground.angles, semiMajorAxisKm, eccentricity, inclinationRad };
+    return violatesAt(body, mean, ground.epochJd, ground.limits);
+  };
+  return rowRuns(places(box, also), isOutside).map(([left, right]) => ({ left, right, y }));
+}
+
+function places({ left, right }: Mapping['box'], also: readonly number[]): number[] {
+  const columns = Math.max(1, Math.ceil((right - left) / columnPx));
+  const even = Array.from({ length: columns + 1 }, (_, column) => left + ((right - left) * column) / columns);
+  return also.length === 0 ? even : [...even, ...also].sort((one, other) => one - other);
+}
+
+function rowRuns(places: readonly number[], isOutside: (x: number) => boolean): [number, number][] {
   const runs: [number, number][] = [];
-  let [before, wasOutside] = [left, isOutside(left)];
-  let start = left;
-  for (let column = 1; column <= columns; column += 1) {
-    const x = left + ((right - left) * column) / columns;
+  let before = places[0] ?? 0;
+  let wasOutside = isOutside(before);
+  let start = before;
+  for (const x of places.slice(1)) {
     const isNow = isOutside(x);
     if (isNow !== wasOutside) {
-      const edge = edgeBetween(before, x, (at) => isOutside(at) === wasOutside);
+      const [from, was] = [before, wasOutside];
+      const edge = edgeBetween(from, x, (at) => isOutside(at) === was);
       if (wasOutside) runs.push([start, edge]);
       start = edge;
     }
     [before, wasOutside] = [x, isNow];
   }
-  if (wasOutside) runs.push([start, right]);
+  if (wasOutside) runs.push([start, before]);
   return runs;
 }
 
