@@ -35,6 +35,7 @@ export function wantedOf({ orbit, nodeForm, spanDays, settings }: WantedParts): 
     spanDays,
     forces,
     stretches: stretchesOf(spanDays),
+    isAverage: orbit.typedAs === 'mean',
     node,
     boxMinutes,
   } as const;

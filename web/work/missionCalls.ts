@@ -14,12 +14,15 @@ import {
   type MissionHistory,
   missionEvents,
   missionHistory,
+  steadyMean,
 } from '../../core/index';
 import { columnsOf, type ElementColumns } from './columns';
 
 export interface MissionRequest extends Omit<HistoryRequest, 'sampleDays'> {
   /** Evenly spaced stretches between samples. */
   readonly stretches: number;
+  /** Whether the mean elements are a design's averages, or came from a state and have yet to be steadied. */
+  readonly isAverage: boolean;
   readonly node: 'ascending' | 'descending';
   /** Minutes to either side of the local time at the start. */
   readonly boxMinutes: number;
@@ -81,8 +84,9 @@ export function createMissionCalls() {
     return kept;
   };
   return {
-    history(request: MissionRequest, onShare: OnShare): HistoryPart {
+    history(asked: MissionRequest, onShare: OnShare): HistoryPart {
       const startMs = performance.now();
+      const request = { ...asked, mean: averageOf(asked) };
       const history = evenHistory(request, onShare);
       kept = { request, history };
       return { ...partOf(request, history), tookMs: performance.now() - startMs };
@@ -103,8 +107,13 @@ export function createMissionCalls() {
   };
 }
 
+/** The elements a history starts from: what came from a state holds some metres of a that the orbit does not keep. */
+export function averageOf({ body, mean, isAverage, forces }: Omit<MissionRequest, 'stretches' | 'boxMinutes'>) {
+  return isAverage || forces.zonalDegree < 2 ? mean : steadyMean(body, mean, forces.zonalDegree);
+}
+
 function coreRequest(request: MissionRequest, sampleDays: number): HistoryRequest {
-  const { stretches: _stretches, node: _node, boxMinutes: _box, ...rest } = request;
+  const { stretches: _stretches, node: _node, boxMinutes: _box, isAverage: _kind, ...rest } = request;
   return { ...rest, sampleDays };
 }
 

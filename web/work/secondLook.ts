@@ -4,11 +4,12 @@ import {
   integrateOrbit,
   type LeftOutForce,
   localTimeHistory,
+  meanOfSteady,
   missionHistory,
   stateFromMean,
 } from '../../core/index';
 import { columnsOf, type ElementColumns } from './columns';
-import type { MissionRequest } from './missionCalls';
+import { averageOf, type MissionRequest } from './missionCalls';
 
 export type SecondLookRequest = Omit<MissionRequest, 'stretches' | 'boxMinutes'>;
 
@@ -29,11 +30,13 @@ export function secondLook(request: SecondLookRequest, onProgress: (share: numbe
   const startMs = performance.now();
   const { body, mean, epochJd, spanDays, forces, node } = request;
   const sampleDays = spanDays / samplesAcross;
-  const state = stateFromMean(body, mean);
+  // An integration that is to follow a design's averages starts from the state that keeps them.
+  const state = stateFromMean(
+    body,
+    request.isAverage && forces.zonalDegree >= 2 ? meanOfSteady(body, mean, forces.zonalDegree) : mean,
+  );
   const orbit = integrateOrbit({ body, state, epochJd, spanDays, forces, sampleDays }, { onProgress });
-  // From the very elements the integration starts from, as they come back from its state.
-  const start = orbit.samples[0]?.mean ?? mean;
-  const history = missionHistory({ body, mean: start, epochJd, spanDays, forces, sampleDays });
+  const history = missionHistory({ body, mean: averageOf(request), epochJd, spanDays, forces, sampleDays });
   const local = localTimeHistory({ body, epochJd, node, sun: 'mean', samples: orbit.samples });
   return {
     integrated: columnsOf(orbit.samples),

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { bodies, degPerRad, julianDateFromIso, radPerDeg } from '../../../core/index';
+import { bodies, degPerRad, julianDateFromIso, radPerDeg, steadyMean } from '../../../core/index';
 import { createMissionCalls, type MissionRequest } from '../../../web/work/missionCalls';
 import { secondLook } from '../../../web/work/secondLook';
 
@@ -20,12 +20,23 @@ const request: MissionRequest = {
   spanDays: 365.25,
   forces: { zonalDegree: 14, sun: true, moon: true },
   stretches: 40,
+  isAverage: true,
   node: 'descending',
   boxMinutes: 1,
 };
 const quiet = () => undefined;
 
 describe('a mission in stages', () => {
+  it('starts from the a that the orbit keeps where the elements came from a state, and as given where they are a design', () => {
+    const startOf = (isAverage: boolean) => {
+      const { columns } = createMissionCalls().history({ ...request, spanDays: 1, stretches: 2, isAverage }, quiet);
+      return columns.semiMajorAxisKm[0] ?? Number.NaN;
+    };
+    expect(startOf(true)).toBe(mean.semiMajorAxisKm);
+    expect(startOf(false)).toBeCloseTo(steadyMean(bodies.earth, mean, 14).semiMajorAxisKm, 9);
+    expect(Math.abs(startOf(false) - mean.semiMajorAxisKm)).toBeGreaterThan(1e-4);
+  });
+
   it('has columns evenly spaced over the span, finer samples behind them, and light at the same moments', () => {
     const calls = createMissionCalls();
     const shares: number[] = [];
