@@ -29,8 +29,13 @@ export function beyondPole(failure: Failure): BeyondPole | null {
   const { shape, cosine } = first;
   const { semiMajorAxisKm, eccentricity } = shape;
   const most = rejected.length > 0 ? '' : 'even at best ';
-  const text = `cos i would ${most}have to be ${cosineText(cosine)} ${placeText(problem, shape)}; ${limitText(problem, node, first)}`;
-  return { text, points: [{ semiMajorAxisKm, eccentricity, theta: Math.sign(cosine) }] };
+  const place = placeText(problem, shape);
+  const theta = Math.sign(cosine);
+  const reached = `${node.write(nodeRateAt(shape, theta))} at i ${theta > 0 ? '0°' : '180°'}`;
+  const text =
+    `cos i would ${most}have to be ${cosineText(cosine)} ${place}: the node rate there reaches at most ${reached}; ` +
+    limitText(problem, node, first);
+  return { text, points: [{ semiMajorAxisKm, eccentricity, theta }] };
 }
 
 function wantedAt({ body }: Problem, node: Condition, shape: ShapeRates | null): readonly Wanted[] {

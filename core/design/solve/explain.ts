@@ -3,6 +3,7 @@ import type { Condition } from '../conditions/condition';
 import { type NoOrbit, noOrbit } from './answer';
 import { beyondPole } from './beyondPole';
 import { inSentence, namesOf } from './conflicts';
+import { missedText, nearestPoint } from './nearest';
 import {
   ceilingKm,
   floorKm,
@@ -46,7 +47,8 @@ export function explained(failure: Failure): NoOrbit {
     return withNearest(noOrbit('didNotConverge', text));
   }
   const sentence = shapeless(failure) ?? beyond?.text ?? outside(failure) ?? outOfReach(failure, reached);
-  return withNearest(noOrbit('noSolution', sentence ?? `${labels}: no orbit meets them.`));
+  const missed = nearest && !beyond ? missedText(problem, nearest) : '';
+  return withNearest(noOrbit('noSolution', `${sentence ?? `${labels}: no orbit meets them.`}${missed}`));
 }
 
 function everywhere(problem: Problem, condition: Condition): NoOrbit {
@@ -114,16 +116,4 @@ function outOfReach({ problem, division }: Failure, reached: readonly ReachedPoi
   const given = others.length > 0 ? ` with ${others.join(' and ')}` : '';
   const range = low === high ? `is ${low}` : `runs from ${low} to ${high}`;
   return `The ${condition.quantity} ${range}${given}, whatever the ${namesOf(problem.free)}; ${condition.write(condition.target)} is asked for.`;
-}
-
-function nearestPoint(problem: Problem, points: readonly Point[]): Point | null {
-  let best: Point | null = null;
-  let least = Infinity;
-  for (const point of points) {
-    if (!isInDomain(problem.body, point)) continue;
-    const residuals = residualsAt(problem, point);
-    const size = residuals ? Math.hypot(...residuals) : Infinity;
-    if (size < least) [best, least] = [point, size];
-  }
-  return best;
 }

@@ -141,7 +141,7 @@ describe('no orbit: the reason and the nearest thing that exists', () => {
     const { kind, text, nearest } = reasonOf({ theory: 'first', start: high });
     expect(kind).toBe('noSolution');
     expect(text).toBe(
-      'cos i would have to be −1.04 at a mean altitude of 6100 km; circular Sun-synchronous orbits end at a mean altitude of 5974 km.',
+      'cos i would have to be −1.04 at a mean altitude of 6100 km: the node rate there reaches at most 0.9513 deg/day at i 180°; circular Sun-synchronous orbits end at a mean altitude of 5974 km.',
     );
     expect(nearest?.inclinationRad).toBe(Math.PI);
   });
@@ -157,6 +157,23 @@ describe('no orbit: the reason and the nearest thing that exists', () => {
   it('says how far below the surface an orbit would be', () => {
     const { text } = reasonOf({ free: ['semiMajorAxisKm'], conditions: [{ kind: 'nodalPeriod', s: 4900 }] });
     expect(text).toMatch(/mean a of 62\d\d km and e 0, whose p .* less than the radius of Earth, 6378 km/);
+  });
+
+  it('offers nothing below the surface unless the start lies there', () => {
+    const low = (semiMajorAxisKm: number) =>
+      reasonOf({
+        free: ['semiMajorAxisKm'],
+        conditions: [{ kind: 'nodalPeriod', s: 4900 }],
+        start: { ...start, semiMajorAxisKm, eccentricity: 0.3 },
+      }).nearest;
+    const perigeeRadiusKm = (semiMajorAxisKm: number) => 0.7 * (low(semiMajorAxisKm)?.semiMajorAxisKm ?? Number.NaN);
+    expect(perigeeRadiusKm(10_000)).toBeGreaterThan(6378.136);
+    expect(perigeeRadiusKm(8000)).toBeLessThan(6378.136);
+  });
+
+  it('says what the nearest misses', () => {
+    const { text } = reasonOf({ free: ['semiMajorAxisKm'], conditions: [{ kind: 'nodalPeriod', s: 4900 }] });
+    expect(text).toMatch(/ The nearest orbit, a 63\d\d km, e 0 and i 98\.000°, does not meet this: nodal period /);
   });
 
   it('names an eccentricity that no orbit has, and the circle as the nearest', () => {
