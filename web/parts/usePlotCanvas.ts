@@ -1,6 +1,7 @@
 /** Loads the drawing code when a plot is first shown, and says so where the browser cannot run it. */
 import type { RefObject } from 'preact';
 import { useEffect, useRef, useState } from 'preact/hooks';
+import { inTurn, leaveTurn } from './inTurn';
 import type { PlotHandle } from './plotCanvas';
 import type { PlotModel } from './plotModel';
 
@@ -21,9 +22,11 @@ export function usePlotCanvas({ host, area }: PlotRefs, model: PlotModel): boole
     const start = async () => {
       try {
         const { drawPlot } = await import('./plotCanvas');
-        if (isShown && host.current && area.current) {
-          handle.current = drawPlot({ host: host.current, area: area.current }, latest.current);
-        }
+        inTurn(handle, () => {
+          if (isShown && host.current && area.current) {
+            handle.current = drawPlot({ host: host.current, area: area.current }, latest.current);
+          }
+        });
       } catch {
         // uPlot formats numbers as it is loaded, and throws where the browser's language is no language tag.
         if (isShown) setFailed(true);
@@ -32,11 +35,14 @@ export function usePlotCanvas({ host, area }: PlotRefs, model: PlotModel): boole
     void start();
     return () => {
       isShown = false;
+      leaveTurn(handle);
       handle.current?.end();
       handle.current = null;
     };
   }, [host, area]);
 
-  useEffect(() => handle.current?.show(model), [model]);
+  useEffect(() => {
+    if (handle.current) inTurn(handle, () => handle.current?.show(latest.current));
+  }, [model]);
   return failed;
 }

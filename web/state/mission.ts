@@ -199,6 +199,7 @@ function runTold(work: MissionWork, told: Told, wanted: WantedRequest, isCurrent
     const { value } = told.result;
     if (isCurrent() && value?.key === key) told.result.value = { ...value, ...part };
   };
+  let history: HistoryPart | null = null;
   told.status.value = working;
   const timer = setTimeout(() => note({ isNoticed: true }), noticedMs);
   const end = (status: MissionStatus) =>
@@ -207,10 +208,15 @@ function runTold(work: MissionWork, told: Told, wanted: WantedRequest, isCurrent
       if (told.status.peek() === working) told.status.value = status;
     });
   const job = work.mission(request, {
-    onHistory: (history) => {
-      if (isCurrent()) told.result.value = { key, request, orbit, history, sky: null, ledger: null };
+    onHistory: (part) => {
+      history = part;
+      // The first lines there are come at once; later ones with their light, so that all is drawn anew only once.
+      if (isCurrent() && !told.result.peek())
+        told.result.value = { key, request, orbit, history, sky: null, ledger: null };
     },
-    onSky: (sky) => add({ sky }),
+    onSky: (sky) => {
+      if (isCurrent() && history) told.result.value = { key, request, orbit, history, sky, ledger: null };
+    },
     onLedger: (ledger) => add({ ledger }),
     onShare: (share) => note({ share }),
   });
