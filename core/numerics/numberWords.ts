@@ -30,6 +30,11 @@ export function formatSignificant(value: number, digits = 10): string {
   return sign + trimmed(size.toPrecision(digits));
 }
 
+/** Anything that stands where a number was expected, to be quoted: with a true minus where it is a number. */
+export function quotedNumber(value: unknown): string {
+  return typeof value === 'number' && !Number.isNaN(value) ? formatSignificant(value) : String(value);
+}
+
 const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 
 function scientific(size: number, digits: number): string {

@@ -1,6 +1,6 @@
 /** What the two altitudes share: heights of perigee and apogee above the body's equatorial radius, from mean a and e. */
 import type { Body } from '../../bodies/body';
-import { formatNumber } from '../../numerics/numberWords';
+import { formatNumber, quotedNumber } from '../../numerics/numberWords';
 import type { Condition, Prepared } from './condition';
 
 export interface Apsis {
@@ -12,7 +12,11 @@ export interface Apsis {
 
 export function preparedAltitude(body: Body, km: number, { kind, name, side }: Apsis): Prepared {
   if (!(typeof km === 'number' && Number.isFinite(km))) {
-    return { ok: false, kind: 'badInput', text: `An altitude has to be a number in km, but it is ${String(km)}.` };
+    return {
+      ok: false,
+      kind: 'badInput',
+      text: `An altitude has to be a number in km, but it is ${quotedNumber(km)}.`,
+    };
   }
   const surfaceKm = body.equatorialRadiusKm;
   const radiusKm = surfaceKm + km;

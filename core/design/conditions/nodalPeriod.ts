@@ -1,5 +1,5 @@
 import { twoPi } from '../../numerics/angles';
-import { formatNumber } from '../../numerics/numberWords';
+import { formatNumber, quotedNumber } from '../../numerics/numberWords';
 import { latitudeRateAt, type ShapeRates } from '../shapeRates';
 import type { Condition, ConditionContext, Prepared } from './condition';
 
@@ -11,7 +11,11 @@ export interface NodalPeriodInput {
 
 export function nodalPeriod({ s }: NodalPeriodInput, { body }: ConditionContext): Prepared {
   if (!(typeof s === 'number' && s > 0 && s < Infinity)) {
-    return { ok: false, kind: 'badInput', text: `A nodal period has to be more than 0 s, but it is ${String(s)}.` };
+    return {
+      ok: false,
+      kind: 'badInput',
+      text: `A nodal period has to be more than 0 s, but it is ${quotedNumber(s)}.`,
+    };
   }
   const condition: Condition = {
     kind: 'nodalPeriod',
@@ -34,5 +38,5 @@ function measure(shape: ShapeRates, theta: number): number {
 }
 
 function write(seconds: number): string {
-  return `${formatNumber(seconds, { digits: 3 })} s`;
+  return `${formatNumber(seconds / 60, { digits: 3 })} min`;
 }

@@ -1,16 +1,16 @@
 /** What the conditions on rates share. */
 import type { Body } from '../../bodies/body';
 import { degPerRad, secondsPerDay } from '../../numerics/angles';
-import { formatNumber, formatSignificant } from '../../numerics/numberWords';
+import { formatNumber, formatSignificant, quotedNumber } from '../../numerics/numberWords';
 import { nodeRateAt, perigeeRateAt } from '../shapeRates';
 import type { Condition, Prepared } from './condition';
 
 /** A rate with its unit: four digits, more where it is slow. */
 export function rateWords(radPerS: number): string {
-  if (radPerS === 0) return '0 deg/day';
+  if (radPerS === 0) return '0°/day';
   const degPerDay = radPerS * degPerRad * secondsPerDay;
   const slow = Math.abs(degPerDay) < 0.01;
-  return `${slow ? formatSignificant(degPerDay, 4) : formatNumber(degPerDay, { digits: 4 })} deg/day`;
+  return `${slow ? formatSignificant(degPerDay, 4) : formatNumber(degPerDay, { digits: 4 })}°/day`;
 }
 
 type Wording = Pick<Condition, 'kind' | 'label' | 'formula'>;
@@ -50,7 +50,11 @@ export function perigeeCondition(radPerS: number, { kind, label, formula }: Word
 /** Rates of node and perigee exist only with a J2. */
 export function preparedRate(body: Body, radPerS: number, make: (radPerS: number) => Condition): Prepared {
   if (!(typeof radPerS === 'number' && Number.isFinite(radPerS))) {
-    return { ok: false, kind: 'badInput', text: `A rate has to be a number in rad/s, but it is ${String(radPerS)}.` };
+    return {
+      ok: false,
+      kind: 'badInput',
+      text: `A rate has to be a number in rad/s, but it is ${quotedNumber(radPerS)}.`,
+    };
   }
   const condition = make(radPerS);
   if ((body.zonals[2] ?? 0) === 0) {

@@ -1,6 +1,6 @@
 import { twoPi } from '../../numerics/angles';
 import { commonDivisor } from '../../numerics/integers';
-import { formatNumber } from '../../numerics/numberWords';
+import { formatNumber, quotedNumber } from '../../numerics/numberWords';
 import { latitudeRateAt, nodeRateAt, type ShapeRates } from '../shapeRates';
 import type { Condition, ConditionContext, Prepared } from './condition';
 import { nodeCondition } from './rates';
@@ -32,7 +32,7 @@ export function repeat({ revolutions, days }: RepeatInput, { body }: ConditionCo
 
 function badCount(name: string, count: number): string | null {
   if (!(typeof count === 'number' && Number.isInteger(count) && count >= 1)) {
-    return `A repeat ground track needs a whole number of ${name}, at least 1, but it is ${String(count)}.`;
+    return `A repeat ground track needs a whole number of ${name}, at least 1, but it is ${quotedNumber(count)}.`;
   }
   return count > most ? `A repeat ground track can have ${formatNumber(most, { digits: 0 })} ${name} at most.` : null;
 }

@@ -1,3 +1,4 @@
+import { quotedNumber } from '../../numerics/numberWords';
 import type { MeanElements, Theory } from '../../orbit/elements';
 import { type NoOrbit, noOrbit } from './answer';
 import { type FreeElement, freeElements } from './problem';
@@ -31,15 +32,15 @@ export function inputProblem({ theory, start, free, conditions }: Asked): NoOrbi
 
 function badAxis(semiMajorAxisKm: number): string | null {
   if (semiMajorAxisKm > 0 && semiMajorAxisKm < Infinity) return null;
-  return `The held semi-major axis has to be more than 0 km, but it is ${String(semiMajorAxisKm)}.`;
+  return `The held semi-major axis has to be more than 0 km, but it is ${quotedNumber(semiMajorAxisKm)}.`;
 }
 
 function badHeld({ eccentricity: e, inclinationRad: i }: MeanElements, free: readonly FreeElement[]): string | null {
   if (!free.includes('eccentricity') && !(e >= 0 && e < 1)) {
-    return `The held eccentricity has to be from 0 to below 1, but it is ${String(e)}.`;
+    return `The held eccentricity has to be from 0 to below 1, but it is ${quotedNumber(e)}.`;
   }
   if (!free.includes('inclinationRad') && !(i >= 0 && i <= Math.PI)) {
-    return `The held inclination has to be from 0 to π rad, but it is ${String(i)}.`;
+    return `The held inclination has to be from 0 to π rad, but it is ${quotedNumber(i)}.`;
   }
   return null;
 }

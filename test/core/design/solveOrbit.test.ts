@@ -126,7 +126,7 @@ describe('conditionWorkings', () => {
     const conditions = [sun, track(143, 10), perigee(700), { kind: 'frozen' }] as const;
     const { mean } = orbitOf({ free: ['semiMajorAxisKm', 'inclinationRad'], conditions: [sun, track(143, 10)] });
     const [node, closure, height, frozen] = conditionWorkings({ body: earth, theory: 'second', mean, conditions });
-    expect(node).toMatchObject({ formula: 'Ω̇ = 2π / year', asked: '0.9856 deg/day', reached: '0.9856 deg/day' });
+    expect(node).toMatchObject({ formula: 'Ω̇ = 2π / year', asked: '0.9856°/day', reached: '0.9856°/day' });
     expect(Math.abs(node?.residual ?? 1)).toBeLessThan(1e-12);
     expect(closure).toMatchObject({ label: 'Repeat of 143 revolutions in 10 days', asked: closure?.reached });
     expect(height).toMatchObject({ quantity: 'perigee altitude', asked: '700.000 km' });
@@ -141,7 +141,7 @@ describe('no orbit: the reason and the nearest thing that exists', () => {
     const { kind, text, nearest } = reasonOf({ theory: 'first', start: high });
     expect(kind).toBe('noSolution');
     expect(text).toBe(
-      'cos i would have to be −1.04 at a mean altitude of 6100 km: the node rate there reaches at most 0.9513 deg/day at i 180°; circular Sun-synchronous orbits end at a mean altitude of 5974 km.',
+      'cos i would have to be −1.04 at a mean altitude of 6100 km: the node rate there reaches at most 0.9513°/day at i 180°; circular Sun-synchronous orbits end at a mean altitude of 5974 km.',
     );
     expect(nearest?.inclinationRad).toBe(Math.PI);
   });
@@ -149,7 +149,7 @@ describe('no orbit: the reason and the nearest thing that exists', () => {
   it('gives the range of what can be had, and the inclination nearest to it', () => {
     const { text, nearest } = reasonOf({ conditions: [{ kind: 'perigeeRate', radPerS: -1e-6 }] });
     expect(text).toMatch(
-      /^The perigee rate runs from −3\.\d+ deg\/day to 13\.\d+ deg\/day, whatever the inclination; −4\.9504 deg/,
+      /^The perigee rate runs from −3\.\d+°\/day to 13\.\d+°\/day, whatever the inclination; −4\.9504°/,
     );
     expect((nearest?.inclinationRad ?? 0) * degPerRad).toBeCloseTo(90, 6);
   });
@@ -176,6 +176,13 @@ describe('no orbit: the reason and the nearest thing that exists', () => {
     expect(text).toMatch(/ The nearest orbit, a 63\d\d km, e 0 and i 98\.000°, does not meet this: nodal period /);
   });
 
+  it('writes minutes, degrees a day and the true minus', () => {
+    const { text } = reasonOf({ free: ['semiMajorAxisKm'], conditions: [{ kind: 'nodalPeriod', s: 4900 }] });
+    expect(text).toContain('nodal period 84.');
+    expect(text).toMatch(/ min\.$/);
+    expect(reasonOf({ conditions: [track(-14, 1)] }).text).toMatch(/but it is −14\.$/);
+  });
+
   it('names an eccentricity that no orbit has, and the circle as the nearest', () => {
     const { text, nearest } = reasonOf({ free: ['eccentricity'], conditions: [perigee(800)] });
     expect(text).toMatch(/would need an eccentricity of −0\.0141/);
@@ -198,7 +205,7 @@ describe('conditions that cannot count together', () => {
       'two node rates',
       { free: ['semiMajorAxisKm', 'inclinationRad'], conditions: [sun, { kind: 'nodeRate', radPerS: -1e-6 }] },
       'conflict',
-      /^Sun-synchronous and node rate −4\.9504 deg\/day conflict: .* 0\.9856 deg\/day against −4\.9504/,
+      /^Sun-synchronous and node rate −4\.9504°\/day conflict: .* 0\.9856°\/day against −4\.9504/,
       [0, 1],
     ],
     [
@@ -247,7 +254,7 @@ describe('conditions that cannot count together', () => {
       'perigee still and a perigee rate',
       { free: shape, conditions: [still, { kind: 'perigeeRate', radPerS: 1e-7 }] },
       'conflict',
-      /0 deg\/day against 0\.4950/,
+      /0°\/day against 0\.4950/,
       [0, 1],
     ],
     [
