@@ -41,6 +41,6 @@ export function preparedAltitude(body: Body, km: number, { kind, name, side }: A
   return { ok: true, condition };
 }
 
-function write(km: number): string {
-  return `${formatNumber(km, { digits: 3 })} km`;
+function write(km: number, more = 0): string {
+  return `${formatNumber(km, { digits: 3 + more })} km`;
 }

@@ -26,8 +26,8 @@ export interface Condition {
   readonly measure: (shape: ShapeRates, theta: number) => number;
   /** What a residual is counted in, > 0, in the target's unit. */
   readonly scale: (shape: ShapeRates, theta: number) => number;
-  /** The quantity with its unit, as read. */
-  readonly write: (value: number) => string;
+  /** The quantity with its unit, as read; on request with more digits than usual. */
+  readonly write: (value: number, more?: number) => string;
   /** The quantity's name in the middle of a sentence. */
   readonly quantity: string;
   /** What was changed in reading the wish, in words. */

@@ -37,6 +37,6 @@ function measure(shape: ShapeRates, theta: number): number {
   return twoPi / latitudeRateAt(shape, theta);
 }
 
-function write(seconds: number): string {
-  return `${formatNumber(seconds / 60, { digits: 3 })} min`;
+function write(seconds: number, more = 0): string {
+  return `${formatNumber(seconds / 60, { digits: 3 + more })} min`;
 }

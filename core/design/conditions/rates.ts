@@ -6,11 +6,11 @@ import { nodeRateAt, perigeeRateAt } from '../shapeRates';
 import type { Condition, Prepared } from './condition';
 
 /** A rate with its unit: four digits, more where it is slow. */
-export function rateWords(radPerS: number): string {
+export function rateWords(radPerS: number, more = 0): string {
   if (radPerS === 0) return '0°/day';
   const degPerDay = radPerS * degPerRad * secondsPerDay;
   const slow = Math.abs(degPerDay) < 0.01;
-  return `${slow ? formatSignificant(degPerDay, 4) : formatNumber(degPerDay, { digits: 4 })}°/day`;
+  return `${slow ? formatSignificant(degPerDay, 4 + more) : formatNumber(degPerDay, { digits: 4 + more })}°/day`;
 }
 
 type Wording = Pick<Condition, 'kind' | 'label' | 'formula'>;

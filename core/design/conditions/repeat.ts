@@ -59,7 +59,7 @@ function closing(track: Track, spin: number, body: ConditionContext['body']): Co
     target,
     measure,
     scale: (shape, theta) => target + measure(shape, theta),
-    write: (value) => `${formatNumber(value, { digits: 6 })} a nodal day`,
+    write: (value, more = 0) => `${formatNumber(value, { digits: 6 + more })} a nodal day`,
     quantity: 'number of revolutions',
     notes: common > 1 ? [reduced] : [],
     axisGuessKm: Math.cbrt(body.muKm3PerS2 / (target * spin) ** 2),

@@ -1,11 +1,14 @@
 /** Conditions that cannot both count, found before anything is solved. */
 import type { Body } from '../../bodies/body';
+import { degPerRad, secondsPerDay } from '../../numerics/angles';
 import type { Condition } from '../conditions/condition';
 import { nodeRateOfRepeat } from '../conditions/repeat';
 import { type NoOrbit, noOrbit } from './answer';
 import { type FreeElement, freeElements } from './problem';
 
 const sameShare = 1e-12;
+const typedDigits = 6;
+const mostMore = 10;
 
 /** The first pair of conditions on one and the same quantity, or of altitudes upside down. */
 export function conflictBetween(conditions: readonly Condition[]): NoOrbit | null {
@@ -29,15 +32,30 @@ function problemOfPair(one: Condition, other: Condition): PairProblem | null {
   if (one.family === 'altitude' && one.kind !== other.kind) return upsideDown(one, other);
   if (one.family === 'period' && one.kind !== other.kind) return null;
   const names = `${one.label} and ${inSentence(other.label)}`;
-  const size = Math.max(Math.abs(one.target), Math.abs(other.target));
-  if (Math.abs(one.target - other.target) <= sameShare * size) {
+  if (isSame(one, other)) {
     return { kind: 'redundant', text: `${names} ask for the same ${one.quantity}: one of them is redundant.` };
   }
-  const values = `${one.write(one.target)} against ${other.write(other.target)}`;
   return {
     kind: 'conflict',
-    text: `${names} conflict: they ask for different values of the ${one.quantity}, ${values}.`,
+    text: `${names} conflict: they ask for different values of the ${one.quantity}, ${valuesApart(one, other)}.`,
   };
+}
+
+/** A rate is typed with about six digits, one that follows from a year or a track has them all. */
+function isSame(one: Condition, other: Condition): boolean {
+  const isRate = one.family === 'node' || one.family === 'perigee';
+  if (isRate && asTyped(one) === asTyped(other)) return true;
+  const size = Math.max(Math.abs(one.target), Math.abs(other.target));
+  return Math.abs(one.target - other.target) <= sameShare * size;
+}
+
+const asTyped = ({ target }: Condition): string => (target * degPerRad * secondsPerDay).toPrecision(typedDigits);
+
+/** Both targets with as many digits as tell them apart. */
+function valuesApart(one: Condition, other: Condition): string {
+  let more = 0;
+  while (more < mostMore && one.write(one.target, more) === other.write(other.target, more)) more += 1;
+  return `${one.write(one.target, more)} against ${other.write(other.target, more)}`;
 }
 
 function upsideDown(one: Condition, other: Condition): PairProblem | null {

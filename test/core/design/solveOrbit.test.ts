@@ -216,6 +216,20 @@ describe('conditions that cannot count together', () => {
       [0, 1],
     ],
     [
+      'a node rate typed as the one that follows the Sun',
+      { free: shape, conditions: [sun, { kind: 'nodeRate', radPerS: 0.985647 / degPerRad / 86_400 }] },
+      'redundant',
+      /^Sun-synchronous and node rate 0\.9856°\/day ask for the same node rate: one of them is redundant/,
+      [0, 1],
+    ],
+    [
+      'a node rate a little off',
+      { free: shape, conditions: [sun, { kind: 'nodeRate', radPerS: 0.98561 / degPerRad / 86_400 }] },
+      'conflict',
+      /conflict: .* 0\.98565°\/day against 0\.98561°\/day/,
+      [0, 1],
+    ],
+    [
       'the same track twice',
       { free: all, conditions: [track(14, 1), sun, track(28, 2)] },
       'redundant',
