@@ -6,6 +6,7 @@ import { contentSecurityPolicy, contentSecurityPolicyTag } from './web/build/con
 import { landOutline } from './web/build/landOutline.ts';
 import { leanPlot } from './web/build/leanPlot.ts';
 import { offlineWorker } from './web/build/offlineWorker.ts';
+import { secondMinify } from './web/build/secondMinify.ts';
 import { workerEntries } from './web/build/workerEntries.ts';
 
 const root = fileURLToPath(new URL('.', import.meta.url)).replace(/[\\/]$/, '');
@@ -21,8 +22,9 @@ const onDemand =
 const mission =
   /[\\/]core[\\/](record[\\/]mission|mission[\\/]historyRequest|forces[\\/](drag|zonal)\.|bodies[\\/]atmosphere)|[\\/]web[\\/]state[\\/]mission(Outcome|Request)/;
 
-/** The drawings of Size but the one it opens with. */
-const pictures = /[\\/]web[\\/]size[\\/](map|orbit|sweep|tracks|otherOrbit)/;
+/** The drawings of Size but the one it opens with, and the workings. */
+const pictures =
+  /[\\/]web[\\/]size[\\/](limit|map|orbit|sweep|tracks|otherOrbit|working)|[\\/]core[\\/]record[\\/](swe|workings|formula)/;
 
 /** What Size fetches as soon as its first readings stand. */
 const chart =
@@ -62,6 +64,7 @@ export default defineConfig({
     workerEntries(),
     landOutline(),
     leanPlot(),
+    secondMinify(),
     contentSecurityPolicyTag(),
     offlineWorker({ entry: `${root}/web/offline/serviceWorker.ts`, fileName: 'serviceWorker.js' }),
   ],
@@ -70,9 +73,6 @@ export default defineConfig({
     emptyOutDir: true,
     target: 'es2022',
     assetsInlineLimit: 0,
-    // Slower, and smaller by 3 kB of all that a tablet keeps.
-    minify: 'terser',
-    terserOptions: { module: true, compress: { passes: 3 }, format: { comments: false } },
     // One sheet packs to two thirds of a dozen, and no place waits for its own.
     cssCodeSplit: false,
     modulePreload: { polyfill: false },
