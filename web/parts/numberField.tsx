@@ -67,9 +67,9 @@ function FieldLabel({ id, label, labelControl, text, step, onText, onStep, readO
 
 /** A longer number is written smaller: none of its digits may be out of sight. */
 function sizeClass({ length }: string): string {
-  if (length > 17) return ' is-longest';
-  if (length > 13) return ' is-longer';
-  return length > 9 ? ' is-long' : '';
+  if (length > 14) return ' is-longer is-longest';
+  if (length > 11) return ' is-longer';
+  return length > 7 ? ' is-long' : '';
 }
 
 function FieldInput({
