@@ -112,6 +112,9 @@ export async function readingNumber(page: Page, label: string): Promise<number> 
   return numberIn(await textOf(reading(page, label).locator('.reading-value')));
 }
 
+/** Rows out of sight follow once the orbit has rested. */
+export const restOf = (page: Page): Promise<void> => page.waitForTimeout(400);
+
 /** Everything the list of readings says, for a comparison before and after. */
 export const readingTexts = (page: Page): Promise<string[]> => page.locator('.reading-value').allInnerTexts();
 

