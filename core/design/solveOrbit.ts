@@ -7,14 +7,15 @@
  */
 import type { Body } from '../bodies/body';
 import type { MeanElements, Theory } from '../orbit/elements';
-import type { Condition } from './conditions/condition';
-import { type OrbitCondition, preparedCondition } from './conditions/registry';
-import { type NoOrbit, noOrbit, type SolveResult } from './solve/answer';
+import type { OrbitCondition } from './conditions/registry';
+import type { SolveResult } from './solve/answer';
 import { conflictBetween, mismatch, withoutTwoPeriods } from './solve/conflicts';
 import { explained, type Failure } from './solve/explain';
 import { frozenSolutions, type PointsResult } from './solve/frozenLoop';
 import { inputProblem } from './solve/inputProblem';
+import { preparedAll } from './solve/prepared';
 import { type FreeElement, meanOf, type Problem } from './solve/problem';
+import { repeatPeriodText } from './solve/repeatPeriod';
 import { dividedProblem, search } from './solve/search';
 import { settled } from './solve/settle';
 import { surfaceNotes } from './solve/surfaceNotes';
@@ -30,9 +31,16 @@ export interface SolveInput {
 
 /** Every orbit that meets the conditions; or why there is none, and the nearest thing that exists. Never throws on input. */
 export function solveOrbit(input: SolveInput): SolveResult {
+  const answer = solved(input);
+  if (answer.ok || !(answer.reason.kind === 'noSolution' || answer.reason.kind === 'conflict')) return answer;
+  const more = repeatPeriodText(input, solved);
+  return more === null ? answer : { ...answer, reason: { ...answer.reason, text: `${answer.reason.text} ${more}` } };
+}
+
+function solved(input: SolveInput): SolveResult {
   const bad = inputProblem(input);
   if (bad) return bad;
-  const prepared = preparedAll(input);
+  const prepared = preparedAll(input.conditions, input);
   if ('ok' in prepared) return prepared;
   const conflict = conflictBetween(prepared) ?? mismatch(prepared, input.free);
   if (conflict) return conflict;
@@ -50,16 +58,6 @@ export function solveOrbit(input: SolveInput): SolveResult {
   const held = frozen?.settle?.(mean.semiMajorAxisKm, mean.inclinationRad);
   const notes = [...prepared.flatMap((each) => each.notes), ...(held?.ok ? held.notes : [])];
   return { ok: true, mean, all, notes: [...notes, ...surfaceNotes(body, mean)] };
-}
-
-function preparedAll({ body, theory, conditions }: SolveInput): readonly Condition[] | NoOrbit {
-  const ready: Condition[] = [];
-  for (const [place, wish] of conditions.entries()) {
-    const prepared = preparedCondition(wish, { body, theory });
-    if (!prepared.ok) return noOrbit(prepared.kind, prepared.text, [place]);
-    ready.push(prepared.condition);
-  }
-  return ready;
 }
 
 function plainSolutions(problem: Problem) {

@@ -68,7 +68,7 @@ function upsideDown(one: Condition, other: Condition): PairProblem | null {
 }
 
 export function inSentence(label: string): string {
-  return label.startsWith('Sun') ? label : label.charAt(0).toLowerCase() + label.slice(1);
+  return label.startsWith('Sun') || label === 'Frozen' ? label : label.charAt(0).toLowerCase() + label.slice(1);
 }
 
 /** A repeat and a nodal period together fix the nodal day: the repeat counts as the node rate that leaves. */
@@ -116,8 +116,10 @@ export function mismatch(conditions: readonly Condition[], free: readonly FreeEl
   }
   const settledShape = [...altitudes, ...(frozen ? [frozen] : [])];
   if (first && settledShape.length > shapeFree.length) {
-    const other = second ?? (frozen as Condition);
-    const text = `${first.label} and ${inSentence(other.label)} conflict: both settle the ${namesOf(shapeFree)}.`;
+    const others = [second, frozen].flatMap((each) => (each ? [each] : []));
+    const names = [first, ...others].map(({ label }, place) => (place === 0 ? label : inSentence(label)));
+    const listed = `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`;
+    const text = `${listed} conflict: ${others.length > 1 ? 'all three' : 'both'} settle the ${namesOf(shapeFree)}.`;
     return noOrbit('conflict', text, places(settledShape));
   }
   return tooFew(conditions, free);

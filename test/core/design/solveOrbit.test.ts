@@ -296,7 +296,7 @@ describe('conditions that cannot count together', () => {
       'frozen with both altitudes',
       { free: all, conditions: [perigee(500), apogee(600), { kind: 'frozen' }] },
       'conflict',
-      /conflict: both settle/,
+      /^Perigee altitude .*, apogee altitude .* and Frozen conflict: all three settle the/,
     ],
     [
       'both rates at a held inclination in first order',
