@@ -5,10 +5,11 @@
  * elements that were settled, or the reason why there is none, at the condition that is in the way.
  */
 import { solveOrbit } from '../../design/solveOrbit';
+import { clashText, wishNames } from '../../design/wishClash';
 import type { MeanElements } from '../../orbit/elements';
 import type { Candidate } from '../candidate';
 import type { ResolvedOrbit } from '../resolved';
-import { elementNames, type SettledElement } from './kinds';
+import { elementNames, type SettledElement, settledElements } from './kinds';
 import { type ReadCondition, readConditions } from './readConditions';
 
 export type Settlement =
@@ -38,10 +39,7 @@ export function settleOrbit(candidate: Candidate, start: ResolvedOrbit): Settlem
   if (readable.length < conditions.length) return { ok: false, conditions, message: '', nearest: null };
   const settled = readable.map(({ entry }) => entry.settles);
   const twice = settled.find((element, index) => settled.indexOf(element) !== index);
-  if (twice !== undefined) {
-    const message = `Two conditions settle ${elementNames[twice]}; let one of them settle another element.`;
-    return { ok: false, conditions, message, nearest: null };
-  }
+  if (twice !== undefined) return { ok: false, conditions, message: twiceText(readable, twice, start), nearest: null };
   const result = solveOrbit({
     body: start.body,
     theory: 'second',
@@ -53,4 +51,23 @@ export function settleOrbit(candidate: Candidate, start: ResolvedOrbit): Settlem
   const isFrozen = readable.some(({ condition }) => condition.kind === 'frozen');
   const orbit: ResolvedOrbit = { ...start, mean: result.mean, ...(isFrozen ? { frozen: true } : {}) };
   return { ok: true, conditions, orbit, settled, all: result.all, notes: result.notes };
+}
+
+type Readable = Extract<ReadCondition, { readonly ok: true }>;
+
+/** Which wishes settle one and the same element, and what to do about it; first of all that they clash, if they do. */
+function twiceText(readable: readonly Readable[], twice: SettledElement, { body }: ResolvedOrbit): string {
+  const context = { body, theory: 'second' } as const;
+  const wishes = readable.map(({ condition }) => condition);
+  const clash = clashText(wishes, context);
+  if (clash !== null) return clash;
+  const onOne = readable.filter(({ entry }) => entry.settles === twice).map(({ condition }) => condition);
+  const count = ['Two', 'Three', 'Four'][onOne.length - 2] ?? String(onOne.length);
+  const opening = `${count} conditions settle ${elementNames[twice]}, ${wishNames(onOne, context)}`;
+  if (readable.length > settledElements.length) {
+    return `${opening}: ${readable.length} conditions cannot be met by ${settledElements.length} elements; drop one.`;
+  }
+  const open = settledElements.filter((element) => !readable.some(({ entry }) => entry.settles === element));
+  const others = open.map((element) => elementNames[element]).join(' or ');
+  return `${opening}: let one of them settle ${others}, or drop one.`;
 }

@@ -84,3 +84,40 @@ describe('frozen at an own body', () => {
     expect(letters({ bodyJ4: '-1.5e-5' })).toBe(letters({ bodyJ3: '0', bodyJ4: '-1.5e-5' }));
   });
 });
+
+describe('conditions that settle one element', () => {
+  it('are named, with what else could be settled', () => {
+    expect(refusal([wish('sunSynchronous'), wish('perigeeStationary')])).toBe(
+      'Two conditions settle the inclination, Sun-synchronous and perigee stationary: let one of them settle ' +
+        'the semi-major axis or the eccentricity, or drop one.',
+    );
+    const shape = [wish('perigeeAltitude', { altitude: '700' }), wish('apogeeAltitude', { altitude: '800' })];
+    expect(refusal([...shape, wish('frozen')])).toMatch(
+      /^Two conditions settle the eccentricity, Apogee altitude 800\.000 km and Frozen: let one/,
+    );
+  });
+
+  it('are told that there are more of them than elements', () => {
+    const track = wish('repeat', { revolutions: '143', days: '10' });
+    expect(refusal([wish('sunSynchronous'), track, wish('frozen'), wish('perigeeStationary')])).toMatch(
+      /4 conditions cannot be met by 3 elements; drop one\.$/,
+    );
+  });
+
+  it('are told to clash where they do', () => {
+    expect(refusal([wish('sunSynchronous'), wish('nodeRate', { rate: '0.985647' })])).toMatch(/redundant\.$/);
+    expect(refusal([wish('sunSynchronous'), wish('nodeRate', { rate: '-5' })])).toMatch(/conflict: /);
+  });
+});
+
+describe('a repeat with a nodal period that it does not have', () => {
+  it('is answered with the period that it takes', () => {
+    const wishes = [
+      wish('repeat', { revolutions: '15', days: '1' }),
+      wish('nodalPeriod', { period: '95.7' }, 'eccentricity'),
+    ];
+    expect(refusal(wishes)).toMatch(
+      / At i 98\.600° and e 0(\.0000)? a repeat of 15 revolutions in 1 day takes a nodal period of 9[56]\.\d{3} min\.$/,
+    );
+  });
+});
