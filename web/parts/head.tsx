@@ -1,6 +1,7 @@
 /** Name, fingerprint and revision of the open orbit; what is kept; the lighting. */
 import { useApp } from '../state/appContext';
 import type { Settings } from '../store/settings';
+import { useRested } from './useRested';
 
 const lightings = ['room', 'sunlight', 'night'] as const;
 const lightingNames = { room: 'Room', sunlight: 'Sunlight', night: 'Night' } as const;
@@ -42,6 +43,8 @@ const clock = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-dig
 
 function HeadStatus() {
   const { saving, store, offline, document } = useApp();
+  // Every keystroke is pending for a moment: what stands still is said.
+  const draftStatus = useRested(store.draft.status);
   const offlineTexts = {
     ready: 'ready offline',
     installing: 'getting ready for offline',
@@ -50,7 +53,7 @@ function HeadStatus() {
   } as const;
   return (
     <p class="head-status" role="status">
-      {keptText(saving.status.value, store.draft.status.value, document.changed.value)}
+      {keptText(saving.status.value, draftStatus, document.changed.value)}
       {' · '}
       {offlineTexts[offline.status.value]}
     </p>

@@ -1,7 +1,7 @@
 import { effect, type ReadonlySignal, useSignal } from '@preact/signals';
 import { useEffect } from 'preact/hooks';
 
-const restMs = 120;
+const restMs = 220;
 
 /** What the signal held when it last stood still for a moment. */
 export function useRested<Value>(source: ReadonlySignal<Value>): Value {
