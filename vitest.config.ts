@@ -11,6 +11,8 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'unit',
+          // Property tests by the thousand, on a machine that others share.
+          testTimeout: 60_000,
           include: ['test/{core,web}/**/*.test.{ts,tsx}'],
           exclude: ['test/web/budgets.test.ts'],
         },

@@ -4,6 +4,7 @@ import { expect, type Page, test } from '@playwright/test';
 import { bodies } from '../../core/index';
 import { wholeWindow } from '../../web/size/chart/chartWindow';
 import { mappingOf, plotBoxOf } from '../../web/size/chart/plotBox';
+import { boundOf } from './asked';
 import { countFrames, percentile, traced } from './frames';
 import { type StaticServer, startServer } from './server';
 import { watch } from './watch';
@@ -252,9 +253,9 @@ test('keeps up with a finger on a slow tablet', async ({ page, browser }) => {
   );
   expect(frames).toBeGreaterThan(60);
   expect(lags.length).toBeGreaterThan(30);
-  expect(Math.max(...lags)).toBeLessThanOrEqual(2);
-  expect(late).toBeLessThanOrEqual(0.05);
-  expect(p95).toBeLessThanOrEqual(12);
+  expect(Math.max(...lags)).toBeLessThanOrEqual(boundOf(2));
+  expect(late).toBeLessThanOrEqual(Math.min(1, boundOf(0.05, 20)));
+  expect(p95).toBeLessThanOrEqual(boundOf(12));
 });
 
 const frameMs = 16;

@@ -1,5 +1,6 @@
 import { expect, type Page, test, type Worker } from '@playwright/test';
 import { choose, dropProfile, field, go, headline, newProfile, openApp, startBrowser, unfold } from './app';
+import { boundOf } from './asked';
 import { type StaticServer, startServer } from './server';
 
 /** With 15 years being computed, at a processor four times slower: fields answer, and cancel is obeyed. Runs alone. */
@@ -160,8 +161,8 @@ test('with 15 years being computed, a keystroke in Size is answered within 50 ms
         `p95 ${whole(quantile(keysMs, 0.95))}, worst ${whole(Math.max(...keysMs))} ms; ` +
         `cancel: median ${whole(quantile(cancelsMs, 0.5))}, worst ${whole(Math.max(...cancelsMs))} ms`,
     );
-    expect(quantile(keysMs, 0.95)).toBeLessThanOrEqual(longestKeystrokeMs);
-    expect(Math.max(...cancelsMs)).toBeLessThanOrEqual(longestCancelMs);
+    expect(quantile(keysMs, 0.95)).toBeLessThanOrEqual(boundOf(longestKeystrokeMs));
+    expect(Math.max(...cancelsMs)).toBeLessThanOrEqual(boundOf(longestCancelMs));
     await expect(headline(page)).toContainText('in 15 years', { timeout: 60_000 });
   } finally {
     await context.close();
