@@ -113,10 +113,13 @@ export async function readingNumber(page: Page, label: string): Promise<number> 
 }
 
 /** Rows out of sight follow once the orbit has rested. */
-export const restOf = (page: Page): Promise<void> => page.waitForTimeout(400);
+export const restOf = (page: Page): Promise<void> => page.waitForTimeout(300);
 
 /** Everything the list of readings says, for a comparison before and after. */
-export const readingTexts = (page: Page): Promise<string[]> => page.locator('.reading-value').allInnerTexts();
+export async function readingTexts(page: Page): Promise<string[]> {
+  await restOf(page);
+  return page.locator('.reading-value').allInnerTexts();
+}
 
 /** Saves with the button and waits until the app says so. */
 export async function save(page: Page): Promise<void> {

@@ -23,7 +23,7 @@ export function SizePlace() {
       <section class="picture" aria-label="The orbit" ref={useScrollFocus<HTMLElement>('y')}>
         <div class="answer">
           {orbit && document.stale.value && (
-            <p class="stale-says">Of the last good entry: what is typed now comes to no orbit.</p>
+            <p class="answer-stale">Of the last good entry: what is typed now comes to no orbit.</p>
           )}
           <Headline />
           <BrokenLimits />

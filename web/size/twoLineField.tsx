@@ -8,8 +8,7 @@ export function TwoLineField() {
   const { document, store } = useApp();
   const { draft, entered } = document;
   const text = draft.value.entry.texts.twoLine;
-  // An empty field is a place to paste, not yet a mistake.
-  const error = entered.value.ok || text.trim() === '' ? undefined : entered.value.errors.twoLine;
+  const error = entered.value.ok ? undefined : entered.value.errors.twoLine;
   const setText = (text: string) => typeTwoLine(document, text);
   return (
     <div class={`field field-tall${error ? ' has-error' : ''}`}>
