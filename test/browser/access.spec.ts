@@ -45,6 +45,8 @@ async function inAllPlaces(page: Page, where: string): Promise<string[]> {
   await go(page, 'size');
   await reading(page, 'Node rate').click();
   await expect(page.locator('.working math').first()).toBeVisible();
+  // What can be scrolled takes the focus once its size has been seen.
+  await page.waitForTimeout(300);
   found.push(...(await violations(page, `${where}, working open`)));
   await page.locator('.working').getByRole('button', { name: 'Close' }).click();
   await unfold(page, /Perigee, anomaly/);
