@@ -101,7 +101,7 @@ test('where no orbit meets a wish, the reason has its numbers and the nearest ca
   await expect(take).toHaveCount(0);
   await expect(page.locator('.condition-outcome')).toContainText('The entry is the nearest that exists');
   await expect(field(page, 'Inclination')).not.toHaveValue(inclination);
-  await expect(page.locator('.answer .stale-says')).toBeVisible();
+  await expect(page.locator('.answer-stale')).toBeVisible();
 });
 
 test('saved without a solution, the place of the headline says why when it is opened again', async ({ context }) => {
