@@ -11,6 +11,8 @@ export default defineConfig({
   workers: 2,
   fullyParallel: false,
   timeout: 60_000,
+  // A neighbour's work on a shared machine may hold a browser up; what fails twice is ours.
+  retries: process.env['CI'] ? 1 : 0,
   projects: [
     { name: 'app', testIgnore: /speed\.spec/ },
     // What is timed runs when nothing else does.
