@@ -136,21 +136,28 @@ async function readDrift(page: Page, { first, second }: Expected): Promise<void>
     ] as const) {
       const expected = degPerDay(rate) * days;
       await expect
-        .poll(async () => Math.abs((await nodeDriftDeg(page, order)) - expected), { timeout: 30_000 })
-        .toBeLessThan(0.1);
+        .poll(
+          async () => {
+            const { deg, unit } = await nodeDrift(page, order);
+            return Math.abs(deg - expected) / unit ** 0.5;
+          },
+          { timeout: 30_000 },
+        )
+        .toBeLessThan(0.005);
     }
   }
 }
 
 /** Node at the cursor by one of the closed forms, from the start, whichever other columns the table has. */
-async function nodeDriftDeg(page: Page, order: string): Promise<number> {
+async function nodeDrift(page: Page, order: string): Promise<{ deg: number; unit: number }> {
   const table = page.getByRole('table', { name: /^At the cursor/ });
   const headers = await table.getByRole('columnheader').allInnerTexts();
   const row = table.getByRole('row', { name: /^Node/ });
   const cells = await row.getByRole('cell').allInnerTexts();
   const column = headers.indexOf(order) - (headers.length - cells.length);
   // Long drifts are told in turns.
-  return numberIn(cells[column] ?? '') * ((await textOf(row)).includes('turns') ? 360 : 1);
+  const unit = (await textOf(row)).includes('turns') ? 360 : 1;
+  return { deg: numberIn(cells[column] ?? '') * unit, unit };
 }
 
 /** Ends the browser, starts it again with the server gone, and finds the orbit as it was. */
